@@ -1,0 +1,21 @@
+export * from './types';
+export { absorbanceOf, transmittanceOf, type Absorbance, type CensorReason } from './absorbance';
+export { ENGINE_ERRORS, EngineError, type EngineErrorCode } from './errors';
+export { type Flag, type FlagCode, type FlagLevel } from './flags';
+export {
+  readSpectrum,
+  type ReadingRule,
+  type SpectrumPoints,
+  type SpectrumReading,
+} from './spectrum/read-spectrum';
+export { calculateStandardCurve } from './standard-curve';
+export {
+  CONCENTRATION_UNIT_NAMES,
+  CONCENTRATION_UNITS,
+  convertConcentration,
+  isMolar,
+  parseUnit,
+  type ConcentrationUnit,
+} from './units';
+export { ENGINE_VERSION } from './version';
+export { type WorkingStep } from './working/ledger';

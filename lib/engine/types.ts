@@ -1,0 +1,262 @@
+import type { Flag } from './flags';
+import type { ConcentrationUnit } from './units';
+import type { WorkingStep } from './working/ledger';
+
+/*
+ * The request and the answer of one standard curve. Plain objects that survive JSON unchanged: they are the
+ * body of the public API, the props of the live page and what is stored with a result.
+ * Concentrations are in the request's unit; absorbances are per 10 mm unless named "as read".
+ */
+
+export type Signal = 'absorbance' | 'transmittance' | 'percentTransmittance';
+export type Model = 'linear' | 'proportional' | 'quadratic';
+export type Weighting =
+  'none' | '1/x' | '1/x2' | '1/y' | '1/y2' | 'varianceFunction' | 'replicates' | 'given';
+
+/** A reading as it came: a number in the request's signal, or the text the instrument showed instead. */
+export type Reading = number | string;
+
+/** What is known about a volumetric vessel: one filling's standard uncertainty is made from it. */
+export interface Ware {
+  /** Half-width of the tolerance, taken as triangular. */
+  readonly toleranceMl?: number;
+  /** Standard deviation of filling it again and again. */
+  readonly repeatabilityMl?: number;
+  /** Half-width of the room's temperature range about 20 °C, taken as rectangular. */
+  readonly temperatureRangeK?: number;
+}
+
+export interface DilutionStep {
+  readonly takenMl: number;
+  readonly toMl: number;
+  /** Standard uncertainty of the volume; give this or the ware, not both. */
+  readonly takenUMl?: number;
+  readonly toUMl?: number;
+  readonly takenWare?: Ware;
+  readonly toWare?: Ware;
+}
+
+export interface BlankRequest {
+  /** Readings at the curve's own path length. */
+  readonly readings: readonly Reading[];
+  readonly use: 'subtract' | 'level';
+  /** Blank readings in cells of another path length; each reading is blanked by its own path. */
+  readonly otherPaths?: readonly { readonly pathLengthMm: number; readonly readings: readonly Reading[] }[];
+}
+
+export interface StandardRequest {
+  readonly name?: string;
+  readonly concentration: number;
+  readonly readings: readonly Reading[];
+  readonly pathLengthMm?: number;
+  /** For weighting "given": w, up to a factor common to the curve. */
+  readonly weight?: number;
+  /** Left out of the fit, still shown. */
+  readonly excluded?: boolean;
+  /** Positions (from 0) of single readings left out of the fit, still shown. */
+  readonly excludedReadings?: readonly number[];
+}
+
+export interface UnknownRequest {
+  readonly name?: string;
+  readonly readings: readonly Reading[];
+  readonly pathLengthMm?: number;
+  /** Standard uncertainty of the path; giving it says that this is another cell than the standards'. */
+  readonly pathLengthUMm?: number;
+  readonly weight?: number;
+  readonly dilution?: readonly DilutionStep[];
+}
+
+export interface CurveRequest {
+  readonly signal: Signal;
+  readonly pathLengthMm: number;
+  /** Standard uncertainty of the standards' path; enters ε, and c when an unknown is in another cell. */
+  readonly pathLengthUMm?: number;
+  /** False when the path is an assumption: then no molar absorptivity is claimed. Default true. */
+  readonly pathLengthKnown?: boolean;
+  readonly unit: ConcentrationUnit;
+  /** g/mol of the basis the concentration is expressed as (Fe, N, P ...). */
+  readonly formulaMass?: number;
+  readonly model: Model;
+  readonly weighting: Weighting;
+  readonly varianceFunction?: { readonly s0: number; readonly k: number };
+  readonly confidence: number;
+  readonly absorbanceLimit: number;
+  /** Largest allowed range of an unknown's replicates (absorbance as read); default: studentized range. */
+  readonly replicateLimit?: number;
+  readonly blank?: BlankRequest;
+  readonly standards: readonly StandardRequest[];
+  /** Relative standard uncertainty of what all standards share (stock, purity, common ware). */
+  readonly standardsRelativeU?: number;
+  readonly unknowns: readonly UnknownRequest[];
+}
+
+export interface ValueWithU {
+  readonly value: number;
+  readonly u: number;
+}
+
+/** A test that was made, or why it could not be. */
+export type TestAnswer =
+  | {
+      readonly statistic: number;
+      readonly df1: number;
+      readonly df2?: number;
+      readonly p: number;
+      /** True when the test finds nothing against the curve. */
+      readonly passed: boolean;
+      readonly verdict: string;
+      readonly reason?: undefined;
+    }
+  | { readonly reason: string };
+
+export interface LimitAnswer {
+  readonly name: string;
+  readonly kind: 'critical' | 'detection' | 'identification' | 'quantification';
+  /** In the measured solution. */
+  readonly value: number;
+  readonly basis: string;
+}
+
+export interface PointAnswer {
+  readonly name: string;
+  readonly role: 'standard' | 'blank';
+  /** Position of the standard in the request; null for a blank level. */
+  readonly standardIndex: number | null;
+  /** Counts from 1 within its standard. */
+  readonly replicate: number;
+  readonly concentration: number;
+  readonly pathLengthMm: number;
+  /** Null for a censored reading; then `censored` holds what came. */
+  readonly absorbanceAsRead: number | null;
+  readonly censored?: string;
+  /** Per 10 mm, after the blank. */
+  readonly absorbance: number | null;
+  /** Scaled so that the weights of the fitted points add up to n; 0 for a point left out. */
+  readonly weight: number;
+  readonly fitted: number;
+  readonly residual: number | null;
+  readonly backCalculated: number | null;
+  /** Null at concentration zero. */
+  readonly relativeErrorPercent: number | null;
+  readonly leverage: number | null;
+  readonly cooksDistance: number | null;
+  readonly excluded?: true;
+  readonly excludedBecause?: 'request' | 'censored' | 'zeroWithReciprocalWeights';
+}
+
+/** One concentration of the curve, its fitted readings together. */
+export interface LevelAnswer {
+  readonly concentration: number;
+  readonly readings: number;
+  readonly meanAbsorbance: number;
+  readonly meanBackCalculated: number | null;
+  readonly relativeErrorPercent: number | null;
+}
+
+export interface MolarAbsorptivity extends ValueWithU {
+  readonly unit: 'L/(mol cm)';
+  /** What its u holds, in a sentence. */
+  readonly covers: string;
+}
+
+export interface CurveResult {
+  readonly model: Model;
+  readonly weighting: Weighting;
+  readonly unit: ConcentrationUnit;
+  readonly confidence: number;
+  readonly n: number;
+  readonly degreesOfFreedom: number;
+  readonly intercept: ValueWithU;
+  readonly slope: ValueWithU;
+  readonly quadratic?: ValueWithU;
+  /** Rows and columns intercept, slope (and quadratic). */
+  readonly covariance: readonly (readonly number[])[];
+  readonly residualSd: number;
+  readonly rSquared: number;
+  /** Relative standard error of the back-calculated standards, per cent; null when there is none. */
+  readonly relativeStandardErrorPercent: number | null;
+  readonly meanConcentration: number;
+  readonly sxx: number;
+  /** Lowest non-zero and highest fitted standard. */
+  readonly range: { readonly min: number; readonly max: number };
+  /** For `criticalValueReadings` readings of an unknown: the fewest any unknown here has, else 1. */
+  readonly criticalValue: number;
+  readonly criticalValueReadings: number;
+  readonly molarAbsorptivity?: MolarAbsorptivity;
+  readonly tests: {
+    readonly lackOfFit: TestAnswer;
+    readonly mandel: TestAnswer;
+    readonly intercept: TestAnswer;
+    readonly homogeneity: TestAnswer;
+  };
+  readonly limits: readonly LimitAnswer[];
+  readonly points: readonly PointAnswer[];
+  readonly levels: readonly LevelAnswer[];
+  readonly flags: readonly Flag[];
+  readonly working: readonly WorkingStep[];
+}
+
+export interface BudgetLine {
+  /** "curve", "readings", "blank", "standards", "dilution 1, volume taken", "path length of the unknown" ... */
+  readonly source: string;
+  /** Contribution to u of the concentration in the sample, in its unit. */
+  readonly u: number;
+  /** u² over the sum of all u²; the shares add up to 1. */
+  readonly share: number;
+  /** True on the lines that rest on the curve's one residual standard deviation. */
+  readonly sharesS?: true;
+}
+
+export interface Concentration extends ValueWithU {
+  readonly U: number;
+  readonly k: number;
+  /** Effective degrees of freedom, not rounded; null when infinite. */
+  readonly degreesOfFreedom: number | null;
+  readonly interval: readonly [number, number];
+  readonly unit: ConcentrationUnit;
+}
+
+/** Which row of the table of report texts a determination fell into. */
+export type ReportCase =
+  'notQuantified' | 'aboveTopStandard' | 'value' | 'belowLowestStandard' | 'belowCriticalValue';
+
+export interface DilutionAdvice {
+  /** Made up to this many times the volume taken, on top of the dilution already made. */
+  readonly factor: number;
+  readonly atLeast: boolean;
+  /** Absorbance as read to expect after it; null when it cannot be foretold. */
+  readonly expectedAbsorbance: number | null;
+}
+
+export interface UnknownResult {
+  readonly name: string;
+  /** Mean of the readings as they came; null when one is censored. */
+  readonly absorbanceAsRead: number | null;
+  /** When one is censored and its bound is known: the mean is at least this. */
+  readonly absorbanceAtLeast: number | null;
+  /** Mean per 10 mm after blank; null when one is censored. */
+  readonly absorbance: number | null;
+  readonly transmittance: number | null;
+  readonly measured: ValueWithU | null;
+  readonly dilutionFactor: ValueWithU;
+  readonly concentration: Concentration | null;
+  /** The signed number behind the report, in the sample; for the working only. */
+  readonly computed: number | null;
+  readonly fieller: readonly [number, number] | null;
+  /** For this unknown's number of readings, in the measured solution. */
+  readonly criticalValue: number;
+  readonly budget: readonly BudgetLine[];
+  readonly reportCase: ReportCase;
+  readonly report: string;
+  readonly flags: readonly Flag[];
+  readonly advice?: string;
+  readonly dilutionAdvice?: DilutionAdvice;
+  readonly working: readonly WorkingStep[];
+}
+
+export interface CurveAnswer {
+  readonly engine: string;
+  readonly curve: CurveResult;
+  readonly unknowns: readonly UnknownResult[];
+}
