@@ -1,0 +1,135 @@
+import type { CreationOptional, InferAttributes, InferCreationAttributes, Model, Sequelize } from 'sequelize';
+import type { CurveAnswer, ReadingRule } from '@/lib/engine';
+import {
+  id,
+  json,
+  moment,
+  optionalReal,
+  optionalReference,
+  optionalText,
+  real,
+  reference,
+  text,
+  whole,
+} from './columns';
+
+type Row<T extends Model> = Model<InferAttributes<T>, InferCreationAttributes<T>>;
+
+export interface MethodRow extends Row<MethodRow> {
+  id: CreationOptional<string>;
+  notebookId: string;
+  lineageId: string;
+  version: number;
+  supersedesId: string | null;
+  analyte: string;
+  /** What the concentration counts, for example "Fe" or "as N"; its formula mass beside it, g/mol. */
+  basis: string;
+  formulaMass: number | null;
+  unit: string;
+  wavelengthNm: number;
+  readingRule: ReadingRule;
+  pathLengthMm: number;
+  blankRule: 'none' | 'level' | 'subtract';
+  model: 'linear' | 'proportional' | 'quadratic';
+  weighting: string;
+  confidence: number;
+  absorbanceLimit: number;
+  limits: Record<string, number>;
+  hazardNote: string;
+  createdById: string;
+  createdAt: CreationOptional<Date>;
+}
+export const defineMethod = (sequelize: Sequelize) =>
+  sequelize.define<MethodRow>(
+    'Method',
+    {
+      id,
+      notebookId: reference,
+      lineageId: reference,
+      version: whole,
+      supersedesId: optionalReference,
+      analyte: text,
+      basis: text,
+      formulaMass: optionalReal,
+      unit: text,
+      wavelengthNm: real,
+      readingRule: json,
+      pathLengthMm: real,
+      blankRule: text,
+      model: text,
+      weighting: text,
+      confidence: real,
+      absorbanceLimit: real,
+      limits: json,
+      hazardNote: text,
+      createdById: reference,
+      createdAt: moment,
+    },
+    { tableName: 'methods', underscored: true },
+  );
+
+export interface CurveRow extends Row<CurveRow> {
+  id: CreationOptional<string>;
+  notebookId: string;
+  methodId: string;
+  lineageId: string;
+  version: number;
+  supersedesId: string | null;
+  title: string;
+  status: 'saved' | 'superseded' | 'void';
+  /** What the engine answered on the server when this version was saved. */
+  result: CurveAnswer;
+  engineVersion: string;
+  voidReason: CreationOptional<string | null>;
+  createdById: string;
+  createdAt: CreationOptional<Date>;
+}
+export const defineCurve = (sequelize: Sequelize) =>
+  sequelize.define<CurveRow>(
+    'Curve',
+    {
+      id,
+      notebookId: reference,
+      methodId: reference,
+      lineageId: reference,
+      version: whole,
+      supersedesId: optionalReference,
+      title: text,
+      status: text,
+      result: json,
+      engineVersion: text,
+      voidReason: optionalText,
+      createdById: reference,
+      createdAt: moment,
+    },
+    { tableName: 'curves', underscored: true },
+  );
+
+/** A standard of a curve, or a blank (concentration 0, used as the method's blank rule says). */
+export interface StandardRow extends Row<StandardRow> {
+  id: CreationOptional<string>;
+  notebookId: string;
+  curveId: string;
+  role: 'standard' | 'blank';
+  position: number;
+  name: string;
+  concentration: number;
+  pathLengthMm: number;
+  excludedReason: string | null;
+}
+export const defineStandard = (sequelize: Sequelize) =>
+  sequelize.define<StandardRow>(
+    'Standard',
+    {
+      id,
+      notebookId: reference,
+      curveId: reference,
+      role: text,
+      position: whole,
+      name: text,
+      concentration: real,
+      pathLengthMm: real,
+      excludedReason: optionalText,
+    },
+    { tableName: 'standards', underscored: true },
+  );
