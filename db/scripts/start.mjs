@@ -26,6 +26,13 @@ async function configuration() {
   }
 }
 
+/** What the children see: every name has a value, if a blank one, so that none takes another from a file of its own. */
+function childEnv(config) {
+  const values = Object.entries(config).map(([name, value]) => [name, String(value ?? '')]);
+  const mode = { NODE_ENV: dev ? 'development' : 'production', NEXT_TELEMETRY_DISABLED: '1' };
+  return { ...process.env, ...Object.fromEntries(values), ...mode };
+}
+
 /** Fails with a sentence unless the address can be listened on, before anything else is done. */
 async function checkAddress(host, port) {
   const sentences = {
@@ -76,15 +83,10 @@ async function start() {
   if (!dev && !existsSync(at('.next', 'BUILD_ID'))) {
     throw new StartError('There is no build to serve yet: `npm start` makes one first.');
   }
-  const { HOST, PORT, APP_URL } = await configuration();
+  const config = await configuration();
+  const { HOST, PORT, APP_URL } = config;
   await checkAddress(HOST, PORT);
-  const env = {
-    ...process.env,
-    HOST,
-    PORT: String(PORT),
-    NODE_ENV: dev ? 'development' : 'production',
-    NEXT_TELEMETRY_DISABLED: '1',
-  };
+  const env = childEnv(config);
   const node = (...args) => [process.execPath, args, { cwd: root, env }];
   const prepared = await runGroup(...node('--import', 'tsx', at('db', 'scripts', 'prepare.ts')));
   if (prepared !== 0) return prepared;
@@ -99,6 +101,8 @@ async function start() {
 }
 
 stopEverythingOnSignal();
+// A test run holds a channel to the server it starts; should the run be cut off, the server ends with it.
+process.once('disconnect', () => process.kill(process.pid, 'SIGTERM'));
 try {
   process.exitCode = await start();
 } catch (error) {
