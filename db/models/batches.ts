@@ -13,6 +13,7 @@ import {
   reference,
   text,
   whole,
+  columns,
 } from './columns';
 
 type Row<T extends Model> = Model<InferAttributes<T>, InferCreationAttributes<T>>;
@@ -34,7 +35,7 @@ export interface BatchRow extends Row<BatchRow> {
 export const defineBatch = (sequelize: Sequelize) =>
   sequelize.define<BatchRow>(
     'Batch',
-    {
+    columns({
       id,
       notebookId: reference,
       curveId: reference,
@@ -47,7 +48,7 @@ export const defineBatch = (sequelize: Sequelize) =>
       voidReason: optionalText,
       createdById: reference,
       createdAt: moment,
-    },
+    }),
     { tableName: 'batches', underscored: true },
   );
 
@@ -73,7 +74,7 @@ export interface DeterminationRow extends Row<DeterminationRow> {
 export const defineDetermination = (sequelize: Sequelize) =>
   sequelize.define<DeterminationRow>(
     'Determination',
-    {
+    columns({
       id,
       notebookId: reference,
       batchId: reference,
@@ -90,7 +91,7 @@ export const defineDetermination = (sequelize: Sequelize) =>
       voidReason: optionalText,
       createdById: reference,
       createdAt: moment,
-    },
+    }),
     { tableName: 'determinations', underscored: true },
   );
 
@@ -123,7 +124,7 @@ export interface ReadingRow extends Row<ReadingRow> {
 export const defineReading = (sequelize: Sequelize) =>
   sequelize.define<ReadingRow>(
     'Reading',
-    {
+    columns({
       id,
       notebookId: reference,
       standardId: optionalReference,
@@ -144,6 +145,6 @@ export const defineReading = (sequelize: Sequelize) =>
       reason: optionalText,
       createdById: reference,
       createdAt: moment,
-    },
+    }),
     { tableName: 'readings', underscored: true },
   );

@@ -15,3 +15,8 @@ export const json = { type: DataTypes.JSON, allowNull: false } as const;
 export const optionalJson = { type: DataTypes.JSON, allowNull: true } as const;
 export const reference = { type: DataTypes.UUID, allowNull: false } as const;
 export const optionalReference = { type: DataTypes.UUID, allowNull: true } as const;
+
+/** Sequelize writes the column's name into each definition, so every column gets an object of its own. */
+export function columns<T extends object>(attributes: T): T {
+  return Object.fromEntries(Object.entries(attributes).map(([name, column]) => [name, { ...column }])) as T;
+}

@@ -11,6 +11,7 @@ import {
   reference,
   text,
   whole,
+  columns,
 } from './columns';
 
 type Row<T extends Model> = Model<InferAttributes<T>, InferCreationAttributes<T>>;
@@ -42,7 +43,7 @@ export interface MethodRow extends Row<MethodRow> {
 export const defineMethod = (sequelize: Sequelize) =>
   sequelize.define<MethodRow>(
     'Method',
-    {
+    columns({
       id,
       notebookId: reference,
       lineageId: reference,
@@ -64,7 +65,7 @@ export const defineMethod = (sequelize: Sequelize) =>
       hazardNote: text,
       createdById: reference,
       createdAt: moment,
-    },
+    }),
     { tableName: 'methods', underscored: true },
   );
 
@@ -87,7 +88,7 @@ export interface CurveRow extends Row<CurveRow> {
 export const defineCurve = (sequelize: Sequelize) =>
   sequelize.define<CurveRow>(
     'Curve',
-    {
+    columns({
       id,
       notebookId: reference,
       methodId: reference,
@@ -101,7 +102,7 @@ export const defineCurve = (sequelize: Sequelize) =>
       voidReason: optionalText,
       createdById: reference,
       createdAt: moment,
-    },
+    }),
     { tableName: 'curves', underscored: true },
   );
 
@@ -120,7 +121,7 @@ export interface StandardRow extends Row<StandardRow> {
 export const defineStandard = (sequelize: Sequelize) =>
   sequelize.define<StandardRow>(
     'Standard',
-    {
+    columns({
       id,
       notebookId: reference,
       curveId: reference,
@@ -130,6 +131,6 @@ export const defineStandard = (sequelize: Sequelize) =>
       concentration: real,
       pathLengthMm: real,
       excludedReason: optionalText,
-    },
+    }),
     { tableName: 'standards', underscored: true },
   );

@@ -1,6 +1,6 @@
 import type { CreationOptional, InferAttributes, InferCreationAttributes, Model, Sequelize } from 'sequelize';
 import type { MemberRole } from '@/lib/policies/actor';
-import { id, moment, optionalMoment, reference, text, whole } from './columns';
+import { id, moment, optionalMoment, reference, text, whole, columns } from './columns';
 
 type Row<T extends Model> = Model<InferAttributes<T>, InferCreationAttributes<T>>;
 
@@ -18,7 +18,7 @@ export interface NotebookRow extends Row<NotebookRow> {
 export const defineNotebook = (sequelize: Sequelize) =>
   sequelize.define<NotebookRow>(
     'Notebook',
-    {
+    columns({
       id,
       title: text,
       purpose: text,
@@ -28,7 +28,7 @@ export const defineNotebook = (sequelize: Sequelize) =>
       version: { ...whole, defaultValue: 1 },
       createdAt: moment,
       updatedAt: moment,
-    },
+    }),
     { tableName: 'notebooks', underscored: true },
   );
 
@@ -43,14 +43,14 @@ export interface MembershipRow extends Row<MembershipRow> {
 export const defineMembership = (sequelize: Sequelize) =>
   sequelize.define<MembershipRow>(
     'Membership',
-    {
+    columns({
       id,
       notebookId: reference,
       personId: reference,
       role: text,
       endedAt: optionalMoment,
       createdAt: moment,
-    },
+    }),
     { tableName: 'memberships', underscored: true },
   );
 
@@ -69,7 +69,7 @@ export interface ShareLinkRow extends Row<ShareLinkRow> {
 export const defineShareLink = (sequelize: Sequelize) =>
   sequelize.define<ShareLinkRow>(
     'ShareLink',
-    {
+    columns({
       id,
       notebookId: reference,
       label: text,
@@ -80,7 +80,7 @@ export const defineShareLink = (sequelize: Sequelize) =>
       lastOpenedAt: optionalMoment,
       createdById: reference,
       createdAt: moment,
-    },
+    }),
     { tableName: 'share_links', underscored: true },
   );
 
@@ -92,6 +92,6 @@ export interface ShareSessionRow extends Row<ShareSessionRow> {
 export const defineShareSession = (sequelize: Sequelize) =>
   sequelize.define<ShareSessionRow>(
     'ShareSession',
-    { id, shareLinkId: reference, expiresAt: moment },
+    columns({ id, shareLinkId: reference, expiresAt: moment }),
     { tableName: 'share_sessions', underscored: true },
   );

@@ -1,6 +1,6 @@
 import type { CreationOptional, InferAttributes, InferCreationAttributes, Model, Sequelize } from 'sequelize';
 import type { Role } from '@/lib/policies/actor';
-import { flag, id, moment, optionalMoment, optionalText, reference, text } from './columns';
+import { flag, id, moment, optionalMoment, optionalText, reference, text, columns } from './columns';
 
 type Row<T extends Model> = Model<InferAttributes<T>, InferCreationAttributes<T>>;
 
@@ -15,7 +15,7 @@ export interface LaboratoryRow extends Row<LaboratoryRow> {
 export const defineLaboratory = (sequelize: Sequelize) =>
   sequelize.define<LaboratoryRow>(
     'Laboratory',
-    { id, name: text, timeZone: text, demo: flag, createdAt: moment },
+    columns({ id, name: text, timeZone: text, demo: flag, createdAt: moment }),
     { tableName: 'laboratories', underscored: true },
   );
 
@@ -33,7 +33,7 @@ export interface PersonRow extends Row<PersonRow> {
 export const definePerson = (sequelize: Sequelize) =>
   sequelize.define<PersonRow>(
     'Person',
-    {
+    columns({
       id,
       name: text,
       email: text,
@@ -42,7 +42,7 @@ export const definePerson = (sequelize: Sequelize) =>
       active: { ...flag, defaultValue: true },
       welcomedAt: optionalMoment,
       createdAt: moment,
-    },
+    }),
     { tableName: 'people', underscored: true },
   );
 
@@ -58,7 +58,7 @@ export interface SessionRow extends Row<SessionRow> {
 export const defineSession = (sequelize: Sequelize) =>
   sequelize.define<SessionRow>(
     'Session',
-    {
+    columns({
       id,
       personId: reference,
       lastSeenAt: moment,
@@ -66,7 +66,7 @@ export const defineSession = (sequelize: Sequelize) =>
       expiresAt: moment,
       endedAt: optionalMoment,
       createdAt: moment,
-    },
+    }),
     { tableName: 'sessions', underscored: true },
   );
 
@@ -82,7 +82,7 @@ export interface PasswordLinkRow extends Row<PasswordLinkRow> {
 export const definePasswordLink = (sequelize: Sequelize) =>
   sequelize.define<PasswordLinkRow>(
     'PasswordLink',
-    {
+    columns({
       id,
       personId: reference,
       tokenHash: text,
@@ -90,7 +90,7 @@ export const definePasswordLink = (sequelize: Sequelize) =>
       expiresAt: moment,
       usedAt: optionalMoment,
       createdAt: moment,
-    },
+    }),
     { tableName: 'password_links', underscored: true },
   );
 
@@ -108,7 +108,7 @@ export interface ApiTokenRow extends Row<ApiTokenRow> {
 export const defineApiToken = (sequelize: Sequelize) =>
   sequelize.define<ApiTokenRow>(
     'ApiToken',
-    {
+    columns({
       id,
       personId: reference,
       name: text,
@@ -118,6 +118,6 @@ export const defineApiToken = (sequelize: Sequelize) =>
       revokedAt: optionalMoment,
       lastUsedAt: optionalMoment,
       createdAt: moment,
-    },
+    }),
     { tableName: 'api_tokens', underscored: true },
   );

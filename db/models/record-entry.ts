@@ -6,7 +6,7 @@ import {
   type Model,
   type Sequelize,
 } from 'sequelize';
-import { moment, optionalJson, optionalReference, optionalText, text } from './columns';
+import { moment, optionalJson, optionalReference, optionalText, text, columns } from './columns';
 
 /** Who changed what, when, from what to what, and why. There is no way to change or remove one. */
 export interface RecordEntryRow extends Model<
@@ -31,7 +31,7 @@ export interface RecordEntryRow extends Model<
 export const defineRecordEntry = (sequelize: Sequelize) =>
   sequelize.define<RecordEntryRow>(
     'RecordEntry',
-    {
+    columns({
       id: { type: DataTypes.INTEGER, primaryKey: true, autoIncrement: true },
       at: moment,
       actorKind: text,
@@ -46,6 +46,6 @@ export const defineRecordEntry = (sequelize: Sequelize) =>
       from: optionalJson,
       to: optionalJson,
       why: optionalText,
-    },
+    }),
     { tableName: 'record_entries', underscored: true, timestamps: false },
   );

@@ -11,6 +11,7 @@ import {
   reference,
   text,
   whole,
+  columns,
 } from './columns';
 
 type Row<T extends Model> = Model<InferAttributes<T>, InferCreationAttributes<T>>;
@@ -36,7 +37,7 @@ export interface SourceFileRow extends Row<SourceFileRow> {
 export const defineSourceFile = (sequelize: Sequelize) =>
   sequelize.define<SourceFileRow>(
     'SourceFile',
-    {
+    columns({
       id,
       notebookId: reference,
       name: text,
@@ -52,7 +53,7 @@ export const defineSourceFile = (sequelize: Sequelize) =>
       voidedAt: optionalMoment,
       voidReason: optionalText,
       createdAt: moment,
-    },
+    }),
     { tableName: 'source_files', underscored: true },
   );
 
@@ -85,7 +86,7 @@ export interface SpectrumRow extends Row<SpectrumRow> {
 export const defineSpectrum = (sequelize: Sequelize) =>
   sequelize.define<SpectrumRow>(
     'Spectrum',
-    {
+    columns({
       id,
       notebookId: reference,
       sourceFileId: reference,
@@ -109,6 +110,6 @@ export const defineSpectrum = (sequelize: Sequelize) =>
       voidedAt: optionalMoment,
       voidReason: optionalText,
       createdAt: moment,
-    },
+    }),
     { tableName: 'spectra', underscored: true },
   );
