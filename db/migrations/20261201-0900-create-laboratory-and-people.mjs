@@ -13,7 +13,7 @@ export async function up({ context: query }) {
   await query.sequelize.query('CREATE INDEX sessions_person ON sessions(person_id)');
   await query.sequelize.query(`CREATE TABLE password_links (
     id TEXT PRIMARY KEY, person_id TEXT NOT NULL REFERENCES people(id), token_hash TEXT NOT NULL UNIQUE,
-    purpose TEXT NOT NULL CHECK (purpose IN ('invitation', 'reset')), expires_at DATETIME NOT NULL, used_at DATETIME,
+    purpose TEXT NOT NULL CHECK (purpose IN ('invitation', 'reset')), expires_at DATETIME NOT NULL, used_at DATETIME, withdrawn_at DATETIME,
     created_at DATETIME NOT NULL, updated_at DATETIME NOT NULL)`);
   await query.sequelize.query(`CREATE TABLE api_tokens (
     id TEXT PRIMARY KEY, person_id TEXT NOT NULL REFERENCES people(id), name TEXT NOT NULL,

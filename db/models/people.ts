@@ -77,6 +77,7 @@ export interface PasswordLinkRow extends Row<PasswordLinkRow> {
   purpose: 'invitation' | 'reset';
   expiresAt: Date;
   usedAt: CreationOptional<Date | null>;
+  withdrawnAt: CreationOptional<Date | null>;
   createdAt: CreationOptional<Date>;
 }
 export const definePasswordLink = (sequelize: Sequelize) =>
@@ -89,6 +90,7 @@ export const definePasswordLink = (sequelize: Sequelize) =>
       purpose: text,
       expiresAt: moment,
       usedAt: optionalMoment,
+      withdrawnAt: optionalMoment,
       createdAt: moment,
     }),
     { tableName: 'password_links', underscored: true },

@@ -59,6 +59,7 @@ export const RULES = {
   },
   shareLink: { read: runs, create: runs, edit: runs },
   person: {
+    list: (a: Actor) => system(a) || isAdministrator(a),
     read: (a: Actor, p: PersonFacts) => system(a) || isAdministrator(a) || isSelf(a, p),
     create: (a: Actor) => a.canWrite && (system(a) || (isAdministrator(a) && bySession(a))),
     edit: (a: Actor, p: PersonFacts) =>
@@ -66,19 +67,19 @@ export const RULES = {
     manage: (a: Actor) => a.canWrite && (system(a) || (isAdministrator(a) && bySession(a))),
   },
   passwordLink: {
-    read: system,
+    read: (a: Actor) => system(a) || isAdministrator(a),
     create: (a: Actor) => a.canWrite && (system(a) || (isAdministrator(a) && bySession(a))),
-    edit: system,
+    edit: (a: Actor) => a.canWrite && (system(a) || (isAdministrator(a) && bySession(a))),
   },
   apiToken: {
     read: (a: Actor, p: PersonFacts) => system(a) || isSelf(a, p),
-    create: (a: Actor) => a.canWrite && (system(a) || (a.kind === 'person' && bySession(a))),
+    create: (a: Actor, p: PersonFacts) => a.canWrite && (system(a) || (isSelf(a, p) && bySession(a))),
     edit: (a: Actor, p: PersonFacts) => a.canWrite && (system(a) || (isSelf(a, p) && bySession(a))),
   },
   session: {
     read: (a: Actor, p: PersonFacts) => system(a) || isSelf(a, p),
     create: system,
-    edit: (a: Actor, p: PersonFacts) => system(a) || isSelf(a, p),
+    edit: (a: Actor, p: PersonFacts) => system(a) || (isSelf(a, p) && bySession(a)),
   },
   shareSession: { read: system, create: system, edit: system },
   laboratory: {
