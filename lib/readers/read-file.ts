@@ -1,3 +1,7 @@
+import { decodeText } from './decode-text';
+import { looksLikeJcamp } from './jcamp/records';
+import { readJcamp } from './jcamp/read-jcamp';
+import { refuseSignature, refuseText } from './refuse';
 import { ReaderError, type ReadOptions, type ReadResult } from './types';
 
 /**
@@ -9,6 +13,17 @@ import { ReaderError, type ReadOptions, type ReadResult } from './types';
  * @throws ReaderError when there is nothing to read; its message says what the file is and what to do
  */
 export function readFile(bytes: Uint8Array, fileName: string, options: ReadOptions = {}): ReadResult {
-  if (bytes.length === 0) throw new ReaderError('EMPTY', 'This file is empty (0 bytes). Export it again.');
-  throw new ReaderError('UNKNOWN', `No reader for ${fileName} (${Object.keys(options).length} options)`);
+  refuseSignature(bytes);
+  const { text } = decodeText(bytes);
+  options.onSteps?.(bytes.length);
+  const name = baseName(fileName);
+  if (looksLikeJcamp(text)) return readJcamp(text, name, options);
+  refuseText(text);
+  throw new ReaderError('NO_TABLE', 'This text holds no table of numbers.');
+}
+
+/** The file's name without folder and extension. */
+function baseName(fileName: string): string {
+  const name = fileName.replace(/^.*[\\/]/, '').trim();
+  return name.replace(/\.[A-Za-z0-9]{1,8}$/, '').trim() || name;
 }

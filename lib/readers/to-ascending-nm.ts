@@ -89,7 +89,10 @@ function conversionWarnings(spectrum: ReadSpectrum, opaque: number): ReaderWarni
   }
   if (spectrum.signal === 'other') {
     const unit = spectrum.signalText || 'not stated';
-    warnings.push({ code: 'NOT_ABSORBANCE', message: `The ordinate (${unit}) is not absorbance and is shown as it stands` });
+    warnings.push({
+      code: 'NOT_ABSORBANCE',
+      message: `The ordinate (${unit}) is not absorbance and is shown as it stands`,
+    });
   }
   return warnings;
 }
