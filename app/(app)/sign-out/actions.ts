@@ -1,0 +1,13 @@
+'use server';
+
+import { redirect } from 'next/navigation';
+import { z } from 'zod';
+import { signOut as endSession } from '@/db/entry/sign-in';
+import { action } from '@/app/_server/action';
+import { openSessionCookie } from '@/app/_server/session-cookie';
+
+export const signOut = action(z.object({}), async (actor) => {
+  if (actor.sessionId) await endSession(actor.sessionId);
+  (await openSessionCookie()).destroy();
+  redirect('/sign-in');
+});

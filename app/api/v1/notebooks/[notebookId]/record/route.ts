@@ -1,0 +1,8 @@
+import { listRecord } from '@/db/queries/record';
+import { notebookParams } from '@/lib/schemas/notebook';
+import { pageQuery } from '@/lib/schemas/page-query';
+import { route } from '@/app/_server/route';
+
+export const GET = route({ params: notebookParams, query: pageQuery }, (actor, { params, query }) =>
+  listRecord(actor, params.notebookId, query),
+);
