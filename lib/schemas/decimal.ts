@@ -4,6 +4,11 @@ const PLAIN_NUMBER = /^[+-]?(\d+[.,]?\d*|[.,]\d+)(e[+-]?\d+)?$/i;
 /** "1,234" may be 1.234 or 1234: three digits behind a lone comma and one to three before it. */
 const COULD_BE_GROUPED = /^[+-]?[1-9]\d{0,2},\d{3}$/;
 
+/** Whether a text is a number that parseDecimal asks about instead of reading it. */
+export function couldBeGrouped(text: string): boolean {
+  return COULD_BE_GROUPED.test(text.trim().replace(/\u2212/g, '-'));
+}
+
 export type ParsedDecimal =
   { readonly ok: true; readonly value: number } | { readonly ok: false; readonly message: string };
 
