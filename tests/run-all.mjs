@@ -1,6 +1,6 @@
 // `npm test`: every suite, one after another, and at the end one line that counts every test of all of them.
-import { existsSync } from 'node:fs';
-import { mkdtemp, readFile, readdir, rm } from 'node:fs/promises';
+import { existsSync, readdirSync, rmSync } from 'node:fs';
+import { mkdir, mkdtemp, readFile } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import path from 'node:path';
 import { fileURLToPath } from 'node:url';
@@ -17,6 +17,7 @@ import { ensureChromium } from './support/find-chromium.mjs';
 
 const root = fileURLToPath(new URL('..', import.meta.url));
 const work = await mkdtemp(path.join(tmpdir(), 'halflight-test-'));
+const scratch = path.join(work, 'scratch'); // the temporary folder of every suite, so that nothing of it stays
 const artifacts = path.join(work, 'browser');
 
 /** The environment without Halflight's own configuration: a test never meets a real laboratory's data. */
@@ -27,7 +28,7 @@ async function neutralEnv() {
   return Object.fromEntries(Object.entries(process.env).filter(([name]) => !dropped.has(name)));
 }
 
-const env = { ...(await neutralEnv()), NEXT_TELEMETRY_DISABLED: '1' };
+const env = { ...(await neutralEnv()), NEXT_TELEMETRY_DISABLED: '1', TMPDIR: scratch };
 
 function run(tool, args, extra = {}) {
   const script = path.join(root, 'node_modules', tool);
@@ -79,17 +80,19 @@ async function runSuite([name, suite], index) {
   return counts;
 }
 
-/** Removes what the run wrote, but keeps the traces and pictures of failed browser tests. */
-async function tidy() {
-  const kept = existsSync(artifacts) && (await readdir(artifacts)).some((name) => !name.startsWith('.'));
-  if (kept) console.log(`\nTraces and pictures of what failed are in ${artifacts}`);
-  else await rm(work, { recursive: true, force: true });
+/** Whether browser tests failed and left traces and pictures. */
+function hasArtifacts() {
+  return existsSync(artifacts) && readdirSync(artifacts).some((name) => !name.startsWith('.'));
 }
 
 stopEverythingOnSignal();
+process.once('exit', () => {
+  rmSync(hasArtifacts() ? scratch : work, { recursive: true, force: true, maxRetries: 5 });
+});
+await mkdir(scratch);
 const counts = [];
 for (const [index, suite] of suites.entries()) counts.push(await runSuite(suite, index));
-await tidy();
+if (hasArtifacts()) console.log(`\nTraces and pictures of what failed are in ${artifacts}`);
 const total = sumCounts(counts);
 console.log(`\n${countsLine(total)}`);
 process.exitCode = total.failed === 0 ? 0 : 1;
