@@ -95,6 +95,25 @@ export async function countFor<K extends ContentKind>(
   return modelOf(db(), kind).count({ where: { ...where, notebookId } as WhereOptions });
 }
 
+/** Rows of whichever notebooks the actor may read; the others are left out as if they did not exist. */
+export async function listAcrossFor<K extends ContentKind>(
+  actor: Actor,
+  kind: K,
+  options: FindOptions<Attributes<Rows[K]>> & { where: WhereOptions<Attributes<Rows[K]>> },
+): Promise<Rows[K][]> {
+  const rows = (await modelOf(db(), kind).findAll(options as FindOptions)) as Rows[K][];
+  const notebookIds = [...new Set(rows.map((row) => row.notebookId))];
+  const notebooks = await db().Notebook.findAll({ where: { id: notebookIds } as WhereOptions });
+  const readable = new Set(
+    notebooks
+      .filter((notebook) => ruleOf(kind, 'read')?.(actor, notebookFacts(notebook) as Facts))
+      .map((notebook) => notebook.id),
+  );
+  const own = rows.filter((row) => row.notebookId !== null && readable.has(row.notebookId));
+  own.forEach((row) => rememberOpened(row, 'read'));
+  return own;
+}
+
 /** The notebooks that an actor may read, newest work first. */
 export async function listNotebooksFor(
   actor: Actor,
@@ -180,4 +199,25 @@ export async function readRaw<T extends object>(
     type: 'SELECT' as never,
   });
   return row ?? null;
+}
+
+const OWNERS_AT_ONCE = 500;
+
+/** Raw columns of many rows that the actor has already opened; each row carries the key of its owner. */
+export async function readManyRaw<T extends object>(
+  table: 'source_bytes' | 'spectrum_points',
+  owners: readonly Model[],
+): Promise<T[]> {
+  const key = table === 'source_bytes' ? 'source_file_id' : 'spectrum_id';
+  const found: T[] = [];
+  for (let from = 0; from < owners.length; from += OWNERS_AT_ONCE) {
+    const ids = owners.slice(from, from + OWNERS_AT_ONCE).map((owner) => String(owner.get('id')));
+    const marks = ids.map((_, index) => `$${index + 1}`).join(', ');
+    const rows = await db().sequelize.query<T>(`SELECT * FROM ${table} WHERE ${key} IN (${marks})`, {
+      bind: ids,
+      type: 'SELECT' as never,
+    });
+    found.push(...rows);
+  }
+  return found;
 }

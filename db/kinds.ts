@@ -107,7 +107,17 @@ export const KINDS: Readonly<Record<Kind, KindOf>> = {
     audit: { kind: 'share visit', notebookId: none, subjectName: none },
   },
   sourceFile: content('SourceFile', 'source file', 'name', ['headerText', 'trailerText']),
-  spectrum: content('Spectrum', 'spectrum', 'name', ['header', 'gaps']),
+  spectrum: {
+    model: 'Spectrum',
+    belongsTo: 'notebook',
+    audit: {
+      kind: 'spectrum',
+      notebookId: field('notebookId'),
+      subjectName: field('name'),
+      hidden: ['header', 'gaps'],
+      madeWithAnother: true,
+    },
+  },
   method: content('Method', 'method', 'analyte'),
   curve: content('Curve', 'standard curve', 'title', ['result']),
   standard: content('Standard', 'standard', 'name'),

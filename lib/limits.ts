@@ -8,6 +8,10 @@ export const LIMITS = {
   email: 254,
   passwordBytesMin: 12,
   passwordBytesMax: 72,
+  /** Absorbance as read above which a number is not to be trusted, unless something else is set. */
+  absorbance: 2,
+  spectraAtOnce: 200,
+  spectraListed: 1000,
   fileBytes: 100 * 1024 * 1024,
   filesPerDrop: 500,
   fileName: 255,

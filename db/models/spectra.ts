@@ -1,6 +1,7 @@
 import type { CreationOptional, InferAttributes, InferCreationAttributes, Model, Sequelize } from 'sequelize';
-import type { Gap, ReaderWarning, SignalKind, XUnit } from '@/lib/readers/types';
+import type { Gap, ReadOptions, ReaderWarning, SignalKind, XUnit } from '@/lib/readers/types';
 import {
+  flag,
   id,
   json,
   moment,
@@ -26,9 +27,14 @@ export interface SourceFileRow extends Row<SourceFileRow> {
   reader: string;
   readerVersion: string;
   dialect: string;
+  /** Handed back to the reader, they give the same reading. */
+  settings: ReadOptions;
   headerText: string;
   trailerText: string;
   warnings: ReaderWarning[];
+  spectrumCount: number;
+  /** Of all its spectra together. */
+  pointCount: number;
   createdById: string;
   voidedAt: CreationOptional<Date | null>;
   voidReason: CreationOptional<string | null>;
@@ -46,9 +52,12 @@ export const defineSourceFile = (sequelize: Sequelize) =>
       reader: text,
       readerVersion: text,
       dialect: text,
+      settings: json,
       headerText: text,
       trailerText: text,
       warnings: json,
+      spectrumCount: whole,
+      pointCount: whole,
       createdById: reference,
       voidedAt: optionalMoment,
       voidReason: optionalText,
@@ -67,8 +76,12 @@ export interface SpectrumRow extends Row<SpectrumRow> {
   block: number;
   line: number;
   xUnit: XUnit;
+  xUnitGuessed: boolean;
   signal: SignalKind;
+  signalGuessed: boolean;
   signalText: string;
+  /** An ordinate times this is in the unit of `signal`. */
+  signalScale: number;
   pointCount: number;
   gapCount: number;
   fromNm: number;
@@ -95,8 +108,11 @@ export const defineSpectrum = (sequelize: Sequelize) =>
       block: whole,
       line: whole,
       xUnit: text,
+      xUnitGuessed: flag,
       signal: text,
+      signalGuessed: flag,
       signalText: text,
+      signalScale: real,
       pointCount: whole,
       gapCount: whole,
       fromNm: real,
