@@ -1,13 +1,12 @@
 import { existsSync, readFileSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
-import bcrypt from 'bcryptjs';
 import { createFor } from '../access';
 import { systemActor } from '../actors';
+import { hashPassword } from '../passwords';
 import { hashSecret, newSecret } from '../secrets';
 import { dataDir, inTransaction } from '../sequelize';
 import { DEMO_ACCOUNTS } from './people';
 
-const HASH_COST = 10;
 const TOKEN_DAYS = 365;
 const tokenFile = () => path.join(dataDir(), 'demo-read-token');
 
@@ -29,7 +28,7 @@ export async function createDemoLaboratory(): Promise<Map<string, string>> {
       demo: true,
     });
     for (const { key, name, email, password, role } of DEMO_ACCOUNTS) {
-      const passwordHash = await bcrypt.hash(password, HASH_COST);
+      const passwordHash = await hashPassword(password);
       const row = await createFor(system, 'person', { name, email, role, passwordHash });
       ids.set(key, row.id);
     }
