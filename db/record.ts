@@ -31,8 +31,12 @@ export interface Audit {
   readonly madeWithAnother?: boolean;
 }
 
-/** What each row was opened for. A row opened to read, or by nobody, cannot be saved. */
-const openedFor = new WeakMap<Model, string>();
+/**
+ * What each row was opened for. A row opened to read, or by nobody, cannot be saved. It lives on globalThis
+ * beside the models: Next evaluates this module several times, while the hooks belong to one evaluation.
+ */
+const shared = globalThis as typeof globalThis & { __halflightOpenedFor?: WeakMap<Model, string> };
+const openedFor = (shared.__halflightOpenedFor ??= new WeakMap<Model, string>());
 
 export function rememberOpened(row: Model, verb: string): void {
   openedFor.set(row, verb);
