@@ -1,7 +1,8 @@
+import { censoredText, type CensorReason, plainNumber } from './censoring';
 import { EngineError } from './errors';
 import type { Reading, Signal } from './types';
 
-export type CensorReason = 'aboveRange' | 'belowRange' | 'noLight' | 'empty' | 'unreadable';
+export type { CensorReason };
 
 /** The absorbance of one reading, or why it has none. */
 export interface Absorbance {
@@ -15,12 +16,27 @@ export interface Absorbance {
   };
 }
 
-export function absorbanceOf(reading: Reading, signal: Signal): Absorbance {
-  if (typeof reading !== 'number') throw new EngineError('NOT_FINITE', 'absorbanceOf cannot read text yet');
-  return {
-    value:
-      signal === 'absorbance' ? reading : -Math.log10(signal === 'transmittance' ? reading : reading / 100),
-  };
+/**
+ * Absorbance of one reading as it came.
+ *
+ *     A = -log10 T        T = (per cent transmittance) / 100
+ *
+ * Text is a reading without a number: it keeps what it said and why there is none. A light fraction of zero or
+ * less is the same, for no light came through. Text that spells a plain number is that number.
+ *
+ * @throws EngineError NOT_FINITE for NaN and infinities
+ * @source measurement model, section 1; A = -log10 T: Ph. Eur. 2.2.25
+ */
+export function absorbanceOf(reading: Reading, signal: Signal, pointer?: string): Absorbance {
+  const number = typeof reading === 'number' ? reading : plainNumber(reading);
+  if (number === null) return censoredText(String(reading), signal);
+  if (!Number.isFinite(number)) {
+    throw new EngineError('NOT_FINITE', `a reading must be a finite number or text, got ${number}`, pointer);
+  }
+  if (signal === 'absorbance') return { value: number };
+  const fraction = signal === 'transmittance' ? number : number / 100;
+  if (fraction <= 0) return { value: null, censored: { reason: 'noLight', text: String(reading) } };
+  return { value: -Math.log10(fraction) };
 }
 
 /** T = 10^-A. */

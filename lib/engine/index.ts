@@ -1,7 +1,8 @@
 export * from './types';
 export { absorbanceOf, transmittanceOf, type Absorbance, type CensorReason } from './absorbance';
+export { curveBand, type BandPoint } from './curve-band';
 export { ENGINE_ERRORS, EngineError, type EngineErrorCode } from './errors';
-export { type Flag, type FlagCode, type FlagLevel } from './flags';
+export { FLAGS, type Flag, type FlagCode, type FlagLevel } from './flags';
 export {
   readSpectrum,
   type ReadingRule,
@@ -17,5 +18,6 @@ export {
   parseUnit,
   type ConcentrationUnit,
 } from './units';
+export { volumeUncertainty } from './uncertainty/volume';
 export { ENGINE_VERSION } from './version';
 export { type WorkingStep } from './working/ledger';

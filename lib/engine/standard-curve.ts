@@ -1,6 +1,86 @@
-import { EngineError } from './errors';
-import type { CurveAnswer, CurveRequest } from './types';
+import { calculateUnknown } from './calculate-unknown';
+import { type CriticalValue, criticalValue } from './calibration/critical-value';
+import { molarAbsorptivity } from './calibration/molar-absorptivity';
+import { checkRequest } from './checks/check-request';
+import { levelAnswers, pointAnswers, relativeStandardErrorPercent } from './curve-points';
+import { fitCurve, type FittedCurve } from './fit-curve';
+import { judgeCurve } from './judge-curve';
+import type { Fit } from './regression/fit';
+import type { CurveAnswer, CurveRequest, CurveResult, ValueWithU } from './types';
+import { parseUnit } from './units';
+import { ENGINE_VERSION } from './version';
+import { Ledger } from './working/ledger';
+import { recordCritical } from './working/record-critical';
+import { recordCurve } from './working/record-curve';
 
-export function calculateStandardCurve(request: CurveRequest): CurveAnswer {
-  throw new EngineError('NO_STANDARDS', `calculateStandardCurve cannot fit ${request.model} yet`);
+/**
+ * Fit a standard curve and read every unknown back through it, by the measurement model of Halflight: reading,
+ * absorbance, censoring, blank of the same path, per 10 mm, fit or read-back, dilution, budget, report.
+ *
+ * Pure: the same request gives the same answer, in the browser and on the server. Wrong calls throw; doubtful data
+ * come back with flags. Nothing is rounded but the texts.
+ *
+ * @throws EngineError with a code of ENGINE_ERRORS and a JSON pointer to the member of the request at fault
+ */
+export function calculateStandardCurve(asked: CurveRequest): CurveAnswer {
+  const request = { ...asked, unit: parseUnit(asked.unit) ?? asked.unit };
+  checkRequest(request);
+  const curve = fitCurve(request);
+  const ledger = new Ledger();
+  const result = curveResult(curve, ledger);
+  return {
+    engine: ENGINE_VERSION,
+    curve: result,
+    unknowns: request.unknowns.map((unknown, i) => calculateUnknown(curve, unknown, i, ledger)),
+  };
+}
+
+/** For the fewest readings any unknown has, one when there is none: the most cautious of their critical values. */
+function criticalOfCurve(curve: FittedCurve): CriticalValue {
+  const counts = curve.request.unknowns.map((unknown) => unknown.readings.length);
+  const fewest = counts.length === 0 ? 1 : Math.min(...counts);
+  return criticalValue(curve, fewest, curve.request.pathLengthMm);
+}
+
+function coefficient(fit: Fit, i: number): ValueWithU {
+  return { value: fit.coefficients[i] ?? NaN, u: Math.sqrt(fit.covariance[i]?.[i] ?? NaN) };
+}
+
+const NOT_YET = { reason: 'this test is not made by this version' };
+
+function curveResult(curve: FittedCurve, ledger: Ledger): CurveResult {
+  const { fit, request, range } = curve;
+  const epsilon = molarAbsorptivity(curve);
+  const critical = criticalOfCurve(curve);
+  const points = pointAnswers(curve);
+  const levels = levelAnswers(curve);
+  recordCurve(ledger, curve, epsilon);
+  recordCritical(ledger, curve, critical, 'curve');
+  return {
+    model: fit.model,
+    weighting: request.weighting,
+    unit: request.unit,
+    confidence: request.confidence,
+    n: fit.n,
+    degreesOfFreedom: fit.degreesOfFreedom,
+    intercept: coefficient(fit, 0),
+    slope: coefficient(fit, 1),
+    ...(fit.model === 'quadratic' ? { quadratic: coefficient(fit, 2) } : {}),
+    covariance: fit.covariance,
+    residualSd: fit.residualSd,
+    rSquared: fit.rSquared,
+    relativeStandardErrorPercent: relativeStandardErrorPercent(curve, points),
+    meanConcentration: fit.meanX,
+    sxx: fit.sxx,
+    range,
+    criticalValue: critical.value,
+    criticalValueReadings: critical.readings,
+    ...(epsilon ? { molarAbsorptivity: epsilon } : {}),
+    tests: { lackOfFit: NOT_YET, mandel: NOT_YET, intercept: NOT_YET, homogeneity: NOT_YET },
+    limits: [],
+    points,
+    levels,
+    flags: judgeCurve({ curve, points, levels, criticalValue: critical.value }),
+    working: ledger.steps,
+  };
 }

@@ -1,0 +1,41 @@
+import { EngineError } from '../errors';
+import type { CurvePoint } from '../prepare-points';
+import { type Fit, valueAt } from '../regression/fit';
+import type { VarianceRule } from './variance-rule';
+
+/**
+ * v = ŷ or ŷ², with ŷ from the unweighted fit (the second of two passes uses these weights). For an unknown below
+ * the lowest fitted value, that value's variance holds, as the lowest standard's does under 1/x.
+ *
+ * @throws EngineError FITTED_NOT_POSITIVE
+ */
+export function fittedVariance(points: readonly CurvePoint[], first: Fit, power: 1 | 2): VarianceRule {
+  const fitted = points.map((point) => valueAt(first, point.concentration));
+  const lowest = Math.min(...fitted);
+  if (lowest <= 0) {
+    const at = points[fitted.indexOf(lowest)];
+    throw new EngineError(
+      'FITTED_NOT_POSITIVE',
+      `weights 1/y need fitted absorbances above zero, got ${lowest.toPrecision(3)} at the concentration ${at?.concentration}; use 1/x or a variance function`,
+      '/weighting',
+    );
+  }
+  return {
+    ofPoints: fitted.map((value) => value ** power),
+    at: (_x, y) => Math.max(y, lowest) ** power,
+  };
+}
+
+/** v = s0² + (k ŷ)², ŷ per 10 mm, from the unweighted fit at the points and as measured at an unknown. */
+export function varianceByFunction(
+  points: readonly CurvePoint[],
+  fitted: (x: number) => number,
+  given: { readonly s0: number; readonly k: number } | undefined,
+): VarianceRule {
+  const { s0, k } = given ?? { s0: 1, k: 0 };
+  const variance = (y: number) => s0 ** 2 + (k * y) ** 2;
+  return {
+    ofPoints: points.map((point) => variance(fitted(point.concentration))),
+    at: (_x, y) => variance(y),
+  };
+}
