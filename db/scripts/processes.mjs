@@ -66,10 +66,14 @@ export async function runGroup(command, args, options = {}) {
  * such signal ends them by force. When this process ends in any other way, they end with it.
  */
 export function stopEverythingOnSignal() {
+  let askedAt = 0;
   for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) {
     process.on(signal, async () => {
-      const graceMs = stopping ? 0 : 10_000;
+      const again = stopping;
+      if (again && Date.now() - askedAt < 1_000) return; // Ctrl-C under npm arrives twice: from the terminal and from npm
+      if (!again) askedAt = Date.now();
       stopping = true;
+      const graceMs = again ? 0 : 10_000;
       await Promise.all([...running].map((child) => stopGroup(child, graceMs)));
       process.exit(128 + constants.signals[signal]);
     });
