@@ -44,6 +44,7 @@ interface KindOf {
 
 const field = (name: string) => (row: Model) => (row.get(name) as string | null | undefined) ?? null;
 const none = () => null;
+const always = () => true;
 
 function content(model: keyof Models, kind: string, nameField: string | null, hidden: string[] = []): KindOf {
   const audit = {
@@ -115,15 +116,34 @@ export const KINDS: Readonly<Record<Kind, KindOf>> = {
       notebookId: field('notebookId'),
       subjectName: field('name'),
       hidden: ['header', 'gaps'],
-      madeWithAnother: true,
+      madeWithAnother: always,
     },
   },
   method: content('Method', 'method', 'analyte'),
   curve: content('Curve', 'standard curve', 'title', ['result']),
-  standard: content('Standard', 'standard', 'name'),
+  standard: {
+    model: 'Standard',
+    belongsTo: 'notebook',
+    audit: {
+      kind: 'standard',
+      notebookId: field('notebookId'),
+      subjectName: field('name'),
+      madeWithAnother: always,
+    },
+  },
   batch: content('Batch', 'batch', 'title'),
   determination: content('Determination', 'determination', 'sample', ['result']),
-  reading: content('Reading', 'reading', null),
+  reading: {
+    model: 'Reading',
+    belongsTo: 'notebook',
+    audit: {
+      kind: 'reading',
+      notebookId: field('notebookId'),
+      subjectName: none,
+      // readings of a standard stand in the entry of their curve
+      madeWithAnother: (row) => row.get('standardId') !== null,
+    },
+  },
   recordEntry: { model: 'RecordEntry', belongsTo: 'notebook', audit: null },
 };
 

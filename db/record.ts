@@ -27,8 +27,8 @@ export interface Audit {
   readonly hidden?: readonly string[];
   /** Columns that change on every visit; a change of these alone makes no entry. */
   readonly quiet?: readonly string[];
-  /** True when the entry of what it came with stands for its making (a spectrum's source file). */
-  readonly madeWithAnother?: boolean;
+  /** True when the entry of what it came with stands for its making (a spectrum's source file, a standard's curve). */
+  readonly madeWithAnother?: (row: Model) => boolean;
 }
 
 /**
@@ -99,7 +99,7 @@ export function audited(model: ModelStatic<Model>, audit: Audit): void {
   model.addHook('afterCreate', 'record', async (row, options) => {
     const { why, ...write } = options as WriteOptions;
     const actor = mayWrite(row, write, audit);
-    if (audit.madeWithAnother) return;
+    if (audit.madeWithAnother?.(row)) return;
     const columns = Object.keys(model.getAttributes());
     await recordEvent(actor, {
       kind: audit.kind,

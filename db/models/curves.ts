@@ -1,6 +1,7 @@
 import type { CreationOptional, InferAttributes, InferCreationAttributes, Model, Sequelize } from 'sequelize';
-import type { CurveAnswer, ReadingRule } from '@/lib/engine';
+import type { CurveAnswer, ReadingRule, Signal } from '@/lib/engine';
 import {
+  flag,
   id,
   json,
   moment,
@@ -27,9 +28,16 @@ export interface MethodRow extends Row<MethodRow> {
   basis: string;
   formulaMass: number | null;
   unit: string;
+  /** In which readings are typed; a reading from a spectrum is an absorbance. */
+  signal: Signal;
   wavelengthNm: number;
   readingRule: ReadingRule;
   pathLengthMm: number;
+  pathLengthUMm: number | null;
+  /** False when the path is an assumption: then no molar absorptivity is claimed. */
+  pathLengthKnown: boolean;
+  /** Of what all standards share: stock, purity, common ware. */
+  standardsRelativeU: number | null;
   blankRule: 'none' | 'level' | 'subtract';
   model: 'linear' | 'proportional' | 'quadratic';
   weighting: string;
@@ -53,9 +61,13 @@ export const defineMethod = (sequelize: Sequelize) =>
       basis: text,
       formulaMass: optionalReal,
       unit: text,
+      signal: text,
       wavelengthNm: real,
       readingRule: json,
       pathLengthMm: real,
+      pathLengthUMm: optionalReal,
+      pathLengthKnown: flag,
+      standardsRelativeU: optionalReal,
       blankRule: text,
       model: text,
       weighting: text,
@@ -81,6 +93,8 @@ export interface CurveRow extends Row<CurveRow> {
   /** What the engine answered on the server when this version was saved. */
   result: CurveAnswer;
   engineVersion: string;
+  /** Why this version was made; null for a first one. */
+  reason: CreationOptional<string | null>;
   voidReason: CreationOptional<string | null>;
   createdById: string;
   createdAt: CreationOptional<Date>;
@@ -99,6 +113,7 @@ export const defineCurve = (sequelize: Sequelize) =>
       status: text,
       result: json,
       engineVersion: text,
+      reason: optionalText,
       voidReason: optionalText,
       createdById: reference,
       createdAt: moment,

@@ -1,4 +1,5 @@
-import { couldBeGrouped, parseDecimal } from '@/lib/schemas/decimal';
+import { typedReading } from '@/lib/batch/typed-reading';
+import { parseDecimal } from '@/lib/schemas/decimal';
 
 /** text: anything. decimal: a number. reading: a number, or what the instrument showed instead of one. */
 export type GridKind = 'text' | 'decimal' | 'reading';
@@ -35,6 +36,7 @@ export function cellContent(column: GridColumn, text: string): CellContent {
     const word = column.words?.find((known) => known === trimmed.toLowerCase());
     return word ? { state: 'text', text: word } : { state: 'bad', message: parsed.message };
   }
-  if (couldBeGrouped(trimmed)) return { state: 'bad', message: parsed.message };
+  const typed = typedReading(trimmed);
+  if (!typed.ok) return { state: 'bad', message: typed.message };
   return { state: 'gap', text: trimmed, message: `Kept as “${trimmed}”: a reading without a number` };
 }

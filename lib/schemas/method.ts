@@ -1,0 +1,114 @@
+import { z } from 'zod';
+import { CONCENTRATION_UNIT_NAMES, isMolar, parseUnit, type ReadingRule } from '@/lib/engine';
+import { LIMITS } from '@/lib/limits';
+import { decimal, optionalDecimal } from './decimal';
+
+/* The fields of a method as a form holds them: texts in, numbers out. */
+
+export const BLANK_RULES = ['none', 'level', 'subtract'] as const;
+export const FORM_MODELS = ['linear', 'proportional'] as const;
+export const FORM_WEIGHTINGS = ['none', '1/x', '1/x2'] as const;
+export const SIGNALS = ['absorbance', 'transmittance', 'percentTransmittance'] as const;
+export const READING_KINDS = ['point', 'interpolated', 'bandMean', 'windowMaximum'] as const;
+
+const positive = (what: string) => decimal.pipe(z.number().positive(`${what} must be above zero`));
+const optionalPositive = (what: string) =>
+  optionalDecimal.pipe(z.number().positive(`${what} must be above zero, or stay empty`).nullable());
+const optionalNotNegative = (what: string) =>
+  optionalDecimal.pipe(z.number().min(0, `${what} cannot be below zero`).nullable());
+
+/** A concentration unit with either micro sign. */
+export const unitName = z.string().transform((text, context) => {
+  const unit = parseUnit(text);
+  if (unit) return unit;
+  context.addIssue({ code: 'custom', message: `Choose one of ${CONCENTRATION_UNIT_NAMES.join(', ')}` });
+  return z.NEVER;
+});
+
+export const aboutFields = z.object({
+  title: z.string().trim().max(LIMITS.title, `A title has at most ${LIMITS.title} letters`),
+  analyte: z.string().trim().min(1, 'Say what is measured').max(LIMITS.name, 'This name is too long'),
+  basis: z.string().trim().max(LIMITS.name, 'This is too long'),
+  hazardNote: z.string().trim().max(LIMITS.note, 'This note is too long'),
+  reason: z.string().trim().max(LIMITS.reason, 'This reason is too long'),
+});
+
+/** The fields of a reading rule; those that its kind does not use may hold anything. */
+export const ruleFields = z
+  .object({
+    kind: z.enum(READING_KINDS, 'Choose how the spectrum is read'),
+    wavelengthNm: z.string(),
+    halfWidthNm: z.string(),
+    fromNm: z.string(),
+    toNm: z.string(),
+    minusNm: z.string(),
+  })
+  .transform((fields, context): ReadingRule => {
+    const read = (name: 'wavelengthNm' | 'halfWidthNm' | 'fromNm' | 'toNm', what: string): number => {
+      const parsed = positive(what).safeParse(fields[name]);
+      if (parsed.success) return parsed.data;
+      context.addIssue({
+        code: 'custom',
+        path: [name],
+        message: parsed.error.issues[0]?.message ?? 'Enter a number',
+      });
+      return NaN;
+    };
+    const minus = optionalPositive('The second wavelength').safeParse(fields.minusNm);
+    if (!minus.success)
+      context.addIssue({
+        code: 'custom',
+        path: ['minusNm'],
+        message: minus.error.issues[0]?.message ?? 'Enter a number',
+      });
+    const second = minus.data == null ? {} : { minusNm: minus.data };
+    if (fields.kind === 'windowMaximum') {
+      const fromNm = read('fromNm', 'The wavelength');
+      const toNm = read('toNm', 'The wavelength');
+      if (fromNm >= toNm)
+        context.addIssue({ code: 'custom', path: ['toNm'], message: 'The window ends before it begins' });
+      return { kind: fields.kind, fromNm, toNm, ...second };
+    }
+    const wavelengthNm = read('wavelengthNm', 'The wavelength');
+    if (fields.kind !== 'bandMean') return { kind: fields.kind, wavelengthNm, ...second };
+    return {
+      kind: fields.kind,
+      wavelengthNm,
+      halfWidthNm: read('halfWidthNm', 'The half width'),
+      ...second,
+    };
+  });
+
+export const calculationFields = z
+  .object({
+    signal: z.enum(SIGNALS, 'Choose what the readings are'),
+    unit: unitName,
+    formulaMass: optionalPositive('The formula mass'),
+    pathLengthMm: positive('The path length'),
+    pathLengthKnown: z.boolean(),
+    pathLengthUMm: optionalNotNegative('The uncertainty'),
+    blankRule: z.enum(BLANK_RULES, 'Choose what is done with the blank'),
+    model: z.enum(FORM_MODELS, 'Choose a line'),
+    weighting: z.enum(FORM_WEIGHTINGS, 'Choose a weighting'),
+    confidence: z.enum(['0.9', '0.95', '0.99'], 'Choose a level of confidence').transform(Number),
+    absorbanceLimit: positive('The absorbance limit'),
+    standardsRelativeUPercent: optionalNotNegative('The uncertainty'),
+  })
+  .superRefine((fields, context) => {
+    if (isMolar(fields.unit) && fields.formulaMass === null)
+      context.addIssue({
+        code: 'custom',
+        path: ['formulaMass'],
+        message: `${fields.unit} counts particles: enter the formula mass of what is counted`,
+      });
+    if (fields.blankRule === 'level' && fields.model === 'proportional')
+      context.addIssue({
+        code: 'custom',
+        path: ['blankRule'],
+        message: 'A line through zero takes no blank level. Subtract the blank, or leave the intercept free',
+      });
+  })
+  .transform(({ standardsRelativeUPercent: percent, ...fields }) => ({
+    ...fields,
+    standardsRelativeU: percent === null ? null : percent / 100,
+  }));
