@@ -88,3 +88,5 @@ export const readingsPreview = z.object({
   spectrumIds: z.array(z.uuid()).min(1).max(LIMITS.spectraAtOnce),
   rule: ruleFields,
 });
+
+export const curveParams = z.object({ curveId: z.uuid() });
