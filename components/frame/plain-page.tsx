@@ -1,5 +1,7 @@
 import type { ReactNode } from 'react';
 
+import { classNames } from '@/components/ui/class-names';
+
 import { Brand } from './brand';
 import { ThemeSwitch } from './theme-switch';
 
@@ -8,11 +10,14 @@ export function PlainPage({
   title,
   banner,
   footer,
+  wide = false,
   children,
 }: {
   title: ReactNode;
   banner?: ReactNode;
   footer?: ReactNode;
+  /** for a page to be read, not filled in */
+  wide?: boolean;
   children: ReactNode;
 }) {
   return (
@@ -27,7 +32,12 @@ export function PlainPage({
         tabIndex={-1}
         className="grid flex-1 content-start justify-items-center px-4 py-10 outline-none"
       >
-        <div className="grid w-full max-w-md gap-4 rounded-card border border-rule bg-sheet p-6">
+        <div
+          className={classNames(
+            'grid w-full gap-4 rounded-card border border-rule bg-sheet p-6',
+            wide ? 'max-w-3xl' : 'max-w-md',
+          )}
+        >
           <h1>{title}</h1>
           {children}
         </div>

@@ -1,14 +1,12 @@
 import type { Role } from '@/lib/policies/actor';
 
-/** What each role is called, and what it may do, as pages say it. */
-export const ROLE_WORDS: Readonly<Record<Role, { name: string; may: string }>> = {
-  administrator: {
-    name: 'Administrator',
-    may: 'Adds people and sets roles. Sees titles and owners of notebooks, but what is in them only as a member.',
-  },
-  pi: { name: 'PI', may: 'Owns notebooks, works in them and shares them.' },
-  analyst: { name: 'Analyst', may: 'Makes notebooks, naming a PI as owner, and works in them.' },
-  viewer: { name: 'Viewer', may: 'Reads the notebooks they are a member of.' },
+/** What each role may do, as pages say it. */
+export const ROLE_MAY: Readonly<Record<Role, string>> = {
+  administrator:
+    'Adds people and sets roles. Sees titles and owners of notebooks, but what is in them only as a member.',
+  pi: 'Owns notebooks, works in them and shares them.',
+  analyst: 'Makes notebooks, naming a PI as owner, and works in them.',
+  viewer: 'Reads the notebooks they are a member of.',
 };
 
 export type LinkPurpose = 'invitation' | 'reset';

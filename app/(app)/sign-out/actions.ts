@@ -4,10 +4,10 @@ import { redirect } from 'next/navigation';
 import { z } from 'zod';
 import { signOut as endSession } from '@/db/entry/sign-in';
 import { action } from '@/app/_server/action';
-import { openSessionCookie } from '@/app/_server/session-cookie';
+import { forgetSession } from '@/app/_server/begin-session';
 
 export const signOut = action(z.object({}), async (actor) => {
   if (actor.sessionId) await endSession(actor.sessionId);
-  (await openSessionCookie()).destroy();
+  await forgetSession();
   redirect('/sign-in');
 });
