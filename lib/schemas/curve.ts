@@ -1,7 +1,8 @@
 import { z } from 'zod';
 import { LIMITS } from '@/lib/limits';
 import { decimal } from './decimal';
-import { aboutFields, calculationFields, ruleFields } from './method';
+import { aboutFields, calculationFields } from './method';
+import { spectrumRule } from './spectrum-rule';
 
 const reason = z
   .string()
@@ -49,7 +50,7 @@ export const standardDrafts = z
 /** What the form of a curve holds. */
 export const curveDraft = z.object({
   about: aboutFields,
-  rule: ruleFields,
+  rule: spectrumRule,
   calculation: calculationFields,
   standards: standardDrafts,
 });
@@ -86,7 +87,7 @@ export type VoidCurve = z.output<typeof voidCurveForm>;
 /** Spectra to be read by a rule, before anything is saved. */
 export const readingsPreview = z.object({
   spectrumIds: z.array(z.uuid()).min(1).max(LIMITS.spectraAtOnce),
-  rule: ruleFields,
+  rule: spectrumRule,
 });
 
 export const curveParams = z.object({ curveId: z.uuid() });

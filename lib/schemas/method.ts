@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { CONCENTRATION_UNIT_NAMES, isMolar, parseUnit, type ReadingRule } from '@/lib/engine';
+import { CONCENTRATION_UNIT_NAMES, isMolar, parseUnit } from '@/lib/engine';
 import { LIMITS } from '@/lib/limits';
 import { decimal, optionalDecimal } from './decimal';
 
@@ -9,7 +9,6 @@ export const BLANK_RULES = ['none', 'level', 'subtract'] as const;
 export const FORM_MODELS = ['linear', 'proportional'] as const;
 export const FORM_WEIGHTINGS = ['none', '1/x', '1/x2'] as const;
 export const SIGNALS = ['absorbance', 'transmittance', 'percentTransmittance'] as const;
-export const READING_KINDS = ['point', 'interpolated', 'bandMean', 'windowMaximum'] as const;
 
 const positive = (what: string) => decimal.pipe(z.number().positive(`${what} must be above zero`));
 const optionalPositive = (what: string) =>
@@ -32,52 +31,6 @@ export const aboutFields = z.object({
   hazardNote: z.string().trim().max(LIMITS.note, 'This note is too long'),
   reason: z.string().trim().max(LIMITS.reason, 'This reason is too long'),
 });
-
-/** The fields of a reading rule; those that its kind does not use may hold anything. */
-export const ruleFields = z
-  .object({
-    kind: z.enum(READING_KINDS, 'Choose how the spectrum is read'),
-    wavelengthNm: z.string(),
-    halfWidthNm: z.string(),
-    fromNm: z.string(),
-    toNm: z.string(),
-    minusNm: z.string(),
-  })
-  .transform((fields, context): ReadingRule => {
-    const read = (name: 'wavelengthNm' | 'halfWidthNm' | 'fromNm' | 'toNm', what: string): number => {
-      const parsed = positive(what).safeParse(fields[name]);
-      if (parsed.success) return parsed.data;
-      context.addIssue({
-        code: 'custom',
-        path: [name],
-        message: parsed.error.issues[0]?.message ?? 'Enter a number',
-      });
-      return NaN;
-    };
-    const minus = optionalPositive('The second wavelength').safeParse(fields.minusNm);
-    if (!minus.success)
-      context.addIssue({
-        code: 'custom',
-        path: ['minusNm'],
-        message: minus.error.issues[0]?.message ?? 'Enter a number',
-      });
-    const second = minus.data == null ? {} : { minusNm: minus.data };
-    if (fields.kind === 'windowMaximum') {
-      const fromNm = read('fromNm', 'The wavelength');
-      const toNm = read('toNm', 'The wavelength');
-      if (fromNm >= toNm)
-        context.addIssue({ code: 'custom', path: ['toNm'], message: 'The window ends before it begins' });
-      return { kind: fields.kind, fromNm, toNm, ...second };
-    }
-    const wavelengthNm = read('wavelengthNm', 'The wavelength');
-    if (fields.kind !== 'bandMean') return { kind: fields.kind, wavelengthNm, ...second };
-    return {
-      kind: fields.kind,
-      wavelengthNm,
-      halfWidthNm: read('halfWidthNm', 'The half width'),
-      ...second,
-    };
-  });
 
 export const calculationFields = z
   .object({

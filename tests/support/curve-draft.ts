@@ -14,7 +14,7 @@ const STANDARDS: readonly Typed[] = [
 export function curveDraftInput(standards: readonly Typed[] = STANDARDS): CurveDraftInput {
   return {
     about: { title: '', analyte: 'Iron(II) as ferroin', basis: 'Fe', hazardNote: 'Wear gloves', reason: '' },
-    rule: { kind: 'point', wavelengthNm: '510', halfWidthNm: '', fromNm: '', toNm: '', minusNm: '' },
+    rule: { rule: 'point', at: '510', half: '', from: '', to: '', minus: '' },
     calculation: {
       signal: 'absorbance',
       unit: 'mg/L',

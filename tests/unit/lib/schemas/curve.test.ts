@@ -32,18 +32,14 @@ describe('curveDraft', () => {
     [withCalculation({ unit: 'mmol/L', formulaMass: '' }), 'calculation.formulaMass', /formula mass/],
     [withCalculation({ formulaMass: '-1' }), 'calculation.formulaMass', /above zero/],
     [withCalculation({ blankRule: 'level', model: 'proportional' }), 'calculation.blankRule', /through zero/],
-    [
-      { ...curveDraftInput(), rule: { ...curveDraftInput().rule, wavelengthNm: '' } },
-      'rule.wavelengthNm',
-      /number/,
-    ],
+    [{ ...curveDraftInput(), rule: { ...curveDraftInput().rule, at: '' } }, 'rule.at', /number/],
     [
       {
         ...curveDraftInput(),
-        rule: { ...curveDraftInput().rule, kind: 'windowMaximum', fromNm: '550', toNm: '450' },
+        rule: { ...curveDraftInput().rule, rule: 'windowMaximum' as const, from: '550', to: '450' },
       },
-      'rule.toNm',
-      /before it begins/,
+      'rule.to',
+      /above its beginning/,
     ],
     [curveDraftInput([['S1', '-1', '0.1']]), 'standards.0.concentration', /below zero/],
     [curveDraftInput([['S1', 'Infinity', '0.1']]), 'standards.0.concentration', /number/],
