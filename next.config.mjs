@@ -22,7 +22,7 @@ const shared = [
 const secureOnly = [{ key: 'Strict-Transport-Security', value: 'max-age=31536000' }];
 
 /** @type {import('next').NextConfig} */
-export default {
+const config = {
   poweredByHeader: false,
   // `next dev` must not write guide files of its own into the tree
   agentRules: false,
@@ -42,3 +42,5 @@ export default {
     ];
   },
 };
+
+export default config;

@@ -7,9 +7,12 @@ export function DemoBanner({
   children?: React.ReactNode;
 }) {
   return (
-    <p className="no-print flex items-center gap-2 border-b border-rule bg-amber-wash px-4 py-1.5 text-sm text-amber md:px-7.5">
+    <aside
+      aria-label="Demonstration"
+      className="no-print flex items-center gap-2 border-b border-rule bg-amber-wash px-4 py-1.5 text-sm text-amber md:px-7.5"
+    >
       <ToneShape tone="decide" />
-      <span>{children}</span>
-    </p>
+      <p>{children}</p>
+    </aside>
   );
 }

@@ -44,15 +44,14 @@ export function Navigation({ entries, recent, person, signOut }: NavigationProps
           {signedIn}
         </NavigationSheet>
       </header>
-      <aside
-        aria-label="Halflight"
-        className="night-side no-print sticky top-0 hidden h-dvh w-52 shrink-0 flex-col gap-5 overflow-y-auto bg-night px-3.5 py-5 md:flex"
-      >
-        <div className="px-2">
-          <Brand />
+      <aside aria-label="Halflight" className="night-side no-print hidden w-52 shrink-0 bg-night md:block">
+        <div className="sticky top-0 flex h-dvh flex-col gap-5 overflow-y-auto px-3.5 py-5">
+          <div className="px-2">
+            <Brand />
+          </div>
+          {list}
+          {signedIn}
         </div>
-        {list}
-        {signedIn}
       </aside>
     </>
   );

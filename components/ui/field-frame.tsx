@@ -20,7 +20,7 @@ export interface FieldProps {
 
 export const CONTROL =
   'w-full min-w-0 rounded-control border border-control bg-sheet px-3 py-1.5 text-base text-ink placeholder:text-ink-2 ' +
-  'disabled:bg-raised disabled:text-ink-2 read-only:bg-raised aria-invalid:border-red aria-invalid:outline-red';
+  'disabled:bg-raised disabled:text-ink-2 [&[readonly]]:bg-raised aria-invalid:border-red aria-invalid:outline-red';
 
 /** The ids and states that tie an input to its label, hint and error. */
 export function useFieldIds({ name, failed, hint, error }: FieldProps) {

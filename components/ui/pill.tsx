@@ -58,7 +58,7 @@ export function Pill({
       <ToneShape tone={tone} />
       <span>
         {children}
-        {code && <span className="num ml-1.5 text-[0.6875rem] font-normal opacity-90">{code}</span>}
+        {code && <span className="num ml-1.5 text-[0.6875rem] font-normal">{code}</span>}
       </span>
     </span>
   );

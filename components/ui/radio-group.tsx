@@ -26,7 +26,7 @@ export interface RadioGroupProps {
 }
 
 const LIST = 'grid gap-2';
-const SEGMENTS = 'inline-flex flex-wrap self-start rounded-control border border-control bg-sheet p-0.5';
+const SEGMENTS = 'flex w-fit flex-wrap rounded-control border border-control bg-sheet p-0.5';
 const SEGMENT =
   'relative flex min-h-7.5 items-center rounded-[6px] px-3 text-sm font-medium text-ink-2 hover:text-ink ' +
   'has-checked:bg-uv-wash has-checked:text-uv has-focus-visible:outline-2 has-focus-visible:outline-uv has-disabled:opacity-60';
