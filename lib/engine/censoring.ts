@@ -29,7 +29,7 @@ function toAbsorbance(value: number, signal: Signal): number | undefined {
 }
 
 /** A bound such as ">3.5", or "<0.03" in transmittance, which bounds the absorbance from the other side. */
-function bounded(text: string, signal: Signal): Absorbance | null {
+function bounded(text: string, signal: Signal, came = text): Absorbance | null {
   const [, sign, rest] = BOUND.exec(text) ?? [];
   const value = rest === undefined ? null : plainNumber(rest);
   if (sign === undefined || value === null) return null;
@@ -40,7 +40,7 @@ function bounded(text: string, signal: Signal): Absorbance | null {
     value: null,
     censored: {
       reason: above ? 'aboveRange' : 'belowRange',
-      text,
+      text: came,
       ...(atLeast === undefined ? {} : { atLeast }),
     },
   };
@@ -51,13 +51,15 @@ export function censoredText(raw: string, signal: Signal): Absorbance {
   const text = raw.trim();
   const because = (reason: CensorReason): Absorbance => ({ value: null, censored: { reason, text } });
   if (text === '') return because('empty');
-  const bound = bounded(text, signal);
-  if (bound) return bound;
+  const stated = bounded(text, signal);
+  if (stated) return stated;
   if (OVER.test(text)) return because('aboveRange');
   if (UNDER.test(text)) return because('belowRange');
   const starred = plainNumber(MARKED.exec(text)?.[1] ?? '');
   // "3.500*": the number an instrument stops at, with a mark that the true one lies beyond.
-  if (starred !== null)
-    return bounded(`${signal === 'absorbance' ? '>' : '<'}${starred}`, signal) ?? because('aboveRange');
+  if (starred !== null) {
+    const bound = bounded(`${signal === 'absorbance' ? '>' : '<'}${starred}`, signal, text);
+    return bound ?? because('aboveRange');
+  }
   return because('unreadable');
 }

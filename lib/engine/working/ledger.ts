@@ -69,28 +69,13 @@ export class Ledger {
 
   /** A number that was given, not calculated. */
   given(text: LineText, value: number | string): void {
-    const shown = numberText(value);
-    this.add({
-      ...text,
-      unit: text.unit ?? '',
-      formula: text.symbol,
-      substituted: `${text.symbol} = ${shown}`,
-      value,
-      inputs: [],
-    });
+    this.add(text, text.symbol, numberText(value), value, []);
   }
 
   /** A value calculated by `expression`, whose symbols stand for the lines named in `from`. */
   line(text: LineText, expression: string, from: From, value: number | string): void {
     const numbers = this.fill(templateOf(expression, Object.keys(from)), from);
-    this.add({
-      ...text,
-      unit: text.unit ?? '',
-      formula: `${text.symbol} = ${expression}`,
-      substituted: `${text.symbol} = ${numbers}`,
-      value,
-      inputs: [...new Set(Object.values(from))],
-    });
+    this.add(text, `${text.symbol} = ${expression}`, numbers, value, distinct(Object.values(from)));
   }
 
   /** A sum over points: `expression` for one term, `terms` the ids behind its symbols, point by point. */
@@ -100,31 +85,26 @@ export class Ledger {
     const template = templateOf(expression, Object.keys(terms[0] ?? {}));
     const texts = written.map((from) => this.fill(template, from));
     if (terms.length > TERMS_WRITTEN) texts.splice(2, 0, `... ${terms.length - 3} more terms ...`);
-    const sumText =
-      over === undefined
-        ? texts.join(' + ')
-        : `(${texts.join(' + ')}) / ${this.shown(divisor?.[over] ?? '')}`;
-    const inputs = [...terms.flatMap((from) => Object.values(from)), ...Object.values(divisor ?? {})];
-    this.add({
-      ...text,
-      unit: text.unit ?? '',
-      formula: `${text.symbol} = sum(${expression})${over === undefined ? '' : ` / ${over}`}`,
-      substituted: `${text.symbol} = ${sumText}`,
+    const sumText = texts.join(' + ');
+    const inputs = new Set(Object.values(divisor ?? {}));
+    for (const from of terms) for (const symbol in from) inputs.add(from[symbol] ?? '');
+    this.add(
+      text,
+      `${text.symbol} = sum(${expression})${over === undefined ? '' : ` / ${over}`}`,
+      over === undefined ? sumText : `(${sumText}) / ${this.shown(divisor?.[over] ?? '')}`,
       value,
-      inputs: [...new Set(inputs)],
-    });
+      [...inputs],
+    );
   }
 
   /** A value that no short formula gives (a matrix solved, a case chosen): says how, and what it was made from. */
   solved(text: LineText, how: string, inputs: readonly string[], value: number | string): void {
-    this.add({
-      ...text,
-      unit: text.unit ?? '',
-      formula: `${text.symbol}: ${how}`,
-      substituted: `${text.symbol} = ${numberText(value)}`,
-      value,
-      inputs,
-    });
+    this.add(text, `${text.symbol}: ${how}`, numberText(value), value, inputs);
+  }
+
+  /** Of these ids, the ones that have a line. */
+  present(ids: readonly string[]): readonly string[] {
+    return ids.filter((id) => this.texts.has(id) || this.above?.texts.has(id) === true);
   }
 
   private fill(template: Template, from: From): string {
@@ -143,8 +123,19 @@ export class Ledger {
     return text;
   }
 
-  private add(step: WorkingStep): void {
-    this.steps.push(step);
-    this.texts.set(step.id, numberText(step.value));
+  private add(
+    { id, label, symbol, unit = '', source }: LineText,
+    formula: string,
+    numbers: string,
+    value: number | string,
+    inputs: readonly string[],
+  ): void {
+    const substituted = `${symbol} = ${numbers}`;
+    this.steps.push({ id, label, symbol, formula, substituted, value, unit, source, inputs });
+    this.texts.set(id, numberText(value));
   }
+}
+
+function distinct(ids: readonly string[]): readonly string[] {
+  return ids.length < 2 ? ids : [...new Set(ids)];
 }

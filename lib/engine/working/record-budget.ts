@@ -119,7 +119,10 @@ function recordCoverage(
   ledger.solved(
     { id: 'unknown.nu', label: 'Effective degrees of freedom', symbol: 'nu_eff', source: `${GUM}, G.4` },
     'u(C)^4 / sum(u_i^4 / nu_i), the lines that share s as one',
-    [...termIds, 'curve.degreesOfFreedom'],
+    // With nothing but lines that share s, ν is the curve's, whatever their sizes.
+    budget.terms.every((term) => term.sharesS)
+      ? ['curve.degreesOfFreedom']
+      : [...termIds, 'curve.degreesOfFreedom'],
     nu,
   );
   ledger.solved(

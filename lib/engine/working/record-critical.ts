@@ -42,7 +42,7 @@ export function recordCritical(
       source: `weighting ${curve.request.weighting} and path`,
     },
     'in the scale of the points of the curve',
-    ['unknown.path'].filter(() => owner === 'unknown'),
+    weightInputs(ledger, curve, owner === 'unknown' ? ['unknown.path'] : []),
     critical.weight,
   );
   ledger.line(
@@ -51,4 +51,10 @@ export function recordCritical(
     { t, s: 'curve.s', K, w_0: `${owner}.critical.weight`, V_aa: 'curve.v.intercept', b: 'curve.slope' },
     critical.value,
   );
+}
+
+/** Lines that a weight in the scale of the curve's points rests on. */
+export function weightInputs(ledger: Ledger, curve: FittedCurve, own: readonly string[]): readonly string[] {
+  const variances = curve.active.map((point) => `${point.id}.variance`);
+  return ledger.present(['curve.weightScale', ...variances, ...own]);
 }

@@ -1,5 +1,6 @@
 import type { ReadBack } from '../unknown/read-back';
 import type { Ledger } from './ledger';
+import { weightInputs } from './record-critical';
 import type { UnknownRecord } from './record-unknown';
 
 const CG4 = 'EURACHEM/CITAC CG 4, example A5';
@@ -106,7 +107,7 @@ function recordReadingSd(ledger: Ledger, { curve, readings }: UnknownRecord, bac
         source: `weighting ${curve.request.weighting} and path`,
       },
       'in the scale of the points of the curve',
-      needsMean ? ['unknown.measured', 'unknown.path'] : ['unknown.path'],
+      weightInputs(ledger, curve, needsMean ? ['unknown.measured', 'unknown.path'] : ['unknown.path']),
       back.weight,
     );
     ledger.line(
