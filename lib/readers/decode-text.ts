@@ -48,8 +48,19 @@ function utf8OrWestern(bytes: Uint8Array, marked: boolean): DecodedText {
     return { text: withoutPadding(text), encoding: 'UTF-8', marked };
   } catch {
     // Not UTF-8: the decoder's only way to say so is to throw.
-    return decoded(bytes, 'windows-1252', 'windows-1252', false);
+    const { text } = decoded(bytes, 'windows-1252', 'windows-1252', false);
+    return { text: text.replace(/[\u0080-\u009f]/g, westernSign), encoding: 'windows-1252', marked: false };
   }
+}
+
+/** What windows-1252 has at 0x80 to 0x9F; a blank in this list is a place it leaves empty. */
+const WESTERN =
+  '\u20ac \u201a\u0192\u201e\u2026\u2020\u2021\u02c6\u2030\u0160\u2039\u0152 \u017d  \u2018\u2019\u201c\u201d\u2022\u2013\u2014\u02dc\u2122\u0161\u203a\u0153 \u017e\u0178';
+
+/** Node 20 decodes windows-1252 as Latin-1, browsers as the standard says; this makes both the same. */
+function westernSign(control: string): string {
+  const sign = WESTERN[control.charCodeAt(0) - 0x80];
+  return sign === undefined || sign === ' ' ? control : sign;
 }
 
 function decoded(bytes: Uint8Array, label: string, encoding: Encoding, marked: boolean): DecodedText {

@@ -62,7 +62,7 @@ export interface SignalWords {
 }
 
 const COEFFICIENT =
-  /cross.?section|x-?sec|coefficient|koeffizient|epsilon|\u03b5|molar|absorptivity|1\s*\/\s*m(?![a-z])|m\^?-1|quantum|yield|emission|fluoresc|intensity|counts|variance|error|std|sd(?![a-z])|reflect|%\s*r(?![a-z])|derivative|refractive|kubelka/i;
+  /cross.?section|x-?sec|coefficient|koeffizient|epsilon|\u03b5|molar|absorptivity|1\s*\/\s*m(?![a-z])|(?<![a-z])m\^?-1|cm\^?2(?![a-z\d])|molecule|quantum|yield|emission|fluoresc|intensity|counts|variance|error|std|sd(?![a-z])|reflect|%\s*r(?![a-z])|derivative|refractive|kubelka/i;
 
 /** What the ordinate is by its words, or undefined when they say nothing of it (a sample's name, say). */
 export function signalFromText(text: string): SignalWords | undefined {

@@ -1,8 +1,9 @@
 import { decodeText } from './decode-text';
+import { readDelimited } from './delimited/read-delimited';
 import { looksLikeJcamp } from './jcamp/records';
 import { readJcamp } from './jcamp/read-jcamp';
 import { refuseSignature, refuseText } from './refuse';
-import { ReaderError, type ReadOptions, type ReadResult } from './types';
+import type { ReadOptions, ReadResult } from './types';
 
 /**
  * Read a spectrum file: bytes in; spectra, header text, warnings and open questions out. Pure.
@@ -14,12 +15,12 @@ import { ReaderError, type ReadOptions, type ReadResult } from './types';
  */
 export function readFile(bytes: Uint8Array, fileName: string, options: ReadOptions = {}): ReadResult {
   refuseSignature(bytes);
-  const { text } = decodeText(bytes);
+  const { text, encoding } = decodeText(bytes);
   options.onSteps?.(bytes.length);
   const name = baseName(fileName);
   if (looksLikeJcamp(text)) return readJcamp(text, name, options);
   refuseText(text);
-  throw new ReaderError('NO_TABLE', 'This text holds no table of numbers.');
+  return readDelimited(text, name, encoding, options);
 }
 
 /** The file's name without folder and extension. */

@@ -1,3 +1,4 @@
+import { distinctNames } from '../distinct-names';
 import { finishSpectrum } from '../inspect/finish-spectrum';
 import { linesText, lineText, splitLines, type TextLines } from '../text-lines';
 import {
@@ -204,21 +205,4 @@ function headerText(lines: TextLines, records: readonly JcampRecord[]): string {
     parts.push(table ? lineText(lines, record.line) : linesText(lines, record.line, record.to));
   }
   return parts.join('\n');
-}
-
-/** Spectra of one file with the same name get a number behind it. */
-export function distinctNames(spectra: readonly ReadSpectrum[]): ReadSpectrum[] {
-  const taken = new Set<string>();
-  const last = new Map<string, number>();
-  return spectra.map((spectrum) => {
-    let { name } = spectrum;
-    let number = last.get(spectrum.name) ?? 1;
-    while (taken.has(name)) {
-      number += 1;
-      name = `${spectrum.name} (${number})`;
-    }
-    last.set(spectrum.name, number);
-    taken.add(name);
-    return name === spectrum.name ? spectrum : { ...spectrum, name };
-  });
 }

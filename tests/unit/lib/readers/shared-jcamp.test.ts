@@ -10,7 +10,9 @@ interface Expected {
 }
 
 const expectedFile = sharedFile('spectra/jcamp-dx/expected.json');
-const expected = expectedFile ? (JSON.parse(readFileSync(expectedFile, 'utf8')) as Record<string, Expected>) : {};
+const expected = expectedFile
+  ? (JSON.parse(readFileSync(expectedFile, 'utf8')) as Record<string, Expected>)
+  : {};
 
 /** What must be said of each faulty file: a code of a warning, or of the refusal. */
 const SAID: Record<string, string> = {
@@ -43,26 +45,34 @@ function codesOf(name: string): string[] {
     if (error instanceof ReaderError) return [error.code];
     throw error;
   }
-  return [...result.warnings, ...result.spectra.flatMap((spectrum) => spectrum.warnings)].map((warning) => warning.code);
+  return [...result.warnings, ...result.spectra.flatMap((spectrum) => spectrum.warnings)].map(
+    (warning) => warning.code,
+  );
 }
 
 describe.runIf(expectedFile !== null)('JCAMP-DX files made from real spectra', () => {
-  test.each(Object.keys(expected).filter((name) => (expected[name]?.spectra.length ?? 0) > 0))('%s gives every ordinate', (name) => {
-    const { spectra } = readFile(bytesOf(name), name);
-    const wanted = expected[name]?.spectra ?? [];
-    expect(spectra.length).toBe(wanted.length);
-    wanted.forEach((want, i) => {
-      const got = spectra[i];
-      expect(Array.from(got?.y ?? [])).toEqual(want.y);
-      // The listed abscissae are rounded to 1e-4 by their source.
-      const worst = want.x.reduce((most, x, k) => Math.max(most, Math.abs(x - (got?.x[k] ?? NaN))), 0);
-      expect(worst).toBeLessThan(1e-4);
-    });
-  });
+  test.each(Object.keys(expected).filter((name) => (expected[name]?.spectra.length ?? 0) > 0))(
+    '%s gives every ordinate',
+    (name) => {
+      const { spectra } = readFile(bytesOf(name), name);
+      const wanted = expected[name]?.spectra ?? [];
+      expect(spectra.length).toBe(wanted.length);
+      wanted.forEach((want, i) => {
+        const got = spectra[i];
+        expect(Array.from(got?.y ?? [])).toEqual(want.y);
+        // The listed abscissae are rounded to 1e-4 by their source.
+        const worst = want.x.reduce((most, x, k) => Math.max(most, Math.abs(x - (got?.x[k] ?? NaN))), 0);
+        expect(worst).toBeLessThan(1e-4);
+      });
+    },
+  );
 
-  test.each(Object.keys(expected).filter((name) => expected[name]?.bad !== ''))('%s says what is wrong', (name) => {
-    expect(codesOf(name)).toContain(SAID[name]);
-  });
+  test.each(Object.keys(expected).filter((name) => expected[name]?.bad !== ''))(
+    '%s says what is wrong',
+    (name) => {
+      expect(codesOf(name)).toContain(SAID[name]);
+    },
+  );
 
   test('the first block of a file cut in the second is whole', () => {
     const { spectra } = readFile(bytesOf('b16_link_second_block_cut.jdx'), 'b16.jdx');

@@ -1,0 +1,95 @@
+import { isWavelengthWord, otherAxisWord, signalFromText, xUnitFromText } from '../header-words';
+import { xOrder } from '../inspect/order';
+import type { ReadOptions } from '../types';
+import { inRange, type ColumnFacts } from './column-facts';
+import type { NumberTable } from './number-table';
+
+/** A column with at least this share of numbers can be an axis. */
+const FILLED = 0.5;
+/** Unnamed columns in no order are x only when there are enough rows to believe it. */
+const ENOUGH = 10;
+
+/**
+ * The column that is x: the person's word, else the best of what its heading says and how its numbers run. A column
+ * headed as time, concentration, temperature or a signal is never x of a spectrum.
+ */
+export function findX(
+  table: NumberTable,
+  facts: readonly ColumnFacts[],
+  labels: readonly string[],
+  options: ReadOptions,
+): number | undefined {
+  if (options.xColumn !== undefined) return options.xColumn < facts.length ? options.xColumn : undefined;
+  const firstPlain = facts.findIndex((fact, i) => fact.numbers > 0 && !(fact.isIndex && hasOther(facts, i)));
+  let best: number | undefined;
+  let most = 0;
+  facts.forEach((fact, i) => {
+    const score = xScore(table, fact, labels[i] ?? '', i, firstPlain, options);
+    if (score > most) {
+      most = score;
+      best = i;
+    }
+  });
+  return best;
+}
+
+function hasOther(facts: readonly ColumnFacts[], index: number): boolean {
+  return facts.some((fact, i) => i > index && fact.direction !== 0 && fact.numbers > 1 && inRange(fact));
+}
+
+function xScore(
+  table: NumberTable,
+  fact: ColumnFacts,
+  label: string,
+  index: number,
+  firstPlain: number,
+  options: ReadOptions,
+): number {
+  if (fact.numbers < FILLED * fact.rows || (fact.low === fact.high && fact.rows > 1)) return 0;
+  const place = 1 - index / 1000;
+  const unit = xUnitFromText(label);
+  const plausible = fact.direction !== 0 || fact.sorted >= 0.9 || inRange(fact, unit);
+  if (!plausible && isWavelengthWord(label)) return 0;
+  if (isWavelengthWord(label) || (unit && label.length < 40 && !signalFromText(label.replace(/\bA\b/, ''))))
+    return 100 + place;
+  if (otherAxisWord(label) || signalFromText(label) || fact.isIndex) return 0;
+  if (!inRange(fact, options.xUnit) || index !== firstPlain) return 0;
+  if (fact.direction !== 0) return 50 + place;
+  if (fact.sorted >= 0.9) return 40 + place;
+  const values = table.columns[index]?.values ?? new Float64Array();
+  const ordered = xOrder(values).kind !== 'unsorted';
+  const distinct = new Set(values).size === values.length;
+  return fact.low >= 100 && (ordered || (distinct && values.length >= ENOUGH)) ? 20 + place : 0;
+}
+
+/**
+ * Whether a table is pairs of x and y side by side: x in every second column, each running one way, all over a
+ * similar range. A pair without any number is no obstacle.
+ */
+export function isPaired(
+  facts: readonly ColumnFacts[],
+  labels: readonly string[],
+  xColumn: number | undefined,
+): boolean {
+  const columns = facts.length;
+  if (columns < 4 || columns % 2 !== 0 || xColumn !== 0) return false;
+  const [first] = facts;
+  if (!first) return false;
+  for (let i = 2; i < columns; i += 2) {
+    const fact = facts[i];
+    const label = labels[i] ?? '';
+    const named = isWavelengthWord(label) || xUnitFromText(label) !== undefined;
+    if (!fact) return false;
+    if (fact.numbers === 0) {
+      if (!named && (facts[i + 1]?.numbers ?? 0) > 0) return false;
+      continue;
+    }
+    if (named) continue;
+    if (fact.direction === 0 || !inRange(fact)) return false;
+    const reach =
+      (Math.min(fact.high, first.high) - Math.max(fact.low, first.low)) /
+      (Math.min(fact.high - fact.low, first.high - first.low) || 1);
+    if (!(reach > 0.3) && fact.numbers > 1) return false;
+  }
+  return true;
+}

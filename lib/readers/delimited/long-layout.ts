@@ -1,0 +1,99 @@
+import type { LayoutContext } from './layout-context';
+import { seriesPoints, type Series } from './series';
+
+/** Fewer points than this under one name are readings, not spectra. */
+const SHORTEST = 3;
+
+/** Columns that say which spectrum a row belongs to. */
+export interface LongKeys {
+  readonly keys: readonly number[];
+  readonly ordinates: readonly number[];
+}
+
+/**
+ * A long table has one reading a row: x repeats, and one or more other columns say whose it is. Those are the columns
+ * of text, and if x still repeats under them, columns of numbers that keep still while x runs.
+ */
+export function findLongKeys(context: LayoutContext, xColumn: number): LongKeys | undefined {
+  const { table, columns } = context;
+  const x = table.columns[xColumn]?.values;
+  if (!x || x.length < 2 * SHORTEST || new Set(x).size === x.length) return undefined;
+  const texts = columns.flatMap((_, i) =>
+    i !== xColumn && (table.columns[i]?.texts ?? 0) > (table.columns[i]?.numbers ?? 0) ? [i] : [],
+  );
+  const still = columns.flatMap((fact, i) =>
+    i !== xColumn && !texts.includes(i) && fact.numbers === fact.rows && keepsStill(table.columns[i]?.values)
+      ? [i]
+      : [],
+  );
+  for (let used = 0; used <= still.length; used++) {
+    const keys = [...texts, ...still.slice(0, used)];
+    if (keys.length === 0) continue;
+    const groups = groupRows(context, keys);
+    if (groups.size < 2 || !distinctWithin(groups, x)) continue;
+    const ordinates = columns.flatMap((fact, i) =>
+      i !== xColumn && !keys.includes(i) && !still.includes(i) && fact.numbers > 0 && !fact.isIndex
+        ? [i]
+        : [],
+    );
+    return ordinates.length > 0 ? { keys, ordinates } : undefined;
+  }
+  return undefined;
+}
+
+/** A number that names a spectrum changes far more seldom than once in three rows. */
+function keepsStill(values: Float64Array | undefined): boolean {
+  if (!values) return false;
+  let changes = 0;
+  for (let i = 1; i < values.length; i++) if (values[i] !== values[i - 1]) changes += 1;
+  return changes > 0 && changes * SHORTEST <= values.length;
+}
+
+function groupRows(context: LayoutContext, keys: readonly number[]): Map<string, number[]> {
+  const groups = new Map<string, number[]>();
+  for (let row = 0; row < context.table.rows.length; row++) {
+    const key = keys.map((column) => cellOf(context, column, row)).join(' ');
+    const rows = groups.get(key);
+    if (rows) rows.push(row);
+    else groups.set(key, [row]);
+  }
+  return groups;
+}
+
+function cellOf(context: LayoutContext, column: number, row: number): string {
+  const cells = context.table.columns[column];
+  return (cells?.odd.get(row)?.text ?? String(cells?.values[row] ?? '')).replace(/^"|"$/g, '');
+}
+
+function distinctWithin(groups: ReadonlyMap<string, readonly number[]>, x: Float64Array): boolean {
+  for (const rows of groups.values()) {
+    if (rows.length < SHORTEST || new Set(rows.map((row) => x[row])).size !== rows.length) return false;
+  }
+  return true;
+}
+
+/** The spectra of a long table, in the order in which they first appear. */
+export function longSeries(context: LayoutContext, xColumn: number, long: LongKeys): Series[] {
+  const { table, heading } = context;
+  const x = table.columns[xColumn];
+  if (!x) return [];
+  const series: Series[] = [];
+  for (const [key, rows] of groupRows(context, long.keys)) {
+    for (const column of long.ordinates) {
+      const y = table.columns[column];
+      if (!y) continue;
+      const label = heading.labels[column] ?? '';
+      series.push({
+        name: long.ordinates.length > 1 && label !== '' ? `${key} ${label}` : key,
+        xLabel: heading.labels[xColumn] ?? '',
+        yLabel: label,
+        ...seriesPoints(x, y, rows, table.rows),
+        line: table.rows[rows[0] ?? 0] ?? 0,
+        header: Object.fromEntries(
+          long.keys.map((k) => [heading.labels[k] || `column ${k + 1}`, cellOf(context, k, rows[0] ?? 0)]),
+        ),
+      });
+    }
+  }
+  return series;
+}

@@ -1,0 +1,228 @@
+import { finishSpectrum } from '../inspect/finish-spectrum';
+import { UNIT_WORDS } from '../inspect/spectrum-draft';
+import { distinctNames } from '../distinct-names';
+import { linesText, splitLines, type TextLines } from '../text-lines';
+import {
+  ReaderError,
+  type Question,
+  type ReadOptions,
+  type ReadResult,
+  type ReadSpectrum,
+  type ReaderWarning,
+} from '../types';
+import { analyseTable, type AnalysedTable } from './analyse-table';
+import { blockScore } from './blocks';
+import { commaDoubt } from './decimal-commas';
+import { decideDialect, type Decision } from './decide-dialect';
+import { describeReading } from './describe';
+import { headerFacts, type HeaderFacts } from './header-facts';
+import { mergeBlocks, type MergedBlock } from './merge-blocks';
+import { readingsTable } from './not-a-spectrum';
+import { judgeXUnit, seriesToDraft } from './series-to-draft';
+import { chooseTables } from './choose-tables';
+
+const NO_TABLE =
+  'This text holds no table of numbers: at least one row with a wavelength and a reading is needed. Export the spectrum again, with its points.';
+
+/**
+ * Read a table of numbers in plain text: any delimiter, either decimal mark, spectra in columns, pairs, rows, blocks
+ * or a long list. What stands before and after the table is kept as text and never read as numbers.
+ *
+ * @throws ReaderError NO_TABLE when there is no row of numbers
+ */
+export function readDelimited(
+  text: string,
+  fileName: string,
+  encoding: string,
+  options: ReadOptions,
+): ReadResult {
+  const lines = splitLines(text);
+  options.onSteps?.(text.length);
+  const asked = options.delimiter === ',' && options.decimalMark === ',';
+  const decision = decideDialect(lines, asked ? { ...options, decimalMark: '.' } : options);
+  if (!decision) throw new ReaderError('NO_TABLE', NO_TABLE);
+  const doubt = commaDoubt(lines, decision, options);
+  if (doubt) {
+    const reading = readDelimited(doubt.text, fileName, encoding, {
+      ...options,
+      delimiter: ';',
+      decimalMark: ',',
+    });
+    const settings = { ...reading.settings, delimiter: ',', decimalMark: ',' } as const;
+    return {
+      ...reading,
+      settings,
+      dialect: reading.dialect.replace('Semicolon', 'Comma'),
+      questions: asked ? reading.questions : [doubt.question, ...reading.questions],
+    };
+  }
+  if (asked && decision.best.fields > 0) {
+    const quoted = decideDialect(lines, options);
+    if (quoted) return readTables(lines, quoted, fileName, encoding, options);
+  }
+  return readTables(lines, decision, fileName, encoding, options);
+}
+
+function readTables(
+  lines: TextLines,
+  decision: Decision,
+  fileName: string,
+  encoding: string,
+  options: ReadOptions,
+): ReadResult {
+  const blocks = worthReading(mergeBlocks(lines, decision));
+  const global = headerFacts(linesText(lines, 0, blocks[0]?.rows[0] ?? 0));
+  const tables = blocks.map((block, k) => {
+    const above = k === 0 ? -1 : lastRow(blocks[k - 1]);
+    const local =
+      k === 0 ? global : joinFacts(global, headerFacts(linesText(lines, above + 1, block.rows[0] ?? 0)));
+    return analyseTable(lines, decision, block, above, local, options, fileName);
+  });
+  const chosen = chooseTables(tables, options);
+  refuseProse(lines, tables, chosen.tables);
+  return buildResult(
+    lines,
+    decision,
+    chosen.tables,
+    tables,
+    chosen.questions,
+    chosen.warnings,
+    encoding,
+    options,
+  );
+}
+
+/** The largest block and every other that could be a table beside it; stray lines of numbers are none. */
+function worthReading(blocks: readonly MergedBlock[]): MergedBlock[] {
+  let most = 0;
+  for (const block of blocks) most = Math.max(most, blockScore(block));
+  return blocks.filter(
+    (block) => blockScore(block) === most || (block.rows.length >= 3 && blockScore(block) >= 0.02 * most),
+  );
+}
+
+function lastRow(block: MergedBlock | undefined): number {
+  return block?.rows[block.rows.length - 1] ?? -1;
+}
+
+function joinFacts(global: HeaderFacts, local: HeaderFacts): HeaderFacts {
+  const xUnit = local.xUnit ?? global.xUnit;
+  return {
+    records: { ...global.records, ...local.records },
+    declared: local.declared.length > 0 ? local.declared : global.declared,
+    missing: [...global.missing, ...local.missing],
+    ...(xUnit ? { xUnit } : {}),
+    signalText: local.signalText || global.signalText,
+    sample: local.sample || global.sample,
+  };
+}
+
+/** Running text with a few numbers in it is no table, though some line may look like a row. */
+function refuseProse(
+  lines: TextLines,
+  tables: readonly AnalysedTable[],
+  chosen: readonly AnalysedTable[],
+): void {
+  const [first] = chosen.length > 0 ? chosen : tables;
+  const rows = first?.context.table.rows.length ?? 0;
+  if (rows >= 3 || lines.count <= 10) {
+    if (rows > 1 || (first?.context.columns.length ?? 0) > 1) return;
+  }
+  const headed = first?.context.heading.labels.some((label) => label !== '');
+  if (rows === 0 || !headed || first?.xColumn === undefined) throw new ReaderError('NO_TABLE', NO_TABLE);
+}
+
+function buildResult(
+  lines: TextLines,
+  decision: Decision,
+  chosen: readonly AnalysedTable[],
+  all: readonly AnalysedTable[],
+  tableQuestions: readonly Question[],
+  tableWarnings: readonly ReaderWarning[],
+  encoding: string,
+  options: ReadOptions,
+): ReadResult {
+  const spectra: ReadSpectrum[] = [];
+  const questions: Question[] = [...tableQuestions];
+  const warnings: ReaderWarning[] = [...tableWarnings];
+  for (const table of chosen) {
+    const unit = judgeXUnit(table.series, table.context.header, options);
+    if (unit.question) questions.push(unit.question);
+    questions.push(...table.questions);
+    warnings.push(...table.warnings);
+    const missing = table.context.header.missing;
+    const withMissing =
+      missing.length > 0 && options.missingValues === undefined
+        ? { ...options, missingValues: missing }
+        : options;
+    for (const series of table.series) {
+      const finished = finishSpectrum(
+        seriesToDraft(series, unit, table.context.header, options, all.indexOf(table)),
+        withMissing,
+      );
+      spectra.push(...finished.spectra);
+      questions.push(...finished.questions);
+    }
+  }
+  const [first] = chosen;
+  const [top] = all;
+  const other =
+    spectra.length === 0
+      ? (first ?? top)?.notASpectrum
+      : first && spectra.every((one) => one.x.length <= 2)
+        ? readingsTable(first.context)
+        : undefined;
+  const start = top?.context.heading.firstLine ?? 0;
+  const last = all[all.length - 1]?.context.table.rows.at(-1) ?? lines.count - 1;
+  const settings = settingsOf(decision, first, spectra, options);
+  return {
+    reader: 'delimited',
+    readerVersion: '1',
+    dialect: describeReading(decision.dialect, encoding, first, spectra),
+    spectra: distinctNames(spectra),
+    headerText: linesText(lines, 0, top?.context.table.rows[0] ?? start),
+    trailerText: linesText(lines, last + 1, lines.count).trim(),
+    warnings,
+    questions: oneOfEach(questions),
+    ...(other ? { notASpectrum: other } : {}),
+    settings,
+    shape: [
+      'delimited',
+      decision.dialect.delimiter,
+      decision.dialect.decimalMark,
+      first?.orientation ?? 'none',
+      first?.orientation === 'rows' ? 'rows' : (first?.context.columns.length ?? 0),
+      first?.context.heading.labels[first.xColumn ?? 0] ?? '',
+      spectra[0] ? UNIT_WORDS[spectra[0].xUnit] : '',
+    ].join('|'),
+  };
+}
+
+function settingsOf(
+  decision: Decision,
+  table: AnalysedTable | undefined,
+  spectra: readonly ReadSpectrum[],
+  options: ReadOptions,
+): ReadOptions {
+  const { onSteps: _unused, ...given } = options;
+  const [spectrum] = spectra;
+  return {
+    ...given,
+    delimiter: decision.dialect.delimiter,
+    decimalMark: decision.dialect.decimalMark,
+    ...(table ? { orientation: table.orientation } : {}),
+    ...(table?.xColumn === undefined ? {} : { xColumn: table.xColumn }),
+    ...(spectrum ? { xUnit: spectrum.xUnit } : {}),
+  };
+}
+
+/** Twenty columns with the same question ask once; the first message stands for all. */
+function oneOfEach(questions: readonly Question[]): Question[] {
+  const seen = new Set<string>();
+  return questions.filter((question) => {
+    const key = `${question.code}|${question.choices.map((choice) => choice.label).join('|')}`;
+    if (seen.has(key)) return false;
+    seen.add(key);
+    return true;
+  });
+}
