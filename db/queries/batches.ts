@@ -1,0 +1,167 @@
+import { AppError } from '@/lib/errors';
+import type { Actor } from '@/lib/policies/actor';
+import type { NewBatch, VoidBatch } from '@/lib/schemas/batch';
+import type { Page, PageQuery } from '@/lib/schemas/page-query';
+import type { BatchMethodView, BatchSummary, BatchView } from '@/lib/views/batch';
+import { changeFor, createFor, listFor, loadFor, may } from '../access';
+import { curvesOfBatches, usableCurve } from '../batch-curves';
+import { makerOf, readingsOf } from '../determination-rows';
+import type { BatchRow, ReadingRow } from '../models/batches';
+import { pageOf } from '../page';
+import { recordEvent } from '../record';
+import { inTransaction } from '../sequelize';
+import { idOfSubmission, keyOfContent } from '../submission';
+import { batchSummary } from '../views/batch';
+import { determinationView, readingView } from '../views/determination';
+import { curveRequestOf } from './curves';
+
+/** How many samples that are not void stand in each of some batches. */
+async function sampleCounts(actor: Actor, notebookId: string, batchId: readonly string[]) {
+  const rows = await listFor(actor, 'determination', notebookId, {
+    where: { batchId: [...batchId], voidedAt: null },
+    attributes: ['id', 'batchId'],
+  });
+  const counts = new Map<string, number>();
+  for (const row of rows) counts.set(row.batchId, (counts.get(row.batchId) ?? 0) + 1);
+  return counts;
+}
+
+async function summaries(
+  actor: Actor,
+  notebookId: string,
+  rows: readonly BatchRow[],
+): Promise<BatchSummary[]> {
+  const curves = await curvesOfBatches(
+    actor,
+    notebookId,
+    rows.map((row) => row.curveId),
+  );
+  const counts = await sampleCounts(
+    actor,
+    notebookId,
+    rows.map((row) => row.id),
+  );
+  return rows.flatMap((row) => {
+    const curve = curves.get(row.curveId);
+    return curve ? [batchSummary(row, curve, counts.get(row.id) ?? 0)] : [];
+  });
+}
+
+/** The batches of a notebook, newest first, every version of each. @throws AppError NOT_FOUND */
+export async function listBatches(
+  actor: Actor,
+  notebookId: string,
+  query: PageQuery,
+): Promise<Page<BatchSummary>> {
+  const page = await pageOf(
+    query,
+    (part) => listFor(actor, 'batch', notebookId, part as object),
+    (row) => row,
+  );
+  return { items: await summaries(actor, notebookId, page.items), nextCursor: page.nextCursor };
+}
+
+async function methodOf(actor: Actor, curveId: string): Promise<BatchMethodView> {
+  const curve = await loadFor(actor, 'curve', 'read', curveId);
+  const method = await loadFor(actor, 'method', 'read', curve.methodId);
+  const request = await curveRequestOf(actor, curveId);
+  return {
+    analyte: method.analyte,
+    basis: method.basis,
+    unit: request.unit,
+    wavelengthNm: method.wavelengthNm,
+    readingRule: method.readingRule,
+    pathLengthMm: method.pathLengthMm,
+    confidence: method.confidence,
+    absorbanceLimit: method.absorbanceLimit,
+    signal: request.signal,
+    hazardNote: method.hazardNote,
+    range: curve.result.curve.range,
+  };
+}
+
+async function determinationsOf(actor: Actor, batch: BatchRow) {
+  const rows = await listFor(actor, 'determination', batch.notebookId, {
+    where: { batchId: batch.id },
+    order: [['position', 'ASC']],
+  });
+  const ofEach = new Map<string | null, ReadingRow[]>();
+  for (const reading of await readingsOf(
+    actor,
+    batch.notebookId,
+    rows.map((row) => row.id),
+  ))
+    ofEach.set(reading.determinationId, [...(ofEach.get(reading.determinationId) ?? []), reading]);
+  return rows.map((row) => determinationView(row, (ofEach.get(row.id) ?? []).map(readingView)));
+}
+
+/** A batch with its samples, what came out, and the versions before and after it. @throws AppError NOT_FOUND */
+export async function loadBatch(actor: Actor, id: string): Promise<BatchView> {
+  const row = await loadFor(actor, 'batch', 'read', id);
+  const [[summary], method, determinations, versions] = await Promise.all([
+    summaries(actor, row.notebookId, [row]),
+    methodOf(actor, row.curveId),
+    determinationsOf(actor, row),
+    listFor(actor, 'batch', row.notebookId, {
+      where: { lineageId: row.lineageId },
+      attributes: ['id', 'version', 'supersedesId'],
+    }),
+  ]);
+  if (!summary) throw new AppError('NOT_FOUND');
+  const placeOf = (version: BatchRow | undefined) =>
+    version ? { id: version.id, version: version.version } : null;
+  return {
+    ...summary,
+    method,
+    determinations,
+    mayEdit: await may(actor, 'batch', 'edit', row),
+    supersedes: placeOf(versions.find((version) => version.id === row.supersedesId)),
+    supersededBy: placeOf(versions.find((version) => version.supersedesId === row.id)),
+  };
+}
+
+/** A batch on a curve of the same notebook; the same form sent twice makes one. @throws AppError */
+export function createBatch(actor: Actor, input: NewBatch): Promise<{ id: string }> {
+  return inTransaction(async () => {
+    const { notebookId, curveId, title, note } = input;
+    const id = idOfSubmission(actor, keyOfContent(input.submissionKey, [notebookId, curveId, title, note]));
+    const notebook = await loadFor(actor, 'notebook', 'edit', notebookId);
+    const [sent] = await listFor(actor, 'batch', notebookId, { where: { id } });
+    if (sent) return { id };
+    await usableCurve(actor, notebookId, curveId);
+    const createdById = makerOf(actor, notebook.ownerId);
+    const values = { id, notebookId, curveId, lineageId: id, version: 1, supersedesId: null, title, note };
+    await createFor(actor, 'batch', { ...values, status: 'open', createdById });
+    return { id };
+  });
+}
+
+/** Declare a batch void; it stays to be seen. @throws AppError NOT_FOUND, NOT_ALLOWED, CHANGED_MEANWHILE */
+export function voidBatch(actor: Actor, { batchId, reason }: VoidBatch): Promise<void> {
+  return inTransaction(async () => {
+    const row = await loadFor(actor, 'batch', 'edit', batchId);
+    if (row.status === 'void')
+      throw new AppError('CHANGED_MEANWHILE', `This batch is void already: ${row.voidReason ?? ''}`);
+    if (row.status === 'superseded')
+      throw new AppError(
+        'CHANGED_MEANWHILE',
+        'A newer version of this batch was made meanwhile. Void that one',
+      );
+    await changeFor(actor, row, { status: 'void', voidReason: reason }, reason);
+  });
+}
+
+/** Note in the record that the results of a batch left the notebook as a file. @throws AppError NOT_FOUND */
+export function recordExport(actor: Actor, batchId: string, format: string): Promise<void> {
+  return inTransaction(async () => {
+    const row = await loadFor(actor, 'batch', 'read', batchId);
+    await recordEvent(actor, {
+      kind: 'batch',
+      verb: 'exported',
+      notebookId: row.notebookId,
+      subjectId: row.id,
+      subjectName: row.title,
+      to: { format },
+    });
+  });
+}
