@@ -187,8 +187,8 @@ export async function uploadSourceFile(
   const { here } = await sameBytes(actor, notebookId, sha256);
   if (here) return alreadyHere(actor, here);
   const prepared = await readOrRefuse(actor, notebookId, upload, name);
-  const { dialect, questions } = prepared.result;
-  if (questions.length > 0 && !upload.acceptProposal) return { verdict: 'asks', dialect, questions };
+  const { dialect, questions, shape } = prepared.result;
+  if (questions.length > 0 && !upload.acceptProposal) return { verdict: 'asks', dialect, shape, questions };
   const packed = await packBytes(upload.bytes);
   const values = fileValues(notebookId, name, upload, sha256, prepared);
   return inTransaction(() => store(actor, values, packed, prepared.spectra));
@@ -242,9 +242,14 @@ export async function listRefusedUploads(
   }));
 }
 
-/** @throws AppError NOT_FOUND */
-export async function getSourceFile(actor: Actor, id: string): Promise<SourceFileDetail> {
+/** One file; with `notebookId` only when it is in that notebook. @throws AppError NOT_FOUND */
+export async function getSourceFile(
+  actor: Actor,
+  id: string,
+  notebookId?: string,
+): Promise<SourceFileDetail> {
   const file = await loadFor(actor, 'sourceFile', 'read', id);
+  if (notebookId !== undefined && file.notebookId !== notebookId) throw new AppError('NOT_FOUND');
   const spectra = await spectraOfFiles(actor, [file]);
   const names = await namesOf([file.createdById]);
   return {
@@ -268,4 +273,10 @@ export interface SourceBytes {
 export async function readSourceBytes(actor: Actor, id: string): Promise<SourceBytes> {
   const file = await loadFor(actor, 'sourceFile', 'read', id);
   return { name: file.name, sha256: file.sha256, ...(await unpackBytes(file)) };
+}
+
+/** Whether the stored bytes still give their hash; null when the file is larger than `upToBytes`. @throws AppError NOT_FOUND */
+export async function checkSourceBytes(actor: Actor, id: string, upToBytes: number): Promise<boolean | null> {
+  const file = await loadFor(actor, 'sourceFile', 'read', id);
+  return file.sizeBytes > upToBytes ? null : (await unpackBytes(file)).intact;
 }

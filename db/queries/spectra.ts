@@ -100,9 +100,10 @@ export async function pageOfSpectra(
   return { items: await views(actor, page.items), nextCursor: page.nextCursor };
 }
 
-/** @throws AppError NOT_FOUND */
-export async function getSpectrum(actor: Actor, id: string): Promise<SpectrumDetail> {
+/** One spectrum; with `notebookId` only when it is in that notebook. @throws AppError NOT_FOUND */
+export async function getSpectrum(actor: Actor, id: string, notebookId?: string): Promise<SpectrumDetail> {
   const row = await loadFor(actor, 'spectrum', 'read', id);
+  if (notebookId !== undefined && row.notebookId !== notebookId) throw new AppError('NOT_FOUND');
   return spectrumDetail(row, await loadFor(actor, 'sourceFile', 'read', row.sourceFileId));
 }
 

@@ -61,4 +61,10 @@ export type UploadOutcome =
       readonly sourceFile: SourceFileView;
       readonly spectra: readonly SpectrumView[];
     }
-  | { readonly verdict: 'asks'; readonly dialect: string; readonly questions: readonly Question[] };
+  | {
+      readonly verdict: 'asks';
+      readonly dialect: string;
+      /** Files of one shape carry the same text, so that one answer serves all. */
+      readonly shape: string;
+      readonly questions: readonly Question[];
+    };

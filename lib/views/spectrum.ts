@@ -42,6 +42,13 @@ export interface SpectrumDetail extends SpectrumView {
   readonly sha256: string;
 }
 
+/** What a curve or a batch of the notebook uses a spectrum as. */
+export interface SpectrumUse {
+  readonly role: 'standard' | 'sample' | 'blank';
+  /** Of a standard, in its curve's unit. */
+  readonly concentration?: number;
+}
+
 /** A spectrum ready for a plot: nm ascending, absorbance, null at each gap. */
 export interface SpectrumPointsView {
   readonly id: string;

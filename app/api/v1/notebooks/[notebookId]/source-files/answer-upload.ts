@@ -7,11 +7,11 @@ import { json, problem } from '@/app/_server/route';
 export async function answerUpload(request: Request, outcome: UploadOutcome): Promise<Response> {
   if (outcome.verdict !== 'asks')
     return json(request, outcome, { status: outcome.verdict === 'stored' ? 201 : 200 });
-  const { questions, dialect } = outcome;
+  const { questions, dialect, shape } = outcome;
   const sentence = questions[0]?.message ?? 'This file can be read in more than one way';
   const document = (await problem(409, 'QUESTION', sentence).json()) as object;
   return Response.json(
-    { ...document, dialect, questions },
+    { ...document, dialect, shape, questions },
     { status: 409, headers: { 'content-type': 'application/problem+json', 'cache-control': 'no-store' } },
   );
 }
