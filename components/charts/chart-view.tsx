@@ -2,7 +2,6 @@
 
 import { useEffect, useId, useRef, useState, type ComponentType, type ReactNode } from 'react';
 
-import type { ChartModel } from './chart-model';
 import type { PlotlyPlotProps } from './plotly-plot';
 import { StaticChart } from './static-chart';
 

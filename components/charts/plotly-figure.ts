@@ -1,4 +1,4 @@
-import type { Config, Data, Layout } from 'plotly.js-dist-min';
+import type { Data, Layout } from 'plotly.js-dist-min';
 
 import { paintColour, type Palette } from './chart-colour';
 import { bottomMargin, MARGIN, type ChartDash, type ChartModel, type ChartPoint } from './chart-model';
@@ -46,6 +46,9 @@ export function plotlyFigure(
       modebar: { bgcolor: 'rgba(0,0,0,0)', color: palette['ink-2'], activecolor: palette.uv },
       // keeps a person's zoom while the numbers under it change
       uirevision: model.title,
+      // a band drawn by hand becomes the marker; Plotly's own frame around it goes
+      selections: [],
+      selectionrevision: JSON.stringify(model.markers),
       xaxis: axis(model.x, palette, 6, {
         title: model.x.label,
         standoff: model.ribbon ? 14 : 6,
@@ -59,16 +62,21 @@ export function plotlyFigure(
   };
 }
 
-export const PLOTLY_CONFIG: Partial<Config> = {
+const CONFIG = {
   displaylogo: false,
   // Plotly's own button would upload the numbers to its maker's cloud
   showSendToCloud: false,
   responsive: true,
-  modeBarButtonsToRemove: ['lasso2d', 'autoScale2d'],
   toImageButtonOptions: { format: 'svg', filename: 'halflight-plot' },
   displayModeBar: 'hover',
   doubleClick: 'reset',
-} as Partial<Config>; // displayModeBar takes 'hover' in the schema, boolean in the types
+};
+
+/** Two fixed objects: a new one would make Plotly build the plot again. */
+export const PLOTLY_CONFIG = {
+  zooming: { ...CONFIG, modeBarButtonsToRemove: ['lasso2d', 'autoScale2d', 'select2d'] },
+  selecting: { ...CONFIG, modeBarButtonsToRemove: ['lasso2d', 'autoScale2d'] },
+} satisfies Record<string, object>;
 
 function axis(
   { min, max }: { min: number; max: number },

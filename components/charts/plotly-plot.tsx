@@ -54,7 +54,7 @@ export function PlotlyPlot({ model, onPick, onSelectX, onReady }: PlotlyPlotProp
     <Plot
       data={figure.data}
       layout={figure.layout}
-      config={PLOTLY_CONFIG}
+      config={dragSelects ? PLOTLY_CONFIG.selecting : PLOTLY_CONFIG.zooming}
       useResizeHandler
       style={{ width: '100%', height: model.height }}
       onInitialized={onReady}
