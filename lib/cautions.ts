@@ -7,7 +7,7 @@ export interface Caution {
 export const CAUTIONS: readonly Caution[] = [
   {
     title: 'Not for diagnosis or treatment',
-    text: 'Halflight is no medical device. Its results are for research and for the control of quality; nobody may be diagnosed or treated by them.',
+    text: 'Halflight is not a medical device. Use its results for research and quality control, never to diagnose or treat anybody.',
   },
   {
     title: 'The official text comes first',
@@ -51,6 +51,6 @@ export const CAUTIONS: readonly Caution[] = [
   },
 ];
 
-/** The same in a line, for a reader who comes by a link. */
+/** The same in a line, at the foot of every page, also for a reader who comes by a link. */
 export const CAUTION_LINE =
   'For research and quality control, not for diagnosis. Official methods, local codes and licensed practice come first.';

@@ -25,7 +25,7 @@ const worksIn = (a: Actor, n: NotebookFacts) =>
   a.canWrite &&
   !n.archived &&
   (system(a) || (a.role !== 'viewer' && (owns(a, n) || membership(a, n) === 'contributor')));
-const runs = (a: Actor, n: NotebookFacts) => a.canWrite && (system(a) || owns(a, n));
+const runs = (a: Actor, n: NotebookFacts) => a.canWrite && (system(a) || (a.role !== 'viewer' && owns(a, n)));
 const nobody = () => false;
 
 /** Everything inside a notebook follows the notebook: whoever reads it reads all of it. */
@@ -53,7 +53,8 @@ export const RULES = {
   determination: CONTENT,
   reading: CONTENT,
   membership: {
-    read: (a: Actor, n: NotebookFacts) => a.kind !== 'link' && reads(a, n),
+    /** Not by a link: whom else a notebook is shared with is not the business of whoever holds one. */
+    read: (a: Actor, n: NotebookFacts) => system(a) || owns(a, n) || membership(a, n) !== undefined,
     create: runs,
     edit: runs,
   },
