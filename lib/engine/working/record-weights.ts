@@ -16,7 +16,8 @@ export function recordWeights(
   if (data.w.every((w) => w === 1)) return null;
   const byFormula = request.weighting in VARIANCE_FORMULA;
   const constant = request.weighting === 'none';
-  const allY = ids.map((id) => id.y);
+  const everything = [...new Set(ids.flatMap((id) => [id.x, id.y, id.l]))];
+  const ofLevel = (x: number) => ids.filter((_, i) => data.x[i] === x).flatMap((id) => [id.y, id.l]);
   active.forEach((point, i) => {
     const text = {
       id: `${point.id}.variance`,
@@ -30,7 +31,11 @@ export function recordWeights(
       const formula = VARIANCE_FORMULA[request.weighting as keyof typeof VARIANCE_FORMULA];
       ledger.line(text, formula, { x: ids[i]?.x ?? '' }, value);
     } else if (request.weighting === 'given') ledger.solved(text, '1 / w as given', [], value);
-    else ledger.solved(text, VARIANCE_WORDS[request.weighting] ?? '', allY, value);
+    else {
+      const inputs =
+        request.weighting === 'replicates' ? [...new Set(ofLevel(point.concentration))] : everything;
+      ledger.solved(text, VARIANCE_WORDS[request.weighting] ?? '', inputs, value);
+    }
   });
   const terms = active.map((point, i) => ({ l: ids[i]?.l ?? '', v: `${point.id}.variance` }));
   ledger.solved(

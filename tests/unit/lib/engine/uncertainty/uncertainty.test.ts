@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest';
-import { volumeUncertainty } from '@/lib/engine';
+import { volumeUncertainty, type Ware } from '@/lib/engine';
 import { coverageFactor, effectiveDegreesOfFreedom } from '@/lib/engine/uncertainty/expand';
 import { expectDigits } from '../../../../support/digits';
 import { reference } from '../requests';
@@ -7,7 +7,7 @@ import { reference } from '../requests';
 describe('volumeUncertainty', () => {
   // Reference: EURACHEM/CITAC CG 4, example A1, unrounded (fixtures/reference/eurachem-cg4/SOURCE.md).
   test('agrees with the 100 mL flask of example A1', () => {
-    const { A1 } = reference<{ A1: { volumeMl: number; u: number } }>('eurachem-cg4');
+    const { A1 } = reference<{ A1: Ware & { volumeMl: number; u: number } }>('eurachem-cg4');
     expectDigits(volumeUncertainty(A1.volumeMl, A1), A1.u, 12);
   });
 

@@ -1,0 +1,23 @@
+import { expect, test } from 'vitest';
+import * as engine from '@/lib/engine';
+
+// A list our own code must keep: what the rest of the project may use of the engine.
+test('the engine exports these values and no others', () => {
+  expect(Object.keys(engine).sort()).toEqual([
+    'CONCENTRATION_UNITS',
+    'CONCENTRATION_UNIT_NAMES',
+    'ENGINE_ERRORS',
+    'ENGINE_VERSION',
+    'EngineError',
+    'FLAGS',
+    'absorbanceOf',
+    'calculateStandardCurve',
+    'convertConcentration',
+    'curveBand',
+    'isMolar',
+    'parseUnit',
+    'readSpectrum',
+    'transmittanceOf',
+    'volumeUncertainty',
+  ]);
+});
