@@ -50,7 +50,7 @@ interface Points {
  * @throws ReaderError EMPTY_TABLE, YFACTOR_ZERO, NOT_A_SPECTRUM (x is no wavelength, wavenumber or energy)
  */
 export function readTable(context: TableContext): SpectrumDraft {
-  const { lines, block, record, options } = context;
+  const { block, record, options } = context;
   const form = record.value || '(X++(Y..Y))';
   const header = tableHeader(block, form);
   refuseOtherAxis(header.xText, record.line, options);
