@@ -115,7 +115,7 @@ export interface ChartLabel {
   y: number;
   text: string;
   colour: ChartColour;
-  side: 'right' | 'left';
+  side: 'right' | 'left' | 'above-right';
 }
 
 /** Space around the plot, in px: the same for both drawings, so that nothing jumps when one replaces the other. */

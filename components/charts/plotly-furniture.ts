@@ -62,6 +62,7 @@ export function plotlyShapes(model: ChartModel, palette: Palette): Partial<Shape
 const SIDES: Record<ChartLabel['side'], Partial<Annotation>> = {
   right: { xanchor: 'left', yanchor: 'top', xshift: 6 },
   left: { xanchor: 'right', yanchor: 'bottom', xshift: -6 },
+  'above-right': { xanchor: 'left', yanchor: 'bottom', xshift: 6 },
 };
 
 function regionSentence(region: ChartRegion, palette: Palette): Partial<Annotation> {

@@ -31,6 +31,13 @@ export interface SpectraModelInput {
 }
 
 const USUAL_PLOT_WIDTH_PX = 700;
+const NARROW_PLOT_WIDTH_PX = 290;
+const LETTER_PX = 6.6;
+
+/** Px between the y axis and a wavelength on a telephone, the narrowest place a plot is read in. */
+function roomLeft(nm: number, x: { min: number; max: number }): number {
+  return (NARROW_PLOT_WIDTH_PX * (nm - x.min)) / (x.max - x.min);
+}
 
 /** Spectra over each other, with the region above the absorbance limit and the chosen wavelength. */
 export function spectraModel({
@@ -51,8 +58,9 @@ export function spectraModel({
     const spectrum = spectra[i];
     if (!peak || !spectrum || spectrum.role === 'blank') return [];
     const colour = looks.get(spectrum.id)?.colour ?? 'ink';
-    const side = peak.atNm > x.min + 0.15 * (x.max - x.min) ? 'left' : 'right';
-    return [{ x: peak.atNm, y: peak.highest, text: shortName(spectrum.name), colour, side }];
+    const text = shortName(spectrum.name);
+    const side = roomLeft(peak.atNm, x) > text.length * LETTER_PX + 12 ? 'left' : 'above-right';
+    return [{ x: peak.atNm, y: peak.highest, text, colour, side }];
   });
   return {
     title:

@@ -38,6 +38,7 @@ export function StaticPoints({ model, scale }: Part) {
 const SIDES: Record<ChartLabel['side'], { dx: number; dy: number; anchor: 'start' | 'middle' | 'end' }> = {
   right: { dx: 10, dy: 14, anchor: 'start' },
   left: { dx: -10, dy: -8, anchor: 'end' },
+  'above-right': { dx: 10, dy: -4, anchor: 'start' },
 };
 
 /** Words at their things, with a rim of sheet so that a line behind them does not cut through. */

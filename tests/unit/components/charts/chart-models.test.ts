@@ -64,6 +64,14 @@ describe('spectraModel', () => {
     });
     expect(model.markers).toEqual([{ x: 510, halfWidth: 1, label: '510 ± 1 nm' }]);
   });
+  test('names a peak on the side where there is room for its name, on a telephone too', () => {
+    const rangeNm = { from: 490, to: 520 };
+    const sides = ['S1', 'A long sample name'].map((name) => {
+      const spectra = [spectrum('a', 1, { name })];
+      return spectraModel({ spectra, absorbanceLimit: 2, rangeNm, height: 400 }).labels[0]?.side;
+    });
+    expect(sides).toEqual(['left', 'above-right']);
+  });
   test('draws an empty visible range when there is no spectrum', () => {
     expect(spectraModel({ spectra: [], absorbanceLimit: 2, height: 400 }).x).toMatchObject({
       min: 380,
