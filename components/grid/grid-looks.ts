@@ -5,6 +5,8 @@ import type { CellLook } from './grid-cell';
 
 /** What the page around a grid adds to its cells. */
 export interface Looks {
+  /** Text shown in a read-only cell in place of its own. */
+  shown?: (row: GridRow, column: GridColumn) => string | undefined;
   /** A sentence about a cell beyond what its column already says. */
   problem?: (row: GridRow, column: GridColumn, index: number) => string | undefined;
   /** Why a cell is left out; it is then struck through. */
@@ -19,7 +21,7 @@ export function lookOf(
   index: number,
   looks: Looks,
 ): { look: CellLook; sentence?: string } {
-  const text = row.cells[index] ?? '';
+  const text = looks.shown?.(row, column) ?? row.cells[index] ?? '';
   const content = cellContent(column, text);
   const problem =
     (content.state === 'bad' ? content.message : undefined) ?? looks.problem?.(row, column, index);

@@ -24,18 +24,23 @@ export interface ReadingsGridProps extends Looks {
   addColumnLabel?: string;
 }
 
-/** Keeps the focus on the cell at the cursor after the grid itself has moved it there. */
-function useCellFocus(state: GridState) {
-  const table = useRef<HTMLTableElement>(null);
-  const wanted = useRef(false);
+/** Sends changes after which the focus follows the cursor of the grid. */
+function useFollowingFocus(state: GridState, dispatch: Dispatch<GridAction>) {
+  const tableRef = useRef<HTMLTableElement>(null);
+  const wantedRef = useRef(false);
   const typing = state.draft !== null;
   useLayoutEffect(() => {
-    if (!wanted.current) return;
-    wanted.current = false;
+    if (!wantedRef.current) return;
+    wantedRef.current = false;
     if (typing) return;
-    table.current?.querySelector<HTMLElement>(`[data-cell="${state.at.row}:${state.at.column}"]`)?.focus();
+    const place = `[data-cell="${state.at.row}:${state.at.column}"]`;
+    tableRef.current?.querySelector<HTMLElement>(place)?.focus();
   });
-  return { table, wanted };
+  function send(action: GridAction) {
+    wantedRef.current = true;
+    dispatch(action);
+  }
+  return { tableRef, send };
 }
 
 /**
@@ -45,13 +50,9 @@ function useCellFocus(state: GridState) {
  */
 export function ReadingsGrid({ label, spec, state, dispatch, addColumnLabel, ...looks }: ReadingsGridProps) {
   const id = useId();
-  const { table, wanted } = useCellFocus(state);
-  const released = useRef(false);
+  const { tableRef, send } = useFollowingFocus(state, dispatch);
+  const releasedRef = useRef(false);
   const columns = gridColumns(spec, state.width);
-  const send = (action: GridAction) => {
-    wanted.current = true;
-    dispatch(action);
-  };
 
   function onKeyDown(event: KeyboardEvent) {
     if (event.nativeEvent.isComposing) return;
@@ -61,8 +62,8 @@ export function ReadingsGrid({ label, spec, state, dispatch, addColumnLabel, ...
       shift: event.shiftKey,
       alt: event.altKey,
     };
-    const answer = keyAnswer(pressed, state, released.current);
-    if (event.key !== 'Shift') released.current = answer === 'release';
+    const answer = keyAnswer(pressed, state, releasedRef.current);
+    if (event.key !== 'Shift') releasedRef.current = answer === 'release';
     if (answer === null || answer === 'leave' || answer === 'release') return;
     event.preventDefault();
     send(answer);
@@ -92,7 +93,7 @@ export function ReadingsGrid({ label, spec, state, dispatch, addColumnLabel, ...
     <div className="grid gap-2">
       <div className="relative overflow-x-auto rounded-control border">
         <table
-          ref={table}
+          ref={tableRef}
           role="grid"
           aria-label={label}
           aria-multiselectable="true"

@@ -204,6 +204,8 @@ export function gridReducer(spec: GridSpec, state: GridState, action: GridAction
         ? changed(spec, state, { rows: state.rows, width: state.width + 1 })
         : state;
     }
+    case 'reset':
+      return gridOf(spec, action.rows);
     case 'replace':
       return {
         ...gridOf(spec, action.rows),

@@ -58,7 +58,8 @@ export type GridAction =
   | { readonly type: 'paste'; readonly text: string }
   | { readonly type: 'setCell'; readonly row: number; readonly column: number; readonly text: string }
   | { readonly type: 'addColumn' }
-  | { readonly type: 'replace'; readonly rows: readonly (readonly string[])[] };
+  /** `reset` forgets what could be undone: the rows are other things now. */
+  | { readonly type: 'replace' | 'reset'; readonly rows: readonly (readonly string[])[] };
 
 export const clamp = (value: number, low: number, high: number) => Math.min(Math.max(value, low), high);
 const isBlank = (row: GridRow) => row.cells.every((cell) => cell.trim() === '');

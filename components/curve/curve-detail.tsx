@@ -1,0 +1,101 @@
+import Link from 'next/link';
+import { Card } from '@/components/ui/card';
+import { Columns } from '@/components/ui/columns';
+import { RowHead, Table, Td, Th } from '@/components/ui/table';
+import { readingRuleWords } from '@/lib/curve/reading-rule-words';
+import { standardRows } from '@/lib/curve/standard-rows';
+import { formatDateTime } from '@/lib/format/dates';
+import type { CurveVersionView, CurveView } from '@/lib/views/curve';
+import { CurveFacts } from './curve-facts';
+import { CurveJudgements } from './curve-judgements';
+import { CurvePlots } from './curve-plots';
+import { CurveStatusNotice, CurveStatusPill, HazardNote } from './curve-status';
+import { MethodFacts } from './method-facts';
+import { StandardsTable } from './standards-table';
+
+/** How the readings came, for the line beside the title of the standards. */
+function originWords({ standards, method }: CurveView): string {
+  const readings = standards.flatMap((standard) => standard.readings);
+  const spectra = readings.filter(({ origin }) => origin === 'spectrum').length;
+  const from =
+    spectra === 0
+      ? 'typed'
+      : spectra === readings.length
+        ? `from spectra, ${readingRuleWords(method.readingRule)}`
+        : 'typed and from spectra';
+  return `${readings.length} readings, ${from}`;
+}
+
+function Versions({ curve, timeZone }: { curve: CurveView; timeZone: string }) {
+  const why = (version: CurveVersionView) =>
+    version.voidReason ?? version.reason ?? (version.version === 1 ? 'first version' : '');
+  return (
+    <Card flush title="Versions" aside="kept, and never changed">
+      <Table label="Versions of this curve">
+        <thead>
+          <tr>
+            <Th>Version</Th>
+            <Th>Status</Th>
+            <Th>Why</Th>
+            <Th>Saved</Th>
+          </tr>
+        </thead>
+        <tbody>
+          {curve.versions.map((version) => (
+            <tr key={version.id}>
+              <RowHead>
+                {version.id === curve.id ? (
+                  <span aria-current="true">Version {version.version}, shown here</span>
+                ) : (
+                  <Link
+                    className="text-uv underline-offset-2 hover:underline"
+                    href={`/notebooks/${curve.notebookId}/curves/${version.id}`}
+                  >
+                    Version {version.version}
+                  </Link>
+                )}
+              </RowHead>
+              <Td>
+                <CurveStatusPill curve={{ status: version.status, newer: null }} />
+              </Td>
+              <Td>{why(version)}</Td>
+              <Td className="text-sm whitespace-nowrap text-ink-2">
+                {formatDateTime(version.createdAt, timeZone)}, {version.createdBy}
+              </Td>
+            </tr>
+          ))}
+        </tbody>
+      </Table>
+    </Card>
+  );
+}
+
+/** Everything of a saved curve under its title. */
+export function CurveDetail({ curve, timeZone }: { curve: CurveView; timeZone: string }) {
+  const { method, standards, answer } = curve;
+  const spectrumHref = (id: string) => `/notebooks/${curve.notebookId}/spectra/${id}`;
+  return (
+    <div className="grid gap-4.5">
+      <CurveStatusNotice curve={curve} />
+      <HazardNote note={method.hazardNote} />
+      <CurveFacts curve={answer.curve} />
+      <Columns share="even">
+        <div className="grid min-w-0 gap-4.5">
+          <Card flush title="Standards" aside={originWords(curve)}>
+            <StandardsTable
+              rows={standardRows(standards, answer.curve)}
+              unit={method.unit}
+              spectrumHref={spectrumHref}
+            />
+          </Card>
+          <CurveJudgements curve={answer.curve} />
+          <MethodFacts curve={curve} />
+        </div>
+        <div className="grid min-w-0 gap-4.5">
+          <CurvePlots standards={standards} curve={answer.curve} />
+        </div>
+      </Columns>
+      <Versions curve={curve} timeZone={timeZone} />
+    </div>
+  );
+}
