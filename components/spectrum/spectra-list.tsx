@@ -25,7 +25,7 @@ const Row = memo(function Row({ spectrum, checked, onCheck }: RowProps) {
   return (
     <tr>
       <RowHead>
-        <span className="flex items-center gap-2.5">
+        <span className="flex min-w-40 items-center gap-2.5">
           <input
             type="checkbox"
             aria-label={`Plot ${name} of ${fileName}`}

@@ -43,7 +43,7 @@ function said(verdict: UploadVerdict): Said {
           )}
         </>
       );
-      return { tone: warning || other ? 'decide' : 'order', words };
+      return { tone: warning ? 'decide' : other ? 'note' : 'order', words };
     }
     case 'alreadyHere': {
       const { notebookId, id, name } = verdict.sourceFile;

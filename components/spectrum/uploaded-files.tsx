@@ -27,8 +27,8 @@ function Verdict({ warnings }: { warnings: SourceFileView['warnings'] }) {
 function Row({ head, found, verdict, hash }: Record<'head' | 'found' | 'verdict' | 'hash', ReactNode>) {
   return (
     <tr>
-      <RowHead className="max-w-64 break-all">{head}</RowHead>
-      <Td className="text-ink-2">{found}</Td>
+      <RowHead className="max-w-64 min-w-36 break-words">{head}</RowHead>
+      <Td className="whitespace-nowrap text-ink-2">{found}</Td>
       <Td className="min-w-64">{verdict}</Td>
       <Td numeric>{hash}</Td>
     </tr>

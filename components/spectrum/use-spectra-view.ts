@@ -19,9 +19,11 @@ export interface RuleState {
   readonly texts: RuleTexts;
   readonly rule: ReadingRule | null;
   readonly errors: Readonly<Record<string, string>>;
+  /** Nobody has said yet where to read. */
+  readonly untouched: boolean;
 }
 
-function ruleState(texts: RuleTexts): RuleState {
+function ruleState(texts: RuleTexts): Omit<RuleState, 'untouched'> {
   const parsed = spectrumRule.safeParse(texts);
   if (parsed.success) return { texts, rule: parsed.data, errors: {} };
   const errors = Object.fromEntries(
@@ -60,5 +62,14 @@ export function useSpectraView(spectra: readonly SpectrumView[]) {
     if (valid)
       put({ ...now(), keys: keys ?? chosen.map((spectrum) => spectrumKey(spectrum.id)), texts: next });
   }
-  return { chosen, aside, rule: ruleState(typed ?? texts), setRule, choose, showAside };
+  const rule = ruleState(typed ?? texts);
+  const untouched = typed === null && texts.at === '' && texts.from === '' && texts.to === '';
+  return {
+    chosen,
+    aside,
+    rule: { ...rule, untouched, errors: untouched ? {} : rule.errors },
+    setRule,
+    choose,
+    showAside,
+  };
 }

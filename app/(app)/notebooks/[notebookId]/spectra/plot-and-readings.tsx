@@ -1,6 +1,6 @@
 'use client';
 
-import { useMemo } from 'react';
+import { useEffect, useMemo } from 'react';
 import { SpectraChart } from '@/components/charts/spectra-chart';
 import { drawnSpectra } from '@/components/spectrum/drawn-spectra';
 import { ReadingRuleForm } from '@/components/spectrum/reading-rule-form';
@@ -55,13 +55,12 @@ export function PlotAndReadings({
 }) {
   const { data = [], error, mutate } = useSpectrumPoints(chosen.map((spectrum) => spectrum.id));
   const drawn = useMemo(() => drawnSpectra(chosen, data, uses), [chosen, data, uses]);
-  const suggested = suggestWavelength(data);
-  const untouched = state.texts.at === '' && state.texts.rule !== 'windowMaximum' && suggested !== null;
-  const texts = untouched ? { ...state.texts, at: nmText(suggested) } : state.texts;
-  const rule: ReadingRule | null =
-    untouched && state.texts.rule === 'interpolated' && state.texts.minus === ''
-      ? { kind: 'interpolated', wavelengthNm: suggested }
-      : state.rule;
+  const suggested = data.length === chosen.length ? suggestWavelength(data) : null;
+  const { rule } = state;
+  useEffect(() => {
+    // the address names the wavelength as soon as it is known, so that a link shows the same view for ever
+    if (state.untouched && suggested !== null) onRule({ ...state.texts, at: nmText(suggested) });
+  });
   const readings = rule
     ? chosen.flatMap((spectrum) => {
         const view = data.find((points) => points.id === spectrum.id);
@@ -90,16 +89,13 @@ export function PlotAndReadings({
           <SpectraChart
             spectra={drawn}
             chosen={markOf(rule)}
-            onPickWavelength={(nm) => onRule(atWavelength(texts, nm))}
-            onPickBand={(from, to) => onRule(overBand(texts, from, to))}
+            onPickWavelength={(nm) => onRule(atWavelength(state.texts, nm))}
+            onPickBand={(from, to) => onRule(overBand(state.texts, from, to))}
           />
         )}
       </Card>
       <Card flush title={rule ? ruleInWords(rule) : 'Readings'}>
-        <ReadingRuleForm
-          state={{ ...state, texts, errors: untouched ? {} : state.errors }}
-          onChange={onRule}
-        />
+        <ReadingRuleForm state={state} onChange={onRule} />
         {readings.length > 0 && (
           <div className="border-t">
             <ReadingsTable
