@@ -2,9 +2,9 @@ import { significantText } from '../format/round';
 import { slopeLooseness } from './calibration/fieller';
 import type { FittedCurve } from './fit-curve';
 import { fitModel } from './fit-curve';
-import { type Flag, flag } from './flags';
+import { type Flag, flag, type FlagCode } from './flags';
 import type { CurvePoint } from './prepare-points';
-import type { CurveRequest, LevelAnswer, PointAnswer } from './types';
+import type { CurveRequest, CurveResult, LevelAnswer, PointAnswer, TestAnswer } from './types';
 import { coverageFactor } from './uncertainty/expand';
 
 /** Above it the usual formula for u(c) is an approximation. */
@@ -17,6 +17,7 @@ export interface CurveFacts {
   readonly curve: FittedCurve;
   readonly points: readonly PointAnswer[];
   readonly levels: readonly LevelAnswer[];
+  readonly tests: CurveResult['tests'];
   readonly criticalValue: number;
 }
 
@@ -27,7 +28,8 @@ export function judgeCurve(facts: CurveFacts): readonly Flag[] {
     ...judgeStandards(curve.request, curve.points),
     ...judgeLeftOut(curve),
     ...judgeSlope(curve),
-    ...judgeIntercept(curve),
+    ...judgeIntercept(facts),
+    ...judgeTests(facts),
     ...judgeLevels(facts),
     ...judgeInfluence(facts),
   ];
@@ -79,17 +81,28 @@ function judgeSlope({ fit, request, data }: FittedCurve): Flag[] {
   return flags;
 }
 
-/** A line through zero is compared with the free line of the same points, when these allow one. */
-function judgeIntercept({ fit, data, range, request }: FittedCurve): Flag[] {
-  if (fit.model !== 'proportional' || new Set(data.x).size < 3) return [];
-  const free = fitModel('linear', data);
-  const a = free.coefficients[0] ?? 0;
-  const u = Math.sqrt(free.covariance[0]?.[0] ?? NaN);
-  const t = Math.abs(a) / u;
-  if (!(t > coverageFactor(request.confidence, free.degreesOfFreedom))) return [];
+/** A line through zero whose points ask for an intercept. */
+function judgeIntercept({ curve, tests }: CurveFacts): Flag[] {
+  const { fit, data, range } = curve;
+  if (fit.model !== 'proportional' || tests.intercept.reason !== undefined || tests.intercept.passed)
+    return [];
+  const a = fitModel('linear', data).coefficients[0] ?? 0;
   const lowestOff = (100 * a) / (range.min * (fit.coefficients[1] ?? NaN));
   const detail = `about ${significantText(lowestOff, 2)} % at the lowest standard`;
-  return [flag('INTERCEPT_NOT_ZERO', { value: a, limit: t, detail })];
+  return [flag('INTERCEPT_NOT_ZERO', { value: a, limit: Math.abs(tests.intercept.statistic), detail })];
+}
+
+function judgeTests({ curve, tests }: CurveFacts): Flag[] {
+  const fallen = (code: FlagCode, answer: TestAnswer): Flag[] =>
+    answer.reason !== undefined || answer.passed
+      ? []
+      : [flag(code, { value: answer.statistic, limit: answer.critical })];
+  return [
+    ...fallen('LACK_OF_FIT', tests.lackOfFit),
+    // A quadratic is the answer to a bend.
+    ...(curve.fit.model === 'quadratic' ? [] : fallen('CURVATURE', tests.mandel)),
+    ...fallen('VARIANCE_UNEVEN', tests.homogeneity),
+  ];
 }
 
 function judgeLevels({ curve, levels, criticalValue }: CurveFacts): Flag[] {

@@ -1,9 +1,14 @@
 import { calculateUnknown } from './calculate-unknown';
 import { type CriticalValue, criticalValue } from './calibration/critical-value';
+import { detectionLimits } from './calibration/detection-limits';
 import { molarAbsorptivity } from './calibration/molar-absorptivity';
 import { checkRequest } from './checks/check-request';
 import { levelAnswers, pointAnswers, relativeStandardErrorPercent } from './curve-points';
 import { fitCurve, type FittedCurve } from './fit-curve';
+import { homogeneity } from './hypothesis/homogeneity';
+import { interceptTest } from './hypothesis/intercept';
+import { lackOfFit } from './hypothesis/lack-of-fit';
+import { mandel } from './hypothesis/mandel';
 import { judgeCurve } from './judge-curve';
 import type { Fit } from './regression/fit';
 import type { CurveAnswer, CurveRequest, CurveResult, ValueWithU } from './types';
@@ -46,14 +51,18 @@ function coefficient(fit: Fit, i: number): ValueWithU {
   return { value: fit.coefficients[i] ?? NaN, u: Math.sqrt(fit.covariance[i]?.[i] ?? NaN) };
 }
 
-const NOT_YET = { reason: 'this test is not made by this version' };
-
 function curveResult(curve: FittedCurve, ledger: Ledger): CurveResult {
   const { fit, request, range } = curve;
   const epsilon = molarAbsorptivity(curve);
   const critical = criticalOfCurve(curve);
   const points = pointAnswers(curve);
   const levels = levelAnswers(curve);
+  const tests = {
+    lackOfFit: lackOfFit(curve),
+    mandel: mandel(curve),
+    intercept: interceptTest(curve),
+    homogeneity: homogeneity(curve),
+  };
   recordCurve(ledger, curve, epsilon);
   recordCritical(ledger, curve, critical, 'curve');
   return {
@@ -76,11 +85,11 @@ function curveResult(curve: FittedCurve, ledger: Ledger): CurveResult {
     criticalValue: critical.value,
     criticalValueReadings: critical.readings,
     ...(epsilon ? { molarAbsorptivity: epsilon } : {}),
-    tests: { lackOfFit: NOT_YET, mandel: NOT_YET, intercept: NOT_YET, homogeneity: NOT_YET },
-    limits: [],
+    tests,
+    limits: detectionLimits(curve, critical.readings),
     points,
     levels,
-    flags: judgeCurve({ curve, points, levels, criticalValue: critical.value }),
+    flags: judgeCurve({ curve, points, levels, tests, criticalValue: critical.value }),
     working: ledger.steps,
   };
 }

@@ -103,7 +103,9 @@ export type TestAnswer =
       readonly df1: number;
       readonly df2?: number;
       readonly p: number;
-      /** True when the test finds nothing against the curve. */
+      /** What the statistic is compared with. */
+      readonly critical: number;
+      /** True when the null hypothesis stands: no lack of fit, a straight line, no intercept, equal variances. */
       readonly passed: boolean;
       readonly verdict: string;
       readonly reason?: undefined;

@@ -2,7 +2,7 @@ import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { calculateStandardCurve, curveBand, type CurveRequest, type Weighting } from '@/lib/engine';
 import { expectDigits } from '../../../support/digits';
-import { request, unknown } from './requests';
+import { request, standardsOf, unknown } from './requests';
 
 /**
  * A believable curve: rising absorbances at rising concentrations, and one unknown among them. The scatter goes up
@@ -176,4 +176,18 @@ test('one reading of a standard left out', () => {
     curve.points.filter((point) => point.excluded).map((point) => [point.standardIndex, point.replicate]),
   ).toEqual([[0, 2]]);
   expect(curve.range.min).toBe(1);
+});
+
+test.each<[string, Partial<CurveRequest>]>([
+  ['points exactly on a line', { standards: standardsOf([1, 2, 4, 8], [0.125, 0.25, 0.5, 1]) }],
+  [
+    'an exact line forced through zero',
+    { model: 'proportional', standards: standardsOf([1, 2, 4, 8], [0.25, 0.375, 0.625, 1.125]) },
+  ],
+  ['a slope that is not proven', { standards: standardsOf([1, 2, 3, 4], [0.1, 0.3, 0.15, 0.35]) }],
+  ['nothing but a censored unknown', { unknowns: [unknown(['OVER'])] }],
+  ['three points', { standards: standardsOf([1, 2, 3], [0.1, 0.21, 0.3]) }],
+])('the answer for %s holds no number that JSON cannot carry', (_name, changes) => {
+  const answer = calculateStandardCurve(request({ unknowns: [unknown([0.3])], ...changes }));
+  expect(JSON.parse(JSON.stringify(answer))).toEqual(answer);
 });
