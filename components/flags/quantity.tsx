@@ -1,7 +1,7 @@
 import { classNames } from '@/components/ui/class-names';
-import { resultDigits } from '@/lib/batch/result-digits';
 import { unitWithBasis } from '@/lib/batch/unit-text';
-import type { UnknownResult } from '@/lib/engine';
+import type { ReportCase, UnknownResult } from '@/lib/engine';
+import { formatPlusMinus } from '@/lib/format/quantity';
 import { significantText } from '@/lib/format/round';
 
 /** "× 10" with its exponent set as one. */
@@ -14,9 +14,21 @@ export function PowerOfTen({ exponent }: { exponent: number }) {
   );
 }
 
-/** The words that stand where a result has no number. */
-function withoutNumber({ reportCase, report }: UnknownResult): string {
-  return reportCase === 'notQuantified' ? 'not quantified' : (report.split(';')[0] ?? report);
+const WITHOUT_NUMBER: Readonly<Partial<Record<ReportCase, string>>> = {
+  notQuantified: 'not quantified',
+  aboveTopStandard: 'above the top standard',
+};
+
+/** The words that stand where a result has no number, with the advice of a stop. */
+function WithoutNumber({ result, size }: { result: UnknownResult; size: string }) {
+  const { reportCase, report, advice } = result;
+  const words = WITHOUT_NUMBER[reportCase];
+  return (
+    <div>
+      <p className={classNames('font-medium', size, words === undefined && 'num')}>{words ?? report}</p>
+      {advice && <p className="text-red">Dilute {advice}</p>}
+    </div>
+  );
 }
 
 /**
@@ -36,20 +48,15 @@ export function Quantity({
   confidence: number;
   large?: boolean;
 }) {
-  const digits = resultDigits(result);
   const size = large ? 'text-title leading-tight' : 'text-fact';
   const { concentration } = result;
-  if (!digits || !concentration)
-    return (
-      <p className={classNames('font-medium', size, result.reportCase === 'belowCriticalValue' && 'num')}>
-        {withoutNumber(result)}
-      </p>
-    );
+  if (!concentration) return <WithoutNumber result={result} size={size} />;
+  const digits = formatPlusMinus(concentration.value, concentration.U);
   return (
     <div>
       <p className={classNames('num font-medium', size)}>
         {digits.exponent !== null && '('}
-        {digits.value} <span className="aside">± {digits.expanded}</span>
+        {digits.value} <span className="aside">± {digits.spread}</span>
         {digits.exponent !== null && ')'}
         {digits.exponent !== null && <PowerOfTen exponent={digits.exponent} />}{' '}
         <span className="aside font-sans text-sm">{unitWithBasis(unit, basis)}</span>

@@ -2,7 +2,7 @@ import { AppError } from '@/lib/errors';
 import type { Actor } from '@/lib/policies/actor';
 import type { NewBatch, VoidBatch } from '@/lib/schemas/batch';
 import type { Page, PageQuery } from '@/lib/schemas/page-query';
-import type { BatchMethodView, BatchSummary, BatchView } from '@/lib/views/batch';
+import type { BatchHead, BatchMethodView, BatchSummary, BatchView } from '@/lib/views/batch';
 import { changeFor, createFor, listFor, loadFor, may } from '../access';
 import { curvesOfBatches, usableCurve } from '../batch-curves';
 import { makerOf, readingsOf } from '../determination-rows';
@@ -95,13 +95,10 @@ async function determinationsOf(actor: Actor, batch: BatchRow) {
   return rows.map((row) => determinationView(row, (ofEach.get(row.id) ?? []).map(readingView)));
 }
 
-/** A batch with its samples, what came out, and the versions before and after it. @throws AppError NOT_FOUND */
-export async function loadBatch(actor: Actor, id: string): Promise<BatchView> {
-  const row = await loadFor(actor, 'batch', 'read', id);
-  const [[summary], method, determinations, versions] = await Promise.all([
+async function headOf(actor: Actor, row: BatchRow): Promise<BatchHead> {
+  const [[summary], method, versions] = await Promise.all([
     summaries(actor, row.notebookId, [row]),
     methodOf(actor, row.curveId),
-    determinationsOf(actor, row),
     listFor(actor, 'batch', row.notebookId, {
       where: { lineageId: row.lineageId },
       attributes: ['id', 'version', 'supersedesId'],
@@ -113,11 +110,22 @@ export async function loadBatch(actor: Actor, id: string): Promise<BatchView> {
   return {
     ...summary,
     method,
-    determinations,
     mayEdit: await may(actor, 'batch', 'edit', row),
     supersedes: placeOf(versions.find((version) => version.id === row.supersedesId)),
     supersededBy: placeOf(versions.find((version) => version.supersedesId === row.id)),
   };
+}
+
+/** A batch with how it is read and the versions before and after it, without its samples. @throws AppError NOT_FOUND */
+export async function loadBatchHead(actor: Actor, id: string): Promise<BatchHead> {
+  return headOf(actor, await loadFor(actor, 'batch', 'read', id));
+}
+
+/** A batch with its samples and what came out. @throws AppError NOT_FOUND */
+export async function loadBatch(actor: Actor, id: string): Promise<BatchView> {
+  const row = await loadFor(actor, 'batch', 'read', id);
+  const [head, determinations] = await Promise.all([headOf(actor, row), determinationsOf(actor, row)]);
+  return { ...head, determinations };
 }
 
 /** A batch on a curve of the same notebook; the same form sent twice makes one. @throws AppError */

@@ -1,4 +1,5 @@
 import type { Flag, FlagCode, ReportCase, UnknownResult } from '@/lib/engine';
+import { lightThroughText } from '@/lib/format/optical';
 import { significantText } from '@/lib/format/round';
 
 export type MeaningTone = 'order' | 'decide' | 'stop';
@@ -39,8 +40,7 @@ const dilute = ({ advice }: UnknownResult) => (advice ? `. Dilute ${advice}` : '
 
 function light({ absorbanceAsRead }: UnknownResult): string {
   if (absorbanceAsRead === null) return 'The instrument gave no number';
-  const percent = 100 * 10 ** -absorbanceAsRead;
-  return `${significantText(percent, 1)} % of the light gets through`;
+  return `${lightThroughText(absorbanceAsRead)} of the light gets through`;
 }
 
 function sentenceOf(result: UnknownResult, range: { min: number; max: number }, unit: string): string {

@@ -48,7 +48,7 @@ export const sampleName = z
   .max(LIMITS.name, `Keep the name under ${LIMITS.name} characters`);
 
 const sampleRow = { sample: sampleName, pathLengthMm, dilution };
-const typedRow = z.object({ ...sampleRow, readings });
+export const typedRow = z.object({ ...sampleRow, readings });
 const spectrumRow = z.object({
   ...sampleRow,
   spectrumIds: z

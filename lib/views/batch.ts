@@ -42,11 +42,15 @@ export interface BatchMethodView {
   readonly range: { readonly min: number; readonly max: number };
 }
 
-export interface BatchView extends BatchSummary {
+/** A batch without its samples. */
+export interface BatchHead extends BatchSummary {
   readonly method: BatchMethodView;
-  readonly determinations: readonly DeterminationView[];
   /** Whether the reader may add, correct and void. Never the guard itself. */
   readonly mayEdit: boolean;
   readonly supersedes: { readonly id: string; readonly version: number } | null;
   readonly supersededBy: { readonly id: string; readonly version: number } | null;
+}
+
+export interface BatchView extends BatchHead {
+  readonly determinations: readonly DeterminationView[];
 }

@@ -1,6 +1,5 @@
 import { describe, expect, test } from 'vitest';
 import { groupReplicates } from '@/lib/batch/group-replicates';
-import { alignDecimals } from '@/lib/batch/align-decimals';
 import { typedReading } from '@/lib/batch/typed-reading';
 import { unitWithBasis } from '@/lib/batch/unit-text';
 import { unknownOf } from '@/lib/batch/unknown-request';
@@ -83,16 +82,6 @@ test('replicates are put together by name, in the order in which samples come', 
     ['S04', 2],
     ['S05', 2],
     ['Run-12', 1],
-  ]);
-});
-
-test('decimal points stand under each other', () => {
-  const aligned = alignDecimals(['0.875', '12.3', '7', '100']);
-  expect(aligned.map((text) => text.replaceAll('\u2007', ' '))).toEqual([
-    '  0.875',
-    ' 12.3  ',
-    '  7    ',
-    '100    ',
   ]);
 });
 
