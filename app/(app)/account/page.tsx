@@ -31,7 +31,7 @@ export default async function AccountPage() {
         actions={<LinkButton href="/account/tokens">Access tokens</LinkButton>}
       />
       <div className="grid items-start gap-4.5 lg:grid-cols-2">
-        <Card title="Name">
+        <Card title="Your name">
           <NameForm name={name} />
         </Card>
         <Card title="Password">

@@ -20,7 +20,6 @@ export function SetUpForm({ zones, zone }: { zones: readonly string[]; zone: str
         label="Code"
         hint="Printed in the terminal where Halflight was started; each start prints a new one"
         autoComplete="one-time-code"
-        className="num"
         failed={failed}
         autoFocus
       />
