@@ -86,7 +86,9 @@ function exponentAt(text: string, at: number, end: number): number {
 
 function slowNumber(cell: string, mark: number): number {
   const plain = mark === COMMA ? cell.replace(',', '.') : cell;
-  return Number(plain.replace(/[\u2212\u2013]/g, '-').replace(/[dD]/, 'e'));
+  const value = Number(plain.replace(/[\u2212\u2013]/g, '-').replace(/[dD]/, 'e'));
+  // "1e999" is no reading of anything.
+  return Number.isFinite(value) ? value : NaN;
 }
 
 /** Numbers grouped by threes. One lone group ("1,234") may be a decimal mark as well and is not taken. */

@@ -1,3 +1,4 @@
+import { looksLikeAniml, readAniml } from './animl/read-animl';
 import { decodeText } from './decode-text';
 import { readDelimited } from './delimited/read-delimited';
 import { looksLikeJcamp } from './jcamp/records';
@@ -19,6 +20,7 @@ export function readFile(bytes: Uint8Array, fileName: string, options: ReadOptio
   options.onSteps?.(bytes.length);
   const name = baseName(fileName);
   if (looksLikeJcamp(text)) return readJcamp(text, name, options);
+  if (looksLikeAniml(text)) return readAniml(text, name, options);
   refuseText(text);
   return readDelimited(text, name, encoding, options);
 }

@@ -21,6 +21,8 @@ export interface ShapeViews {
   readonly mask: Int32Array;
   readonly isRow: Uint8Array;
   readonly isEmpty: Uint8Array;
+  /** Characters looked at. */
+  readonly looked: number;
 }
 
 const DELIMITERS: readonly Delimiter[] = ['tab', ';', '|', ',', 'blank', 'fixed'];
@@ -48,7 +50,12 @@ export function candidateDialects(text: string, options: ReadOptions): Dialect[]
 /** Look at one line of each shape as a dialect would read it. */
 export function viewShapes(lines: TextLines, dialect: Dialect, minNumbers: number): ShapeViews {
   const n = lines.shapeLine.length;
+  const looked = lines.shapeLine.reduce(
+    (sum, line) => sum + (lines.end[line] ?? 0) - (lines.start[line] ?? 0),
+    0,
+  );
   const views: ShapeViews = {
+    looked,
     fields: new Int32Array(n),
     numbers: new Int32Array(n),
     messy: new Int32Array(n),

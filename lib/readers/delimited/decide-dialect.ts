@@ -26,7 +26,7 @@ function decideAmong(lines: TextLines, options: ReadOptions, minNumbers: number)
   let most = 0;
   for (const dialect of candidateDialects(lines.text, options)) {
     const views = viewShapes(lines, dialect, minNumbers);
-    options.onSteps?.(lines.text.length);
+    options.onSteps?.(views.looked + lines.count);
     const blocks = findBlocks(lines, views, from);
     const best = bestBlock(blocks);
     if (!best) continue;

@@ -17,7 +17,8 @@ export interface LongKeys {
 export function findLongKeys(context: LayoutContext, xColumn: number): LongKeys | undefined {
   const { table, columns } = context;
   const x = table.columns[xColumn]?.values;
-  if (!x || x.length < 2 * SHORTEST || new Set(x).size === x.length) return undefined;
+  if (!x || x.length < 2 * SHORTEST || columns[xColumn]?.direction !== 0) return undefined;
+  if (new Set(x).size === x.length) return undefined;
   const texts = columns.flatMap((_, i) =>
     i !== xColumn && (table.columns[i]?.texts ?? 0) > (table.columns[i]?.numbers ?? 0) ? [i] : [],
   );

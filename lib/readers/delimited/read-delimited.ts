@@ -174,6 +174,7 @@ function buildResult(
         : undefined;
   const start = top?.context.heading.firstLine ?? 0;
   const last = all[all.length - 1]?.context.table.rows.at(-1) ?? lines.count - 1;
+  if (spectra.length === 0 && !other && questions.length === 0) throw new ReaderError('NO_TABLE', NO_TABLE);
   const settings = settingsOf(decision, first, spectra, options);
   return {
     reader: 'delimited',

@@ -3,7 +3,7 @@ import { xOrder, type XOrder } from './order';
 import { plateauWarning } from './plateau';
 import { withoutRepeats } from './repeats';
 import { sentinelValue, withGapsAt } from './sentinels';
-import { pickPoints, UNIT_WORDS, type SpectrumDraft } from './spectrum-draft';
+import { finiteDraft, pickPoints, UNIT_WORDS, type SpectrumDraft } from './spectrum-draft';
 
 export interface Finished {
   readonly spectra: ReadSpectrum[];
@@ -16,7 +16,8 @@ export interface Finished {
  */
 export function finishSpectrum(decoded: SpectrumDraft, options: ReadOptions): Finished {
   const questions: Question[] = [];
-  const draft = dealWithSentinels(decoded, options, questions);
+  const draft = dealWithSentinels(finiteDraft(decoded), options, questions);
+  if (draft.x.length === 0) return { spectra: [], questions };
   const order = xOrder(draft.x);
   const parts = splitByOrder(draft, order, options, questions);
   const spectra: ReadSpectrum[] = [];

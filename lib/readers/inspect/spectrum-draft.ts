@@ -42,3 +42,28 @@ export function pickPoints(draft: SpectrumDraft, places: ArrayLike<number>): Spe
   }
   return { ...draft, x, y, gaps };
 }
+
+/** A draft without what overflowed: such an ordinate is a gap, a point at such an x has no place and is left out. */
+export function finiteDraft(draft: SpectrumDraft): SpectrumDraft {
+  const placed = draft.x.every(Number.isFinite);
+  const kept = placed
+    ? draft
+    : pickPoints(
+        draft,
+        Array.from(draft.x.keys()).filter((i) => Number.isFinite(draft.x[i])),
+      );
+  const lost = draft.x.length - kept.x.length;
+  const message = `${lost} ${lost === 1 ? 'point has' : 'points have'} an x that is no finite number and ${lost === 1 ? 'was' : 'were'} left out`;
+  const warnings =
+    lost === 0 ? kept.warnings : [...kept.warnings, { code: 'ROW_WITHOUT_X', message, value: lost }];
+  const known = new Set(kept.gaps.map((gap) => gap.index));
+  const more: Gap[] = [];
+  kept.y.forEach((value, index) => {
+    if (!Number.isFinite(value) && !known.has(index))
+      more.push({ index, reason: 'unreadable', text: String(value) });
+  });
+  if (more.length === 0) return { ...kept, warnings };
+  const y = kept.y.map((value) => (Number.isFinite(value) ? value : NaN));
+  const gaps = [...kept.gaps, ...more].sort((a, b) => a.index - b.index);
+  return { ...kept, y, gaps, warnings };
+}

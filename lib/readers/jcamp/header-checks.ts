@@ -40,8 +40,8 @@ export function headerChecks(
       value: actual,
     });
   };
-  const slackY = ROUNDING * size + Math.abs(yFactor);
-  compare('FIRSTY', y[0] ?? NaN, Math.min(slackY, ROUNDING * Math.abs(y[0] ?? 0) + Math.abs(yFactor)));
+  const slackY = ROUNDING * size + 0.5 * Math.abs(yFactor);
+  compare('FIRSTY', y[0] ?? NaN, Math.min(slackY, ROUNDING * Math.abs(y[0] ?? 0) + 0.5 * Math.abs(yFactor)));
   compare('MAXY', maxY, slackY);
   compare('MINY', minY, slackY);
   const first = x[0] ?? NaN;

@@ -47,7 +47,7 @@ interface Points {
  *
  * y is the decoded ordinate times YFACTOR, x as chooseGrid says; header values are checked, never applied.
  *
- * @throws ReaderError EMPTY_TABLE, YFACTOR_ZERO, NOT_A_SPECTRUM (x is no wavelength, wavenumber or energy)
+ * @throws ReaderError EMPTY_TABLE, YFACTOR_ZERO, X_UNKNOWN, NOT_A_SPECTRUM (x is no wavelength, wavenumber or energy)
  */
 export function readTable(context: TableContext): SpectrumDraft {
   const { block, record, options } = context;
@@ -66,6 +66,13 @@ export function readTable(context: TableContext): SpectrumDraft {
     throw new ReaderError(
       'EMPTY_TABLE',
       `The data table at line ${record.line + 1} holds no points. Export the spectrum again.`,
+      record.line + 1,
+    );
+  }
+  if (!points.x.some(Number.isFinite)) {
+    throw new ReaderError(
+      'X_UNKNOWN',
+      `Neither the header nor the data lines of the table at line ${record.line + 1} say where x lies. Correct FIRSTX and LASTX in the file and upload it again.`,
       record.line + 1,
     );
   }
