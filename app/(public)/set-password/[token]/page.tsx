@@ -5,11 +5,12 @@ import { LINK_SENTENCES } from '@/lib/views/person';
 import { PublicPage } from '@/app/(public)/public-page';
 import { SetPasswordForm } from './set-password-form';
 
-// the address holds the secret: no other site and no search engine may learn it
+// The address holds the secret: no other site and no search engine may learn it. Not 'no-referrer': with it a
+// form sent without JavaScript carries "Origin: null", and the action refuses it as one from elsewhere.
 export const metadata: Metadata = {
   title: 'Set a password',
   robots: { index: false, follow: false },
-  referrer: 'no-referrer',
+  referrer: 'same-origin',
 };
 
 export default async function SetPasswordPage({ params }: PageProps<'/set-password/[token]'>) {
