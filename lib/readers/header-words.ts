@@ -68,6 +68,8 @@ const COEFFICIENT =
 export function signalFromText(text: string): SignalWords | undefined {
   const word = text.trim().replace(/[_\u00a0]/g, ' ');
   if (word === '') return undefined;
+  if (/(?:^|[^a-z])(?:mau|mabs|m\s?abs|milli-?absorbance(?: units?)?|mod)(?![a-z])/i.test(word))
+    return { signal: 'absorbance', scale: 0.001 };
   if (COEFFICIENT.test(word)) return { signal: 'other', scale: 1 };
   if (
     /%\s*t(?![a-su-z])|(?:^|[^a-z])t\s*[([/,:]?\s*%|percent\s*t|(?:transm\w*|durchl\w*)[^a-z]*(?:%|percent|prozent)|%\s*(?:transm|durchl)|pct\s*t/i.test(
@@ -82,8 +84,6 @@ export function signalFromText(text: string): SignalWords | undefined {
   ) {
     return { signal: 'transmittance', scale: 1, openScale: true };
   }
-  if (/(?:^|[^a-z])(?:mau|mabs|m\s?abs|milli-?absorbance(?: units?)?|mod)(?![a-z])/i.test(word))
-    return { signal: 'absorbance', scale: 0.001 };
   if (/(?:^|[^a-z])[\u00b5\u03bcu]au(?![a-z])/i.test(word)) return { signal: 'absorbance', scale: 1e-6 };
   if (
     /absorb[aeiou]n[czt]|absorpt|extin[ck]t|(?:^|[^a-z])(?:abs|au|a\.u\.|od|o\.d\.|optical density)(?![a-z])|(?:^|[^a-z])(?:od|abs)\s?\d{3}/i.test(

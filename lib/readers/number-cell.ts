@@ -102,6 +102,16 @@ function groupedNumber(cell: string, mark: number): number {
   return slowNumber(cell.replace(byPoint ? /[,\u00a0\u202f ']/g : /[.\u00a0\u202f ']/g, ''), mark);
 }
 
+/**
+ * A number of one group of three ("12,500" beside a decimal point), or NaN. Alone it may as well be a decimal, so that it
+ * is to be taken only where a whole column is written so.
+ */
+export function singleGroup(cell: string, mark: number): number {
+  const grouped = mark === POINT ? /^[1-9]\d{0,2},\d{3}$/ : /^[1-9]\d{0,2}\.\d{3}$/;
+  const word = cell.replace(/^["'\s]+|["'\s]+$/g, '');
+  return word.length < 12 && grouped.test(word) ? Number(word.replace(/[.,]/, '')) : NaN;
+}
+
 const MISSING =
   /^(?:|n\/?a|#n\/a|#?nan|null|none|nil|n\.?d\.?|-{1,4}|[\u2013\u2014]|\*{1,3}|\?{1,3}|\.|missing|blank|#value!|#div\/0!|#ref!)$/i;
 const ABOVE =

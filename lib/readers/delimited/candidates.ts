@@ -1,4 +1,4 @@
-import { COMMA, gapReason, parseNumber, POINT } from '../number-cell';
+import { COMMA, gapReason, parseNumber, POINT, singleGroup } from '../number-cell';
 import type { TextLines } from '../text-lines';
 import type { Delimiter, ReadOptions } from '../types';
 import { splitCells } from './split-cells';
@@ -87,7 +87,10 @@ function viewShape(
   let mask = 17;
   for (let cell = 0; cell < fields; cell++) {
     const [start = 0, end = 0] = [bounds[2 * cell], bounds[2 * cell + 1]];
-    if (!Number.isNaN(parseNumber(text, start, end, mark))) {
+    if (
+      !Number.isNaN(parseNumber(text, start, end, mark)) ||
+      (end - start < 12 && !Number.isNaN(singleGroup(text.slice(start, end), mark)))
+    ) {
       numbers += 1;
       filled += 1;
       mask = Math.imul(mask, 31);

@@ -53,7 +53,9 @@ function xScore(
   if (isWavelengthWord(label) || (unit && label.length < 40 && !signalFromText(label.replace(/\bA\b/, ''))))
     return 100 + place;
   if (otherAxisWord(label) || signalFromText(label) || fact.isIndex) return 0;
-  if (!inRange(fact, options.xUnit) || index !== firstPlain) return 0;
+  if (!inRange(fact, options.xUnit)) return 0;
+  if (index !== firstPlain)
+    return fact.low >= 100 && fact.direction !== 0 && fact.rows >= ENOUGH ? 10 + place : 0;
   if (fact.direction !== 0) return 50 + place;
   if (fact.sorted >= 0.9) return 40 + place;
   const values = table.columns[index]?.values ?? new Float64Array();
@@ -71,7 +73,8 @@ export function isPaired(
   labels: readonly string[],
   xColumn: number | undefined,
 ): boolean {
-  const columns = facts.length;
+  let columns = facts.length;
+  while (columns > 0 && facts[columns - 1]?.numbers === 0 && (labels[columns - 1] ?? '') === '') columns -= 1;
   if (columns < 4 || columns % 2 !== 0 || xColumn !== 0) return false;
   const [first] = facts;
   if (!first) return false;

@@ -41,7 +41,8 @@ export function findHeading(
   let labels = cells;
   if (isUnitRow(cells)) {
     const upper = headingCells(lines, dialect, line - 1, columns);
-    if (line - 1 > above && upper && !isUnitRow(upper)) {
+    const overAll = upper?.every((label, i) => label !== '' || (cells[i] ?? '') === '');
+    if (line - 1 > above && upper && overAll && !isUnitRow(upper)) {
       labels = upper.map((label, i) =>
         [label, cells[i]].filter((word) => word && !/^[-\u2013]$/.test(word)).join(' '),
       );

@@ -1,3 +1,4 @@
+import { signalFromText } from '../header-words';
 import type { LayoutContext } from './layout-context';
 import { seriesPoints, type Series } from './series';
 
@@ -23,9 +24,7 @@ export function findLongKeys(context: LayoutContext, xColumn: number): LongKeys 
     i !== xColumn && (table.columns[i]?.texts ?? 0) > (table.columns[i]?.numbers ?? 0) ? [i] : [],
   );
   const still = columns.flatMap((fact, i) =>
-    i !== xColumn && !texts.includes(i) && fact.numbers === fact.rows && keepsStill(table.columns[i]?.values)
-      ? [i]
-      : [],
+    i !== xColumn && !texts.includes(i) && fact.numbers === fact.rows && namesSpectra(context, i) ? [i] : [],
   );
   for (let used = 0; used <= still.length; used++) {
     const keys = [...texts, ...still.slice(0, used)];
@@ -42,12 +41,14 @@ export function findLongKeys(context: LayoutContext, xColumn: number): LongKeys 
   return undefined;
 }
 
-/** A number that names a spectrum changes far more seldom than once in three rows. */
-function keepsStill(values: Float64Array | undefined): boolean {
-  if (!values) return false;
+/** A number that names a spectrum keeps still for rows on end, or is one of a few whole numbers. */
+function namesSpectra(context: LayoutContext, column: number): boolean {
+  const values = context.table.columns[column]?.values ?? new Float64Array();
+  if (signalFromText(context.heading.labels[column] ?? '')) return false;
   let changes = 0;
   for (let i = 1; i < values.length; i++) if (values[i] !== values[i - 1]) changes += 1;
-  return changes > 0 && changes * SHORTEST <= values.length;
+  if (changes > 0 && changes * SHORTEST <= values.length) return true;
+  return changes > 0 && values.every(Number.isInteger) && new Set(values).size * SHORTEST <= values.length;
 }
 
 function groupRows(context: LayoutContext, keys: readonly number[]): Map<string, number[]> {

@@ -1,4 +1,4 @@
-import { gapReason, parseNumber } from '../number-cell';
+import { gapReason, parseNumber, singleGroup } from '../number-cell';
 import type { TextLines } from '../text-lines';
 import type { GapReason } from '../types';
 import { markCode, type Dialect } from './candidates';
@@ -68,8 +68,29 @@ export function readNumbers(
       if (column) readCell(lines.text, cell < count ? bounds : undefined, cell, mark, column, row);
     }
   }
+  for (const column of columns) takeGroups(column, mark);
   onSteps?.(looked);
   return { rows, columns, ragged };
+}
+
+/** Numbers with one group of three are numbers where every cell of the column is one, or too small to need a group. */
+function takeGroups(column: OpenColumn, mark: number): void {
+  if (column.texts === 0) return;
+  const grouped = new Map<number, number>();
+  for (const [row, odd] of column.odd) {
+    if (odd.reason !== 'unreadable') continue;
+    const value = singleGroup(odd.text, mark);
+    if (Number.isNaN(value)) return;
+    grouped.set(row, value);
+  }
+  if (!column.values.every((value) => Number.isNaN(value) || (value < 1000 && Number.isInteger(value))))
+    return;
+  for (const [row, value] of grouped) {
+    column.values[row] = value;
+    column.odd.delete(row);
+  }
+  column.numbers += grouped.size;
+  column.texts = 0;
 }
 
 function readCell(

@@ -11,6 +11,11 @@ const LONG = 20;
 export function mayLackX(context: LayoutContext): boolean {
   const numeric = context.columns.filter((column) => column.numbers > 0.5 * column.rows).length;
   const headed = context.heading.labels.some((label) => /[A-Za-z]{4}/.test(label) && label.length > 3);
+  if (
+    context.columns.length <= 2 &&
+    context.columns.some((column) => column.direction !== 0 && column.rows > 2)
+  )
+    return false;
   return numeric >= LONG || (numeric >= 1 && numeric <= 2 && context.table.rows.length >= LONG && !headed);
 }
 

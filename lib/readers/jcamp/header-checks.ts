@@ -46,7 +46,7 @@ export function headerChecks(
   compare('MINY', minY, slackY);
   const first = x[0] ?? NaN;
   const last = x[x.length - 1] ?? NaN;
-  const slackX = x.length > 1 ? Math.abs((last - first) / (x.length - 1)) / 2 : 0;
+  const slackX = x.length > 1 ? Math.abs((last - first) / (x.length - 1)) / 10 : 0;
   compare('FIRSTX', first, slackX);
   compare('LASTX', last, slackX);
   compare('MAXX', Math.max(first, last), slackX);

@@ -38,23 +38,30 @@ export function chooseGrid(header: XHeader, ordinates: Ordinates): XGrid {
   }
   const steps = lineSteps(ordinates.lines, header.xFactor);
   const grids = headerGrids(header, n);
-  const fitting = grids.find((grid) => agreement(grid.deltaX, steps) >= AGREE);
-  if (fitting) {
-    checkDelta(header, fitting.deltaX, warnings);
-    return { ...fitting, warnings };
+  const { lines } = ordinates;
+  const agreed = Number.isNaN(header.count) || header.count === n ? grids.slice(0, 1) : [];
+  const fitting =
+    agreed.find((grid) => passesThrough(grid, lines, header.xFactor)) ??
+    grids.find((grid) => stepsExactly(grid, lines, steps, header.xFactor)) ??
+    grids.find((grid) => passesThrough(grid, lines, header.xFactor));
+  const fromLines = gridFromLines(lines, steps, header.xFactor);
+  const whole = fromLines && passesThrough(fromLines, lines, header.xFactor);
+  const chosen =
+    fitting ?? (whole ? undefined : grids.find((grid) => stepsWell(grid, lines, steps, header.xFactor)));
+  if (chosen) {
+    checkDelta(header, chosen.deltaX, warnings);
+    return { ...chosen, warnings };
   }
-  const first = ordinates.lines[0];
-  const fromLines = stepFromLines(steps);
-  if (first && Number.isFinite(fromLines) && !countsPoints(ordinates.lines)) {
-    const firstX = first.abscissa * header.xFactor;
+  if (fromLines && !countsPoints(lines)) {
     const code = grids.length === 0 ? 'X_FROM_LINES' : 'X_HEADER_WRONG';
     const why =
       grids.length === 0
         ? 'The header gives no LASTX or DELTAX'
         : 'FIRSTX, LASTX and DELTAX do not fit the data lines';
     warnings.push({ code, message: `${why}; x was taken from the abscissae of the data lines` });
-    return { firstX, deltaX: fromLines, warnings };
+    return { ...fromLines, warnings };
   }
+  const [first] = lines;
   const best = grids[0];
   if (best) {
     if (steps.length > 0) {
@@ -108,29 +115,78 @@ export function abscissaIndex(line: TableLine): number {
   return line.checked ? line.firstIndex - 1 : line.firstIndex;
 }
 
-function agreement(deltaX: number, steps: readonly LineStep[]): number {
-  if (steps.length === 0) return 1;
-  let agree = 0;
-  for (const step of steps) {
-    // One point more or less is the other habit of counting at a y-check; only the first step can show it.
-    const off = Math.abs(step.x - step.points * deltaX);
-    if (off <= step.tolerance + 0.25 * Math.abs(deltaX)) agree += 1;
-  }
-  return steps.length === 1 &&
-    agree === 0 &&
-    Math.abs((steps[0]?.x ?? 0) / deltaX - (steps[0]?.points ?? 0)) < 1.01
-    ? 1
-    : agree / steps.length;
+type Grid = Omit<XGrid, 'warnings'>;
+
+/** The abscissae lie on the grid, as far as their own rounding goes. */
+function passesThrough(grid: Grid, lines: readonly TableLine[], xFactor: number): boolean {
+  const on = lines.filter((line) => {
+    const off =
+      line.abscissa * xFactor -
+      (grid.firstX + abscissaIndex(line) * (Number.isFinite(grid.deltaX) ? grid.deltaX : 0));
+    return Math.abs(off) <= 1.001 * line.rounding * Math.abs(xFactor) + 1e-6 * Math.abs(grid.deltaX || 0);
+  });
+  return on.length >= 0.9 * lines.length;
 }
 
+/** The steps are those of the grid to the last digit, and the start is off by less than a cut digit. */
+function stepsExactly(
+  grid: Grid,
+  lines: readonly TableLine[],
+  steps: readonly LineStep[],
+  xFactor: number,
+): boolean {
+  const exact = steps.filter(
+    (step) => Math.abs(step.x - step.points * grid.deltaX) <= 1e-6 * Math.abs(grid.deltaX),
+  );
+  return steps.length > 0 && exact.length >= 0.9 * steps.length && startOff(grid, lines, xFactor) < 2;
+}
+
+/** Most steps are those of the grid: cut digits, or a damaged line or two, disturb the rest. */
+function stepsWell(
+  grid: Grid,
+  lines: readonly TableLine[],
+  steps: readonly LineStep[],
+  xFactor: number,
+): boolean {
+  const good = steps.filter(
+    (step) => Math.abs(step.x - step.points * grid.deltaX) <= step.tolerance + 0.1 * Math.abs(grid.deltaX),
+  );
+  const near =
+    startOff(grid, lines, xFactor) <
+    2 + (0.3 * Math.abs(grid.deltaX)) / ((lines[0]?.rounding ?? 1) * Math.abs(xFactor));
+  return good.length >= AGREE * steps.length && near;
+}
+
+/** How far the first abscissa is from the grid's start, in half units of its last digit. */
+function startOff(grid: Grid, lines: readonly TableLine[], xFactor: number): number {
+  const [first] = lines;
+  return first ? Math.abs(first.abscissa * xFactor - grid.firstX) / (first.rounding * Math.abs(xFactor)) : 0;
+}
+
+function gridFromLines(
+  lines: readonly TableLine[],
+  steps: readonly LineStep[],
+  xFactor: number,
+): Grid | undefined {
+  const deltaX = stepFromLines(steps);
+  const [first] = lines;
+  return first && Number.isFinite(deltaX) ? { firstX: first.abscissa * xFactor, deltaX } : undefined;
+}
+
+/** The whole way by all points, unless a damaged line spoils it: then the middle one of all steps. */
 function stepFromLines(steps: readonly LineStep[]): number {
   let x = 0;
   let points = 0;
+  const single: number[] = [];
   for (const step of steps) {
     x += step.x;
     points += step.points;
+    if (step.points > 0) single.push(step.x / step.points);
   }
-  return points > 0 && x !== 0 ? x / points : NaN;
+  if (!(points > 0) || x === 0) return NaN;
+  single.sort((a, b) => a - b);
+  const middle = single[Math.floor(single.length / 2)] ?? NaN;
+  return Math.abs(x / points - middle) <= 0.01 * Math.abs(middle) ? x / points : middle;
 }
 
 /** Some programs write the number of the point in place of the abscissa. */
