@@ -1,9 +1,10 @@
 'use client';
 
 import { useSearchParams } from 'next/navigation';
-import { useMemo, useState } from 'react';
+import { useCallback, useEffect, useMemo, useState } from 'react';
 
 import type { ReadingRule } from '@/lib/engine';
+import { LIMITS } from '@/lib/limits';
 import { spectrumRule, type RuleTexts } from '@/lib/schemas/spectrum-rule';
 import {
   chosenSpectra,
@@ -32,44 +33,55 @@ function ruleState(texts: RuleTexts): Omit<RuleState, 'untouched'> {
   return { texts, rule: null, errors };
 }
 
-function put(view: SpectraView): void {
-  // the address follows without a request: everything that the page needs for it is here already
-  window.history.replaceState(null, '', writeViewAddress(view));
+function added(view: SpectraView, ids: readonly string[]): SpectraView {
+  if (view.keys === null || ids.length === 0) return view; // a view that nobody has chosen takes them by itself
+  const keys = [...new Set([...view.keys, ...ids.map(spectrumKey)])];
+  return { ...view, keys: keys.slice(0, LIMITS.spectraAtOnce) };
 }
 
-const now = (): SpectraView => readViewAddress(new URLSearchParams(window.location.search));
-
-/** Add spectra to the view in the address; a view that nobody has chosen takes them by itself. */
-export function addToView(ids: readonly string[]): void {
-  const view = now();
-  if (view.keys === null || ids.length === 0) return;
-  put({ ...view, keys: [...new Set([...view.keys, ...ids.map(spectrumKey)])] });
+/**
+ * The view, with its address following it. The state leads: the router takes up a new address only after a
+ * while, and a field or a tick must follow the hand at once.
+ */
+function useViewInAddress() {
+  const search = useSearchParams();
+  const [view, setView] = useState(() => readViewAddress(search));
+  const [opened] = useState(view);
+  useEffect(() => {
+    // without a request: everything that the page needs for it is here already
+    if (view !== opened) window.history.replaceState(null, '', writeViewAddress(view));
+  }, [view, opened]);
+  useEffect(() => {
+    const goBack = () => setView(readViewAddress(new URLSearchParams(window.location.search)));
+    window.addEventListener('popstate', goBack);
+    return () => window.removeEventListener('popstate', goBack);
+  }, []);
+  return [view, setView] as const;
 }
-
-const choose = (ids: readonly string[]) => put({ ...now(), keys: ids.map(spectrumKey) });
-const showAside = (aside: boolean) => put({ ...now(), aside });
 
 /** What the Spectra page shows, kept in its address. A rule that is half typed stays out of the address. */
 export function useSpectraView(spectra: readonly SpectrumView[]) {
-  const { keys, texts, aside } = readViewAddress(useSearchParams());
+  const [view, setView] = useViewInAddress();
   const [typed, setTyped] = useState<RuleTexts | null>(null);
-  const chosenKeys = keys?.join(',') ?? null;
-  const chosen = useMemo(() => chosenSpectra(spectra, chosenKeys?.split(',') ?? null), [spectra, chosenKeys]);
+  const chosen = useMemo(() => chosenSpectra(spectra, view.keys), [spectra, view.keys]);
+  const add = useCallback((ids: readonly string[]) => setView((now) => added(now, ids)), [setView]);
+  const rule = ruleState(typed ?? view.texts);
+  const { at, from, to } = view.texts;
+  const untouched = typed === null && at === '' && from === '' && to === '';
 
-  function setRule(next: RuleTexts): void {
-    const valid = ruleState(next).rule !== null;
-    setTyped(valid ? null : next);
-    if (valid)
-      put({ ...now(), keys: keys ?? chosen.map((spectrum) => spectrumKey(spectrum.id)), texts: next });
+  function setRule(texts: RuleTexts): void {
+    const valid = ruleState(texts).rule !== null;
+    setTyped(valid ? null : texts);
+    const keys = view.keys ?? chosen.map((spectrum) => spectrumKey(spectrum.id));
+    if (valid) setView({ ...view, keys, texts });
   }
-  const rule = ruleState(typed ?? texts);
-  const untouched = typed === null && texts.at === '' && texts.from === '' && texts.to === '';
   return {
     chosen,
-    aside,
+    add,
+    aside: view.aside,
     rule: { ...rule, untouched, errors: untouched ? {} : rule.errors },
     setRule,
-    choose,
-    showAside,
+    choose: (ids: readonly string[]) => setView({ ...view, keys: ids.map(spectrumKey) }),
+    showAside: (aside: boolean) => setView({ ...view, aside }),
   };
 }

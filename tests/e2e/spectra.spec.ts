@@ -39,7 +39,8 @@ const spreadsheet = {
 async function upload(page: Page, address: string, files: ReturnType<typeof spectrumFile>[]) {
   await page.goto(`${address}/spectra`);
   await page.getByLabel('Spectrum files').setInputFiles(files);
-  await expect(page.getByText(`${files.length} of ${files.length} files done`)).toBeVisible();
+  const all = files.length === 1 ? '1 of 1 file done' : `${files.length} of ${files.length} files done`;
+  await expect(page.getByText(all)).toBeVisible();
 }
 
 const readings = (page: Page) => page.getByRole('table', { name: 'Readings' });
@@ -106,8 +107,8 @@ test('the plot, the readings by each rule, and an address that shows the same to
   await expect(s3).toContainText('900 nm is outside this spectrum');
 
   await page.getByLabel('Read', { exact: true }).selectOption({ label: 'maximum in a window' });
-  await page.getByLabel('From').fill('450');
-  await page.getByLabel('To').fill('550');
+  await page.getByLabel('From', { exact: true }).fill('450');
+  await page.getByLabel('To', { exact: true }).fill('550');
   await page.getByLabel('Minus the reading at').fill('700');
   await expect(s3).toContainText('510');
   await page.getByRole('checkbox', { name: 'Plot S1 of S1.jdx' }).uncheck();
@@ -185,7 +186,7 @@ test('a reader sees everything and can bring nothing in, on the page or past it'
   const address = await makeNotebook(page, 'Spectra to be read');
   await upload(page, address, [spectrumFile('S1', 0.5)]);
   await page.goto(`${address}/members`);
-  await page.getByLabel('Person').selectOption({ label: 'Isolde Quillan, viewer' });
+  await page.getByLabel('Person', { exact: true }).selectOption({ label: 'Isolde Quillan, viewer' });
   await page.getByRole('button', { name: 'Add to the notebook' }).click();
   await expect(page.getByRole('rowheader', { name: 'Isolde Quillan' })).toBeVisible();
 

@@ -8,7 +8,7 @@ import { CopyAddressButton } from '@/components/spectrum/copy-address-button';
 import { SpectraList } from '@/components/spectrum/spectra-list';
 import { UploadPanel } from '@/components/spectrum/upload-panel';
 import { useFileDrop } from '@/components/spectrum/use-file-drop';
-import { addToView, useSpectraView } from '@/components/spectrum/use-spectra-view';
+import { useSpectraView } from '@/components/spectrum/use-spectra-view';
 import { useUploads } from '@/components/spectrum/use-uploads';
 import { Card } from '@/components/ui/card';
 import { EmptyState } from '@/components/ui/empty-state';
@@ -50,13 +50,14 @@ export function SpectraWorkspace({
 }: Props) {
   const router = useRouter();
   const view = useSpectraView(spectra);
+  const { add } = view;
   const [notice, setNotice] = useState<string | null>(null);
   const land = useCallback(
     (ids: readonly string[]) => {
-      addToView(ids.slice(0, ADDED_TO_PLOT));
+      add(ids.slice(0, ADDED_TO_PLOT));
       router.refresh();
     },
-    [router],
+    [add, router],
   );
   const uploads = useUploads(`/api/v1/notebooks/${notebookId}/source-files`, land);
   const { queue } = uploads;
