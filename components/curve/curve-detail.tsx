@@ -89,10 +89,10 @@ export function CurveDetail({ curve, timeZone }: { curve: CurveView; timeZone: s
             />
           </Card>
           <CurveJudgements curve={answer.curve} />
-          <MethodFacts curve={curve} />
         </div>
         <div className="grid min-w-0 gap-4.5">
           <CurvePlots standards={standards} curve={answer.curve} />
+          <MethodFacts curve={curve} />
         </div>
       </Columns>
       <Versions curve={curve} timeZone={timeZone} />

@@ -71,6 +71,10 @@ function blockedBy(form: CurveFormState, issues: DraftIssues): string | null {
   return form.live.answer ? null : form.live.sentence;
 }
 
+/** Before the form was sent, only what has a usual value and was made wrong speaks up; the rest may yet come. */
+const whileTyping = (issues: DraftIssues): DraftIssues =>
+  Object.fromEntries(Object.entries(issues).filter(([path]) => path.startsWith('calculation.')));
+
 function useSaving({ notebookId, start, base, spectra, save }: CurveFormProps) {
   const form = useCurveForm(notebookId, start, spectra);
   const [answer, send] = useActionState(save, { status: 'idle' });
@@ -79,7 +83,7 @@ function useSaving({ notebookId, start, base, spectra, save }: CurveFormProps) {
   const element = useRef<HTMLFormElement>(null);
   const failed = answer.status === 'failed' ? answer : undefined;
   const own = draftIssues(form.draft);
-  const issues = tried ? { ...(failed ? issuesOfAnswer(failed.fields) : {}), ...own } : {};
+  const issues = tried ? { ...(failed ? issuesOfAnswer(failed.fields) : {}), ...own } : whileTyping(own);
   const blocked = blockedBy(form, own);
 
   function onSubmit(event: FormEvent) {

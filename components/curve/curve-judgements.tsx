@@ -2,7 +2,6 @@ import { FlagList } from '@/components/flags/flag-list';
 import { Card } from '@/components/ui/card';
 import { ToneShape } from '@/components/ui/pill';
 import type { CurveResult, TestAnswer } from '@/lib/engine';
-import { formatNumber } from '@/lib/format/number';
 
 const TEST_NAMES: Readonly<Record<keyof CurveResult['tests'], string>> = {
   lackOfFit: 'Lack of fit',
@@ -17,7 +16,7 @@ function Test({ name, test }: { name: string; test: TestAnswer }) {
     <li className="flex gap-2">
       <ToneShape tone={test.passed ? 'order' : 'decide'} className="mt-1.5" />
       <span className="min-w-0">
-        {name}: {test.verdict} <span className="num text-xs text-ink-2">p = {formatNumber(test.p, 2)}</span>
+        {name}: {test.verdict}
       </span>
     </li>
   );

@@ -25,9 +25,9 @@ const MODELS = [
   { value: 'proportional', label: 'straight line through zero' },
 ];
 const WEIGHTINGS = [
-  { value: 'none', label: 'none: the same scatter everywhere' },
-  { value: '1/x', label: '1/x: scatter grows with the root of c' },
-  { value: '1/x2', label: '1/x²: scatter grows with c' },
+  { value: 'none', label: 'none: even scatter' },
+  { value: '1/x', label: '1/x: grows with √c' },
+  { value: '1/x2', label: '1/x²: grows with c' },
 ];
 const BLANK_RULES = [
   { value: 'none', label: 'none: zeroed in the instrument' },
@@ -69,7 +69,7 @@ export function AboutFields({ about, onAbout, calculation, onCalculation, issues
         <Field
           label="Title"
           optional
-          placeholder={about.analyte ? `${about.analyte}, and the wavelength` : 'from analyte and wavelength'}
+          placeholder="Analyte and wavelength"
           maxLength={LIMITS.title}
           {...word('title')}
         />

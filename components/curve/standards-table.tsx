@@ -1,10 +1,10 @@
+import { CircleSlash } from 'lucide-react';
 import Link from 'next/link';
 import { LightDisc } from '@/components/light-disc';
-import { Button } from '@/components/ui/button';
 import { Pill } from '@/components/ui/pill';
 import { RowHead, Table, Td, Th } from '@/components/ui/table';
 import type { ReadingCell, StandardRowView } from '@/lib/curve/standard-rows';
-import { formatDecimals, formatNumber } from '@/lib/format/number';
+import { formatDecimals } from '@/lib/format/number';
 import { absorbanceText } from '@/lib/format/optical';
 
 interface ReadingLook {
@@ -31,9 +31,13 @@ function ReadingText({ cell, spectrumHref }: ReadingLook & { cell: ReadingCell }
 }
 
 function Reading({ cell, spectrumHref }: ReadingLook) {
-  if (!cell) return <Td />;
+  if (!cell) return <Td className={CLOSE} />;
   return (
-    <Td numeric title={cell.leftOutBecause ? `left out: ${cell.leftOutBecause}` : undefined}>
+    <Td
+      numeric
+      className={CLOSE}
+      title={cell.leftOutBecause ? `left out: ${cell.leftOutBecause}` : undefined}
+    >
       <span className="inline-flex items-center gap-1.5">
         <LightDisc absorbance={cell.absorbanceAsRead} reason={cell.gapText ?? undefined} size={14} />
         <ReadingText cell={cell} spectrumHref={spectrumHref} />
@@ -44,6 +48,15 @@ function Reading({ cell, spectrumHref }: ReadingLook) {
 }
 
 const signed = (percent: number) => `${percent > 0 ? '+' : ''}${formatDecimals(percent, 1)} %`;
+/** Cells stand closer here than in other tables: many readings, one line. */
+const CLOSE = 'not-last:px-2!';
+
+/** Decimals that give the top standard four digits; all read-backs share them, so that their points align. */
+function decimalsOf(rows: readonly StandardRowView[]): number {
+  const top = Math.max(...rows.map(({ concentration }) => concentration), 0);
+  return top > 0 ? Math.min(8, Math.max(0, 3 - Math.floor(Math.log10(top)))) : 3;
+}
+
 const plain = (value: number) => String(Number(value.toPrecision(8)));
 
 function LeftOutReasons({ rows }: { rows: readonly StandardRowView[] }) {
@@ -86,6 +99,7 @@ export function StandardsTable({
   onLeaveOut?: (row: StandardRowView) => void;
 }) {
   const widest = Math.max(1, ...rows.map((row) => row.readings.length));
+  const decimals = decimalsOf(rows);
   const columns = Array.from({ length: widest }, (_, index) => index);
   return (
     <>
@@ -93,15 +107,25 @@ export function StandardsTable({
         <thead>
           <tr>
             <Th>Standard</Th>
-            <Th numeric>c, {unit}</Th>
+            <Th numeric className={CLOSE}>
+              c, {unit}
+            </Th>
             {columns.map((column) => (
-              <Th key={column} numeric>
+              <Th key={column} numeric className={CLOSE}>
                 A<sub>{column + 1}</sub>
               </Th>
             ))}
-            <Th numeric>read back</Th>
-            <Th numeric>error</Th>
-            {onLeaveOut && <Th className="no-print">Fit</Th>}
+            <Th numeric className={CLOSE}>
+              read back
+            </Th>
+            <Th numeric className={CLOSE}>
+              error
+            </Th>
+            {onLeaveOut && (
+              <Th className="no-print px-1!">
+                <span className="sr-only">Leave out</span>
+              </Th>
+            )}
           </tr>
         </thead>
         <tbody>
@@ -110,26 +134,32 @@ export function StandardsTable({
               <RowHead className="whitespace-nowrap">
                 {row.name} {row.role === 'blank' && row.name.toLowerCase() !== 'blank' && <Pill>blank</Pill>}
               </RowHead>
-              <Td numeric>
+              <Td numeric className={CLOSE}>
                 {row.role === 'blank' ? <span className="aside">blank</span> : plain(row.concentration)}
               </Td>
               {columns.map((column) => (
                 <Reading key={column} cell={row.readings[column]} spectrumHref={spectrumHref} />
               ))}
-              <Td numeric>{row.backCalculated === null ? '–' : formatNumber(row.backCalculated, 4)}</Td>
-              <Td numeric className={Math.abs(row.errorPercent ?? 0) > 10 ? 'text-amber' : 'text-ink-2'}>
+              <Td numeric className={CLOSE}>
+                {row.backCalculated === null ? '–' : formatDecimals(row.backCalculated, decimals)}
+              </Td>
+              <Td
+                numeric
+                className={`${CLOSE} ${Math.abs(row.errorPercent ?? 0) > 10 ? 'text-amber' : 'text-ink-2'}`}
+              >
                 {row.errorPercent === null ? '–' : signed(row.errorPercent)}
               </Td>
               {onLeaveOut && (
-                <Td className="no-print">
-                  <Button
-                    size="small"
-                    variant="quiet"
+                <Td className="no-print px-1!">
+                  <button
+                    type="button"
+                    title={`Leave out ${row.name}, or a reading of it`}
                     aria-label={`Leave out ${row.name}, or a reading of it`}
+                    className="grid size-7 place-items-center rounded-control text-ink-2 hover:bg-raised hover:text-ink"
                     onClick={() => onLeaveOut(row)}
                   >
-                    {row.leftOutBecause ? 'Left out' : 'Leave out'}
-                  </Button>
+                    <CircleSlash aria-hidden="true" className="size-4" />
+                  </button>
                 </Td>
               )}
             </tr>

@@ -1,6 +1,6 @@
 'use client';
 
-import { useRef, type MouseEvent, type PointerEvent } from 'react';
+import { useRef, type FocusEvent, type MouseEvent, type PointerEvent } from 'react';
 import type { GridColumn } from '@/lib/grid/grid-cell';
 import { selectionOf, type GridAction, type GridState } from '@/lib/grid/grid-state';
 import { GridCell } from './grid-cell';
@@ -40,6 +40,12 @@ function usePointer(state: GridState, send: (action: GridAction) => void) {
       if (!place || !touch.current || isTypingAt(state, place)) return;
       send({ type: 'goTo', ...place });
       send({ type: 'edit' });
+    },
+    // focus that came by itself, from a screen reader or a script: the cursor goes with it
+    onFocus(event: FocusEvent) {
+      const place = event.target.matches('[data-cell]') ? placeOf(event.target) : null;
+      if (place && (place.row !== state.at.row || place.column !== state.at.column))
+        send({ type: 'goTo', ...place });
     },
     onDoubleClick(event: MouseEvent) {
       if (placeOf(event.target) && state.draft === null) send({ type: 'edit' });
