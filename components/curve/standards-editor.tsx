@@ -191,6 +191,25 @@ function PathAdvice({ form }: { form: CurveFormState }) {
   );
 }
 
+/** The limit belongs to the reading as it came; after a second wavelength is taken off it no longer shows. */
+function LimitAdvice({ form }: { form: CurveFormState }) {
+  const { readings, spectrumIds, calculation } = form;
+  const limit = Number(calculation.absorbanceLimit.replace(',', '.'));
+  const above = spectrumIds.flatMap((id) => {
+    const read = readings.spectra.get(id);
+    return read && read.minusValue !== null && (read.mainValue ?? 0) > limit ? [read] : [];
+  });
+  const [first] = above;
+  if (!first) return null;
+  return (
+    <Notice tone="decide">
+      {first.name} reads {absorbanceText(first.mainValue ?? 0)} before the second wavelength is taken off
+      {above.length > 1 && `, and ${above.length - 1} more read too high`}: above the limit of{' '}
+      {calculation.absorbanceLimit}. Leave it out, or dilute and measure again.
+    </Notice>
+  );
+}
+
 function SpectraStandards({
   form,
   issues,
@@ -212,6 +231,7 @@ function SpectraStandards({
         </Notice>
       )}
       <PathAdvice form={form} />
+      <LimitAdvice form={form} />
       <BlankAdvice form={form} />
       {issues.standards && <p className="text-sm text-red">▲ {issues.standards}</p>}
       <div>
