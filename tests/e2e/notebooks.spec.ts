@@ -44,7 +44,7 @@ test('members read, and lose it at the next click when they are removed', async 
   await signInAs(page, 'pi');
   const address = await makeNotebook(page, 'With a reader');
   await page.goto(`${address}/members`);
-  await page.getByLabel('Person').selectOption({ label: 'Isolde Quillan, viewer' });
+  await page.getByLabel('Person', { exact: true }).selectOption({ label: 'Isolde Quillan, viewer' });
   await page.getByRole('button', { name: 'Add to the notebook' }).click();
   await expect(page.getByRole('rowheader', { name: 'Isolde Quillan' })).toBeVisible();
   const reader = await (await browser.newContext()).newPage();
