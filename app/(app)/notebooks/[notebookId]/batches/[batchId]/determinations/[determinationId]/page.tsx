@@ -92,7 +92,7 @@ export default async function DeterminationPage({
                 {...method.range}
                 tone={meaningOf(result, method.range, method.unit).tone}
               />
-              {meaningOf(result, method.range, method.unit).sentence}
+              {result.advice === undefined && meaningOf(result, method.range, method.unit).sentence}
             </p>
           </div>
         </Card>
