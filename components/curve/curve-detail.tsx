@@ -72,26 +72,26 @@ function Versions({ curve, timeZone }: { curve: CurveView; timeZone: string }) {
 
 /** Everything of a saved curve under its title. */
 export function CurveDetail({ curve, timeZone }: { curve: CurveView; timeZone: string }) {
-  const { method, standards, answer } = curve;
+  const { method, standards, result } = curve;
   const spectrumHref = (id: string) => `/notebooks/${curve.notebookId}/spectra/${id}`;
   return (
     <div className="grid gap-4.5">
       <CurveStatusNotice curve={curve} />
       <HazardNote note={method.hazardNote} />
-      <CurveFacts curve={answer.curve} />
+      <CurveFacts curve={result.curve} />
       <Columns share="even">
         <div className="grid min-w-0 gap-4.5">
           <Card flush title="Standards" aside={originWords(curve)}>
             <StandardsTable
-              rows={standardRows(standards, answer.curve)}
+              rows={standardRows(standards, result.curve)}
               unit={method.unit}
               spectrumHref={spectrumHref}
             />
           </Card>
-          <CurveJudgements curve={answer.curve} />
+          <CurveJudgements curve={result.curve} />
         </div>
         <div className="grid min-w-0 gap-4.5">
-          <CurvePlots standards={standards} curve={answer.curve} />
+          <CurvePlots standards={standards} curve={result.curve} />
           <MethodFacts curve={curve} />
         </div>
       </Columns>

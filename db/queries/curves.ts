@@ -79,7 +79,7 @@ export async function loadCurve(actor: Actor, id: string): Promise<CurveView> {
     method,
     standards,
     request: curveRequest(method, standards),
-    answer: row.result,
+    result: row.result,
     versions: versions.map((version) => curveVersionView(version, names)),
     mayEdit: await may(actor, 'curve', 'edit', row),
   };

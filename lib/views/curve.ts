@@ -57,7 +57,7 @@ export interface CurveView extends CurveSummary {
   readonly method: MethodView;
   readonly standards: readonly StandardView[];
   readonly request: CurveRequest;
-  readonly answer: CurveAnswer;
+  readonly result: CurveAnswer;
   /** Newest first. */
   readonly versions: readonly CurveVersionView[];
   /** Whether the reader may make a version or declare it void. Never the guard itself. */

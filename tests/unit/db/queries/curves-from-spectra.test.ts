@@ -59,7 +59,7 @@ test('reads the stored spectra by the rule and keeps where each reading came fro
     spectrumName: 'S2',
     rule: { kind: 'point', wavelengthNm: 502, minusNm: 500 },
   });
-  expect(curve.answer).toEqual(calculateStandardCurve(curve.request));
+  expect(curve.result).toEqual(calculateStandardCurve(curve.request));
 });
 
 test('a wavelength outside a spectrum is refused at its reading', async () => {

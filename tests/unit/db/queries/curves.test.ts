@@ -61,7 +61,7 @@ describe('saveCurve', () => {
       [0.3998, 'typed'],
       [0.3941, 'typed'],
     ]);
-    expect(curve.answer).toEqual(calculateStandardCurve(curve.request));
+    expect(curve.result).toEqual(calculateStandardCurve(curve.request));
     expect(await curveRequestOf(reader, id)).toEqual(curve.request);
   });
 
@@ -82,7 +82,7 @@ describe('saveCurve', () => {
       slope: '99',
     };
     const forged = await loadCurve(analyst, (await saveCurve(analyst, saveCurveForm.parse(form))).id);
-    expect(forged.answer.curve.slope).toEqual(honest.answer.curve.slope);
+    expect(forged.result.curve.slope).toEqual(honest.result.curve.slope);
     expect(JSON.stringify(forged)).not.toContain('99}');
     const inReading = curveDraftInput();
     Object.assign(inReading.standards[0]?.readings[0] ?? {}, { absorbance: 99 });
@@ -114,7 +114,7 @@ describe('saveCurve', () => {
     expect(curve.n).toBe(11);
     expect(curve.standards[4]?.excludedReason).toBe('flask overfilled');
     expect(curve.standards[1]?.readings[2]).toMatchObject({ value: 0.2027, excludedReason: 'bubble' });
-    expect(curve.answer.curve.points.filter((point) => point.excluded)).toHaveLength(4);
+    expect(curve.result.curve.points.filter((point) => point.excluded)).toHaveLength(4);
   });
 
   test('a reading without a number keeps what the instrument showed', async () => {
@@ -186,7 +186,7 @@ describe('versions', () => {
     const { id } = await save(owner, { baseId: firstId, draft });
     const [first, second] = [await loadCurve(analyst, firstId), await loadCurve(analyst, id)];
     expect(first).toMatchObject({ status: 'superseded', newer: { id, version: 2 } });
-    expect(first.answer).toEqual(before.answer);
+    expect(first.result).toEqual(before.result);
     expect(second).toMatchObject({
       version: 2,
       reason: 'S5 prepared again',

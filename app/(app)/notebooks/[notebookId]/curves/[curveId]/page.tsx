@@ -22,7 +22,7 @@ function Actions({ curve }: { curve: CurveView }) {
     <>
       <WorkingDialog
         title={`The working of ${curve.title}`}
-        steps={curve.answer.curve.working}
+        steps={curve.result.curve.working}
         prefix="curve"
       />
       {curve.mayEdit && curve.status !== 'void' && <VoidCurve curve={curve} action={declareVoid} />}

@@ -123,11 +123,11 @@ export default async function DeterminationPage({
       </Columns>
       <Card title="Show the working" aside={`engine ${determination.engineVersion}`}>
         <Disclosure summary="Every step from the readings to the report, with these numbers">
-          <WorkingList steps={result.working} prefix="result" behind={curve.answer.curve.working} />
+          <WorkingList steps={result.working} prefix="result" behind={curve.result.curve.working} />
         </Disclosure>
         <div className="mt-3">
           <Disclosure summary="The steps of the standard curve behind it">
-            <WorkingList steps={curve.answer.curve.working} prefix="result" />
+            <WorkingList steps={curve.result.curve.working} prefix="result" />
           </Disclosure>
         </div>
       </Card>
