@@ -1,6 +1,7 @@
 import { Op } from 'sequelize';
 import { AppError } from '@/lib/errors';
 import type { Actor } from '@/lib/policies/actor';
+import { RULES } from '@/lib/policies/rules';
 import type { NewNotebook, NotebookArchiving, NotebookChange } from '@/lib/schemas/notebook';
 import type { Page, PageQuery } from '@/lib/schemas/page-query';
 import type { NotebookProgress, NotebookSummary, NotebookView, PersonName } from '@/lib/views/notebook';
@@ -92,6 +93,8 @@ export async function possibleOwners(actor: Actor): Promise<PersonName[]> {
 /** Make a notebook; whoever makes it for somebody else becomes a contributor. @throws AppError NOT_ALLOWED */
 export function createNotebook(actor: Actor, input: NewNotebook): Promise<{ id: string }> {
   return inTransaction(async () => {
+    if (!RULES.notebook.create(actor))
+      throw new AppError('NOT_ALLOWED', 'You may read notebooks, not make them');
     const owners = await possibleOwners(actor);
     if (!owners.some((owner) => owner.id === input.ownerId))
       throw new AppError('INVALID_INPUT', 'A notebook is owned by a PI', [
