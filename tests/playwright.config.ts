@@ -23,11 +23,12 @@ export default defineConfig({
   workers: 2,
   retries: 0,
   forbidOnly: true,
-  timeout: 60_000,
-  expect: { timeout: 15_000 },
+  timeout: 120_000,
+  expect: { timeout: 20_000 },
   use: {
     baseURL: process.env.HALFLIGHT_E2E_URL,
-    trace: 'retain-on-failure',
+    // a trace films every page: on two cores that costs more than the tests themselves
+    trace: 'off',
     screenshot: 'only-on-failure',
     launchOptions: {
       executablePath,
