@@ -10,11 +10,11 @@ function lineFact({ model, slope, intercept }: CurveResult): Fact {
     value: (
       <span className="inline-flex flex-wrap gap-x-2">
         <span className="whitespace-nowrap">
-          <ShortQuantity {...slope} /> c
+          <ShortQuantity {...slope} inSum /> c
         </span>
         {model !== 'proportional' && (
           <span className="whitespace-nowrap">
-            {below ? '\u2212' : '+'} <ShortQuantity value={Math.abs(intercept.value)} u={intercept.u} />
+            {below ? '\u2212' : '+'} <ShortQuantity value={Math.abs(intercept.value)} u={intercept.u} inSum />
           </span>
         )}
       </span>

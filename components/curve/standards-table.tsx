@@ -38,8 +38,8 @@ function Reading({ cell, spectrumHref }: ReadingLook) {
       className={CLOSE}
       title={cell.leftOutBecause ? `left out: ${cell.leftOutBecause}` : undefined}
     >
-      <span className="inline-flex items-center gap-1.5">
-        <LightDisc absorbance={cell.absorbanceAsRead} reason={cell.gapText ?? undefined} size={14} />
+      <span className="inline-flex items-center gap-1">
+        <LightDisc absorbance={cell.absorbanceAsRead} reason={cell.gapText ?? undefined} size={13} />
         <ReadingText cell={cell} spectrumHref={spectrumHref} />
       </span>
       {cell.leftOutBecause && <span className="sr-only">, left out: {cell.leftOutBecause}</span>}
@@ -49,7 +49,7 @@ function Reading({ cell, spectrumHref }: ReadingLook) {
 
 const signed = (percent: number) => `${percent > 0 ? '+' : ''}${formatDecimals(percent, 1)} %`;
 /** Cells stand closer here than in other tables: many readings, one line. */
-const CLOSE = 'not-last:px-2!';
+const CLOSE = 'not-last:px-1.5!';
 
 /** Decimals that give the top standard four digits; all read-backs share them, so that their points align. */
 function decimalsOf(rows: readonly StandardRowView[]): number {

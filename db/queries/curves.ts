@@ -92,11 +92,12 @@ export async function curveRequestOf(actor: Actor, id: string): Promise<CurveReq
 }
 
 /** Declare a curve void; it stays to be seen. @throws AppError NOT_FOUND, NOT_ALLOWED, CHANGED_MEANWHILE */
-export function voidCurve(actor: Actor, { curveId, reason }: VoidCurve): Promise<void> {
+export function voidCurve(actor: Actor, { curveId, reason }: VoidCurve): Promise<{ notebookId: string }> {
   return inTransaction(async () => {
     const row = await loadFor(actor, 'curve', 'edit', curveId);
     if (row.status === 'void')
       throw new AppError('CHANGED_MEANWHILE', `This version is void already: ${row.voidReason ?? ''}`);
     await changeFor(actor, row, { status: 'void', voidReason: reason }, reason);
+    return { notebookId: row.notebookId };
   });
 }

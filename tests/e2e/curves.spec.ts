@@ -137,11 +137,12 @@ test('a pasted block, a standard and a reading left out with reasons, a new vers
   await expect(line(page)).toContainText('11 readings in the fit');
   await save(page);
 
-  await expect(page.getByText('flask overfilled')).toBeVisible();
-  await expect(page.getByText('bubble in the cell')).toBeVisible();
+  const leftOut = page.getByRole('list', { name: 'Left out of the fit' });
+  await expect(leftOut).toContainText('S5 left out: flask overfilled');
+  await expect(leftOut).toContainText('S2, reading 3 left out: bubble in the cell');
   await expect(page.getByText('Hydroxylamine: toxic. Gloves.')).toBeVisible();
   await page.getByRole('button', { name: 'Show the working' }).click();
-  await expect(dialog.getByText('Readings in the fit')).toBeVisible();
+  await expect(dialog.getByRole('cell', { name: 'Readings in the fit' })).toBeVisible();
   await page.keyboard.press('Escape');
   await expectNoSeriousFinding(page);
 
@@ -155,6 +156,7 @@ test('a pasted block, a standard and a reading left out with reasons, a new vers
   await page.getByRole('link', { name: 'Version 1', exact: true }).click();
   await expect(page.getByText('Version 1 is superseded')).toBeVisible();
   await page.getByRole('link', { name: 'Go to version 2' }).click();
+  await expect(page.getByText('Version 2, shown here')).toBeVisible();
 
   await page.getByRole('button', { name: 'Void' }).click();
   await dialog.getByRole('button', { name: 'Declare it void' }).click();
@@ -163,6 +165,59 @@ test('a pasted block, a standard and a reading left out with reasons, a new vers
   await dialog.getByRole('button', { name: 'Declare it void' }).click();
   await expect(page.getByText('Version 2 is void')).toBeVisible();
   await expect(page.getByText('wrong cell').first()).toBeVisible();
+});
+
+/** A band about 510 nm with invented numbers, as a table of two columns. */
+function spectrumFile(name: string, height: number) {
+  const lines = Array.from({ length: 101 }, (_, i) => {
+    const nm = 460 + i;
+    return `${nm},${(0.01 + height * Math.exp(-(((nm - 510) / 30) ** 2))).toFixed(5)}`;
+  });
+  const text = ['Wavelength (nm),Absorbance', ...lines, ''].join('\n');
+  return { name: `${name}.csv`, mimeType: 'text/csv', buffer: Buffer.from(text) };
+}
+
+test('a curve from spectra: chosen, given concentrations, read by a rule, a reading outside refused', async ({
+  page,
+}) => {
+  test.slow();
+  await signInAs(page, 'pi');
+  const notebook = await makeNotebook(page, 'From spectra');
+  await page.goto(`${notebook}/spectra`);
+  const files = [0.2, 0.4, 0.81, 1.2].map((height, index) => spectrumFile(`std ${index + 1}`, height));
+  await page.getByLabel('Spectrum files').setInputFiles(files);
+  await expect(page.getByText('4 of 4 files done')).toBeVisible();
+  await openNewCurve(page, notebook);
+  await page.getByLabel('Analyte').fill('Dye');
+  await page.locator('#main').getByText('From spectra', { exact: true }).click();
+  await page.getByRole('group', { name: 'How it is read' }).getByLabel('Wavelength').fill('510');
+  await page.getByRole('button', { name: 'Choose spectra' }).click();
+  await page.getByRole('button', { name: 'Choose all 4' }).click();
+  await page.getByRole('button', { name: 'Take these 4 spectra' }).click();
+  const spectra = page.getByRole('grid', { name: 'Spectra of the standards' });
+  await expect(spectra.getByRole('gridcell', { name: 'A read, row 1: 0.2100' })).toBeVisible();
+  await spectra.getByRole('gridcell', { name: /^Concentration.*, row 1:/ }).click();
+  await pasteBlock(page, '1\n2\n4\n6');
+  await expect(line(page)).toContainText('1 to 6');
+
+  await page.getByRole('group', { name: 'How it is read' }).getByLabel('Wavelength').fill('900');
+  await expect(
+    page
+      .getByRole('status')
+      .filter({ hasText: /outside/ })
+      .first(),
+  ).toBeVisible();
+  await page.getByRole('group', { name: 'How it is read' }).getByLabel('Wavelength').fill('510');
+  await expect(line(page)).toContainText('1 to 6');
+  await save(page);
+  await expect(page.getByText('4 readings, from spectra, interpolated at 510 nm')).toBeVisible();
+  const standards = page.getByRole('table', { name: 'Standards' });
+  await expect(standards.getByRole('link', { name: '0.2100' })).toHaveAttribute(
+    'href',
+    /\/spectra\/[0-9a-f-]{36}$/,
+  );
+  await page.getByRole('link', { name: 'New version' }).click();
+  await expect(spectra.getByRole('gridcell', { name: /^Concentration.*, row 4: 6$/ })).toBeVisible();
 });
 
 test('what is wrong is said at its place, and nothing typed is lost', async ({ page }) => {
@@ -236,22 +291,21 @@ test('the API calculates, refuses with a pointer, and lists what was saved', asy
   const { items } = (await list.json()) as { items: { id: string; slope: { value: number } }[] };
   const one = await api.get(`/api/v1/curves/${items[0]?.id}`);
   expect(one.headers().etag).toBeTruthy();
-  const { request, answer } = await one.json();
+  const { request, result } = await one.json();
 
   const post = (data: unknown) =>
     api.post('/api/v1/calculations/standard-curve', {
       data: data as object,
       headers: { 'sec-fetch-site': 'same-origin' },
     });
-  const { pathLengthKnown: _known, ...asked } = request;
-  const calculated = await (await post(asked)).json();
-  expect(calculated.curve.slope).toEqual(answer.curve.slope);
+  const calculated = await (await post(request)).json();
+  expect(calculated.curve.slope).toEqual(result.curve.slope);
 
-  const wrong = await post({ ...asked, pathLengthMm: 0 });
+  const wrong = await post({ ...request, pathLengthMm: 0 });
   expect(wrong.status()).toBe(422);
   expect(wrong.headers()['content-type']).toContain('application/problem+json');
   expect((await wrong.json()).errors).toEqual([expect.objectContaining({ pointer: '/pathLengthMm' })]);
-  const typed = await post({ ...asked, standards: [{ concentration: 'one', readings: [1] }] });
+  const typed = await post({ ...request, standards: [{ concentration: 'one', readings: [1] }] });
   expect((await typed.json()).errors[0].pointer).toBe('/standards/0/concentration');
   const broken = await api.post('/api/v1/calculations/standard-curve', {
     data: Buffer.from('{'),
