@@ -6,7 +6,10 @@ import type { Actor, MemberRole, Role } from '@/lib/policies/actor';
 let count = 0;
 
 /** A person of the laboratory; the actor comes through a session unless said. */
-export async function makePerson(role: Role, name = `Person ${(count += 1)}`): Promise<{ id: string; name: string }> {
+export async function makePerson(
+  role: Role,
+  name = `Person ${(count += 1)}`,
+): Promise<{ id: string; name: string }> {
   count += 1;
   const row = await inTransaction(() =>
     createFor(systemActor(), 'person', { name, email: `p${count}@example.test`, role, passwordHash: null }),

@@ -9,12 +9,6 @@ const readme = sourceText('README.md');
 const guide = sourceText('DEVELOPERS.md');
 const { scripts } = JSON.parse(sourceText('package.json')) as { scripts: Record<string, string> };
 
-/** First cells of the table rows under a heading. */
-function firstCells(text: string, heading: string): string[] {
-  const section = text.split(`\n## ${heading}\n`)[1]?.split('\n## ')[0] ?? '';
-  return [...section.matchAll(/^\| `([^`]+)` *\|/gm)].map(([, cell = '']) => cell);
-}
-
 describe('README', () => {
   test('opens with the job and then the two commands', () => {
     const [title, job, ...rest] = readme.split(/\n{2,}/);
@@ -24,7 +18,9 @@ describe('README', () => {
   });
 
   test('names every flag with its level and meaning, and no other', () => {
-    const rows = [...readme.matchAll(/^\| `([A-Z_]+)` *\| (\w+) *\| (.+?) *\|$/gm)].map(([, ...cells]) => cells);
+    const rows = [...readme.matchAll(/^\| `([A-Z_]+)` *\| (\w+) *\| (.+?) *\|$/gm)].map(
+      ([, ...cells]) => cells,
+    );
     const flags = Object.entries(FLAGS).map(([code, { level, meaning }]) => [code, level, meaning]);
     expect(rows.sort()).toEqual(flags.sort());
   });
@@ -32,7 +28,11 @@ describe('README', () => {
   test('names every script, and only scripts that are there', () => {
     const named = new Set([...readme.matchAll(/`npm (?:run )?([a-z0-9]+)`/g)].map(([, name = '']) => name));
     const lifecycle = /^pre/;
-    expect([...named].sort()).toEqual(Object.keys(scripts).filter((name) => !lifecycle.test(name)).sort());
+    expect([...named].sort()).toEqual(
+      Object.keys(scripts)
+        .filter((name) => !lifecycle.test(name))
+        .sort(),
+    );
   });
 
   test('shows a picture that is there', () => {
@@ -44,7 +44,9 @@ describe('README', () => {
 describe('DEVELOPERS', () => {
   test('names folders and files that are there', () => {
     const named = [...guide.matchAll(/`((?:app|components|lib|db|tests|fixtures|public)\/[^`*…]*)`/g)];
-    const missing = named.map(([, name = '']) => name).filter((name) => !existsSync(path.join(projectRoot, name)));
+    const missing = named
+      .map(([, name = '']) => name)
+      .filter((name) => !existsSync(path.join(projectRoot, name)));
     expect(missing).toEqual([]);
   });
 });
