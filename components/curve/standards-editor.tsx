@@ -4,12 +4,12 @@ import type { ReactNode } from 'react';
 import { ReadingsGrid } from '@/components/grid/readings-grid';
 import { LightDisc } from '@/components/light-disc';
 import { ReadingRuleForm } from '@/components/spectrum/reading-rule-form';
-import { Button, LinkButton } from '@/components/ui/button';
+import { LinkButton } from '@/components/ui/button';
 import { Field } from '@/components/ui/field';
 import { Notice } from '@/components/ui/notice';
 import { SegmentedControl } from '@/components/ui/radio-group';
 import { cellIssues, SPECTRA_COLUMNS, TYPED_COLUMNS, type DraftIssues } from '@/lib/curve/draft-issues';
-import { BLANK_WORD, cellKey, looksLikeBlank, SPECTRUM_READING_COLUMN } from '@/lib/curve/grid-standards';
+import { BLANK_WORD, cellKey, SPECTRUM_READING_COLUMN } from '@/lib/curve/grid-standards';
 import { absorbanceOf, type Signal } from '@/lib/engine';
 import { absorbanceText } from '@/lib/format/optical';
 import { cellContent, type GridColumn } from '@/lib/grid/grid-cell';
@@ -18,6 +18,7 @@ import { spectrumRule } from '@/lib/schemas/spectrum-rule';
 import type { SpectrumView } from '@/lib/views/spectrum';
 import { SignalField } from './method-fields';
 import { SpectraPicker } from './spectra-picker';
+import { BlankAdvice, LimitAdvice, PathAdvice } from './standards-advice';
 import type { CurveFormState } from './use-curve-form';
 
 interface EditorProps {
@@ -34,41 +35,6 @@ function discOf(signal: Signal) {
     if (content.state !== 'number') return null;
     return <LightDisc absorbance={absorbanceOf(content.value, signal).value} size={13} silent />;
   };
-}
-
-/** Says what a row that is a blank needs, before the calculation has to refuse it. */
-function BlankAdvice({ form }: { form: CurveFormState }) {
-  const { calculation, spelled, typed, source } = form;
-  const ruleIsNone = calculation.blankRule === 'none';
-  const hasBlank = spelled.standards.some(({ role }) => role === 'blank');
-  if (ruleIsNone && hasBlank)
-    return (
-      <Notice tone="decide">
-        The blank takes no part while the blank rule is “none”. Choose below what is done with it.
-      </Notice>
-    );
-  const column = typed.spec.columns[TYPED_COLUMNS.concentration];
-  const at = typed.state.rows.findIndex(
-    ({ cells }) => column && looksLikeBlank(cells[0] ?? '', cells[1] ?? '', column),
-  );
-  if (source !== 'typed' || ruleIsNone || hasBlank || at < 0) return null;
-  const setCell = {
-    type: 'setCell',
-    row: at,
-    column: TYPED_COLUMNS.concentration,
-    text: BLANK_WORD,
-  } as const;
-  return (
-    <Notice
-      action={
-        <Button size="small" onClick={() => typed.dispatch(setCell)}>
-          Use it as the blank
-        </Button>
-      }
-    >
-      Row {at + 1} is named like a blank and stands among the standards as zero.
-    </Notice>
-  );
 }
 
 function TypedStandards({ form, issues }: EditorProps) {
@@ -168,45 +134,6 @@ function SpectraGrid({ form, issues }: EditorProps) {
           : undefined
       }
     />
-  );
-}
-
-/** What a file says of its path against what the method says; the method decides, and the person is told. */
-function PathAdvice({ form }: { form: CurveFormState }) {
-  const { readings, spectrumIds, calculation } = form;
-  const own = Number(calculation.pathLengthMm.replace(',', '.'));
-  const other = spectrumIds.flatMap((id) => {
-    const read = readings.spectra.get(id);
-    if (!read || read.pathLengthMm === null || read.pathLengthMm === own) return [];
-    return [read];
-  });
-  const [first] = other;
-  if (!first) return null;
-  return (
-    <Notice tone="decide">
-      The file of {first.name} states a path of {first.pathLengthMm} mm
-      {other.length > 1 && `, and ${other.length - 1} more state another than the method`}; the method says{' '}
-      {calculation.pathLengthMm} mm. The method counts: correct the one that is wrong.
-    </Notice>
-  );
-}
-
-/** The limit belongs to the reading as it came; after a second wavelength is taken off it no longer shows. */
-function LimitAdvice({ form }: { form: CurveFormState }) {
-  const { readings, spectrumIds, calculation } = form;
-  const limit = Number(calculation.absorbanceLimit.replace(',', '.'));
-  const above = spectrumIds.flatMap((id) => {
-    const read = readings.spectra.get(id);
-    return read && read.minusValue !== null && (read.mainValue ?? 0) > limit ? [read] : [];
-  });
-  const [first] = above;
-  if (!first) return null;
-  return (
-    <Notice tone="decide">
-      {first.name} reads {absorbanceText(first.mainValue ?? 0)} before the second wavelength is taken off
-      {above.length > 1 && `, and ${above.length - 1} more read too high`}: above the limit of{' '}
-      {calculation.absorbanceLimit}. Leave it out, or dilute and measure again.
-    </Notice>
   );
 }
 
