@@ -116,7 +116,7 @@ test('pasted samples are calculated as they are typed, saved, and each says what
 
 test('the table is copied with the decimal mark asked for and downloaded as CSV', async ({ page }) => {
   await batchWithSamples(page, 'Results that leave');
-  await page.getByText('0,5', { exact: true }).click();
+  await page.getByRole('radio', { name: '0,5' }).check();
   await page.getByRole('button', { name: 'Copy table' }).click();
   await expect(page.getByRole('button', { name: 'Copied' })).toBeVisible();
   const copied = await page.evaluate(() => navigator.clipboard.readText());
@@ -233,7 +233,7 @@ test('samples from spectra: replicates found by name, read by the rule, and save
   await expect(page.getByText('2 of 2 files done')).toBeVisible();
   await makeCurve(page, notebook);
   await makeBatch(page, notebook, 'From the instrument');
-  await page.getByRole('link', { name: 'From spectra' }).click();
+  await page.getByRole('link', { name: 'From spectra', exact: true }).click();
   await page.getByRole('button', { name: 'Choose all shown' }).click();
   await expect(page.getByRole('list', { name: 'Spectra of S01' }).getByRole('listitem')).toHaveCount(2);
   await page.getByLabel('Dilution of S01').fill('1+9');

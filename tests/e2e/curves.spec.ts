@@ -82,7 +82,7 @@ test('a curve is typed, corrected and saved by the keyboard alone', async ({ pag
   await page.keyboard.press('Enter');
   await expect(cell(page, 'A1', 3)).toHaveAttribute('aria-invalid', 'true');
   await page.keyboard.press('ArrowUp');
-  await expect(page.getByRole('status').filter({ hasText: '1.234 or 1234' })).toBeVisible();
+  await expect(page.getByRole('status').filter({ hasText: '1.234 or 1234' }).first()).toBeVisible();
   await page.keyboard.press('Control+z');
   await expect(cell(page, 'A1', 3)).not.toHaveAttribute('aria-invalid', 'true');
 
@@ -189,7 +189,7 @@ test('a curve from spectra: chosen, given concentrations, read by a rule, a read
   await expect(page.getByText('4 of 4 files done')).toBeVisible();
   await openNewCurve(page, notebook);
   await page.getByLabel('Analyte').fill('Dye');
-  await page.locator('#main').getByText('From spectra', { exact: true }).click();
+  await page.getByRole('radio', { name: 'From spectra' }).check();
   await page.getByRole('group', { name: 'How it is read' }).getByLabel('Wavelength').fill('510');
   await page.getByRole('button', { name: 'Choose spectra' }).click();
   await page.getByRole('button', { name: 'Choose all 4' }).click();

@@ -63,7 +63,7 @@ async function makeCurve(page: Page, notebook: string, job: Job) {
   await page.getByLabel('Concentration unit').selectOption(job.unit);
   await page.getByLabel('Formula mass of the basis').fill(job.formulaMass);
   if (!job.pathKnown) await page.getByLabel('The path length is known, not assumed').uncheck();
-  await page.getByText('From spectra', { exact: true }).click();
+  await page.getByRole('radio', { name: 'From spectra' }).check();
   const rule = page.getByRole('group', { name: 'How it is read' });
   await rule.getByLabel('Read', { exact: true }).selectOption({ label: job.rule.kind });
   for (const [label, value] of Object.entries(job.rule.fields)) await rule.getByLabel(label).fill(value);
