@@ -63,12 +63,12 @@ function NewerVersion({
 }
 
 /** Why the form cannot be sent yet, and what the server said when it was. */
-function blockedBy(form: CurveFormState, issues: DraftIssues): string | null {
+function blockedBy(form: CurveFormState, issues: DraftIssues, live = form.live): string | null {
   const count = Object.keys(issues).length;
   if (count > 0)
     return `${count === 1 ? 'One entry needs' : `${count} entries need`} another look: each says why at its place`;
   if (form.source === 'spectra' && form.readings.loading) return 'The spectra are still being read';
-  return form.live.answer ? null : form.live.sentence;
+  return live.answer ? null : live.sentence;
 }
 
 /** Before the form was sent, only what has a usual value and was made wrong speaks up; the rest may yet come. */
@@ -88,7 +88,7 @@ function useSaving({ notebookId, start, base, spectra, save }: CurveFormProps) {
 
   function onSubmit(event: FormEvent) {
     setTried(true);
-    if (blocked !== null) event.preventDefault();
+    if (blockedBy(form, own, form.liveNow()) !== null) event.preventDefault();
   }
   // once the sentences stand at their fields, the keyboard is taken to the first of them
   useEffect(() => {

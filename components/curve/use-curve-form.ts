@@ -99,7 +99,9 @@ export function useCurveForm(notebookId: string, start: FormStart, spectra: read
   );
   const deferred = useDeferredValue(input);
   const live = useMemo(() => liveCurve(deferred), [deferred]);
-  return { ...entries, draft, live, readings };
+  // the result beside the form may lag behind the last key; what is asked when the form is sent must not
+  const liveNow = () => (deferred === input ? live : liveCurve(input));
+  return { ...entries, draft, live, liveNow, readings };
 }
 
 export type CurveFormState = ReturnType<typeof useCurveForm>;
