@@ -54,7 +54,8 @@ export function ReadingsCard({
           {all.map((reading) => {
             const gone = reading.supersededAt !== null;
             return (
-              <tr key={reading.id}>
+              // a reading in use keeps its row when another takes its place, and with it an open correction
+              <tr key={gone ? reading.id : `in use ${reading.position}`}>
                 <RowHead className="font-normal">
                   {SIGNAL_SYMBOL[reading.signal]}
                   <sub>{reading.position}</sub>

@@ -13,7 +13,7 @@ const ENDINGS = [
   /^(.*\S)\s*\(\d+\)$/,
   /^(.*\S)\s*\[\d+\]$/,
   /^(.*\S)\s*#\d+$/,
-  /^(.*\S)[\s_-]+(?:rep|r|replicate)\s*\d+$/i,
+  /^(.*\S)[\s_-]+(?:rep|r|replicate|reading|run|scan)\s*\d+$/i,
 ];
 
 /** The sample a spectrum belongs to by its name: "S01 (2)", "S01 #2" and "S01_rep2" are replicates of S01. */

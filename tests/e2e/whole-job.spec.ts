@@ -38,9 +38,14 @@ async function upload(page: Page, notebook: string, files: readonly string[]) {
 async function chooseStandards(page: Page, job: Job) {
   await page.getByRole('button', { name: 'Choose spectra' }).click();
   const dialog = page.getByRole('dialog');
+  const standards = new Map<string, { name: string; mg: string }>();
   for (const box of await dialog.getByRole('listitem').all()) {
-    const name = (await box.locator('span.font-medium').textContent()) ?? '';
-    if (job.concentrationOf(name)) await box.getByRole('checkbox').check();
+    const name = ((await box.locator('span.font-medium').textContent()) ?? '').trim();
+    // name and file, as the list shows them: a file's own title may leave the sample out
+    const standard = job.concentrationOf((await box.textContent()) ?? '');
+    if (!standard) continue;
+    standards.set(name, standard);
+    await box.getByRole('checkbox').check();
   }
   await dialog.getByRole('button', { name: /^Take these/ }).click();
   const grid = page.getByRole('grid', { name: 'Spectra of the standards' });
@@ -48,7 +53,7 @@ async function chooseStandards(page: Page, job: Job) {
     name.trim(),
   );
   const block = names.map((name) => {
-    const standard = job.concentrationOf(name);
+    const standard = standards.get(name);
     return `${standard?.name}\t${standard?.mg}`;
   });
   await page.evaluate((text) => navigator.clipboard.writeText(text), block.join('\n'));
@@ -73,7 +78,7 @@ async function makeCurve(page: Page, notebook: string, job: Job) {
   return standards;
 }
 
-async function makeBatch(page: Page, notebook: string, samples: readonly string[]) {
+async function makeBatch(page: Page, notebook: string, samples: readonly string[], replicatesOf?: string) {
   await page.goto(`${notebook}/batches/new`);
   await page.getByLabel('Title').fill('First batch');
   await page.getByRole('button', { name: 'Create batch' }).click();
@@ -84,6 +89,11 @@ async function makeBatch(page: Page, notebook: string, samples: readonly string[
     const boxes = page.getByRole('table', { name: 'Spectra to choose from' }).getByRole('checkbox');
     for (const box of await boxes.all()) await box.check();
   }
+  if (replicatesOf !== undefined)
+    for (const label of await page.getByLabel(/^Sample of /).all()) {
+      await label.fill(replicatesOf);
+      await label.press('Enter');
+    }
   await page.getByRole('button', { name: /^Save \d+ samples?$/ }).click();
   await expect(page.getByRole('heading', { level: 1, name: 'First batch' })).toBeVisible({ timeout: 60_000 });
   return new URL(page.url()).pathname;
@@ -187,7 +197,7 @@ test('rhodamine 6G: fifteen real files, an unknown, and a correction that halves
       .filter((name) => name.startsWith('Rhodamine'))
       .map((name) => path.join(folder, name)),
     concentrationOf: (spectrum) => {
-      const letter = /(?:_|\s)([ADEF])[ _]?\d\b/.exec(spectrum)?.[1] ?? /^([ADEF])\d$/.exec(spectrum)?.[1];
+      const letter = /methanol_([ADEF])\d\.csv/.exec(spectrum)?.[1];
       return letter ? { name: letter, mg: mmol[letter] ?? '' } : null;
     },
     analyte: 'Rhodamine 6G',
@@ -206,7 +216,7 @@ test('rhodamine 6G: fifteen real files, an unknown, and a correction that halves
   const maximum = await curveOf(page, notebook);
   expect(maximum.slope.value).toBeCloseTo(0.9672, 4);
   expect(maximum.molarAbsorptivity).toBeUndefined();
-  const first = [...(await answers(page, await makeBatch(page, notebook, ['_C']))).values()][0];
+  const first = [...(await answers(page, await makeBatch(page, notebook, ['_C'], 'C'))).values()][0];
   expect(first?.measured?.value).toBeCloseTo(0.073754, 5);
   expect(first?.measured?.u).toBeCloseTo(0.003, 4);
 
@@ -215,7 +225,7 @@ test('rhodamine 6G: fifteen real files, an unknown, and a correction that halves
     fields: { Wavelength: '528', 'Minus the reading at': '700' },
   });
   await makeCurve(page, notebook, corrected);
-  const second = [...(await answers(page, await makeBatch(page, notebook, ['_C']))).values()][0];
+  const second = [...(await answers(page, await makeBatch(page, notebook, ['_C'], 'C'))).values()][0];
   expect(second?.measured?.value).toBeCloseTo(0.074973, 5);
   expect(second?.measured?.u).toBeCloseTo(0.0018, 4);
 });
