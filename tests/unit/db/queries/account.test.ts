@@ -77,7 +77,7 @@ describe('the own account', () => {
 });
 
 describe('changing the password', () => {
-  test('keeps this session, ends the others, withdraws links', async () => {
+  test('keeps the session in use, ends the others, withdraws links', async () => {
     const { id, email, actor } = await withPassword();
     const other = await openSession(id);
     const link = await makePasswordLink(await makeActor('administrator'), id);
