@@ -64,6 +64,7 @@ function told({ standards }: StoredCurve) {
     ...(standard.excludedReason === null ? {} : { leftOut: standard.excludedReason }),
     readings: standard.readings.map((reading) => ({
       value: reading.value ?? reading.gapText,
+      ...(typeof reading.minusValue === 'number' ? { minus: reading.minusValue } : {}),
       ...(reading.spectrumId === null ? {} : { spectrum: reading.spectrumId }),
       ...(reading.excludedReason === null ? {} : { leftOut: reading.excludedReason }),
     })),

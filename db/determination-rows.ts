@@ -50,12 +50,13 @@ export function newReading(
   createdById: string,
 ) {
   const { value, gapReason, gapText, signal, origin, spectrumId, rule } = reading;
+  const minusValue = reading.minusValue ?? null;
   return {
     notebookId: determination.notebookId,
     standardId: null,
     determinationId: determination.id,
     position,
-    ...{ value, gapReason, gapText, signal, origin, spectrumId, rule },
+    ...{ value, minusValue, gapReason, gapText, signal, origin, spectrumId, rule },
     recipe: null,
     pathLengthMm: determination.pathLengthMm,
     excludedReason: null,

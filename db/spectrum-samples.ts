@@ -2,6 +2,7 @@ import type { ReadingRule } from '@/lib/engine';
 import { AppError } from '@/lib/errors';
 import type { Actor } from '@/lib/policies/actor';
 import type { AddSpectrumSamples } from '@/lib/schemas/determination';
+import { keptReading } from '@/lib/spectrum/kept-reading';
 import type { SpectrumReadingView } from '@/lib/views/spectrum';
 import { loadFor } from './access';
 import type { NewReading, NewSample } from './determination-rows';
@@ -14,24 +15,10 @@ export async function methodOfCurve(actor: Actor, curveId: string) {
   return loadFor(actor, 'method', 'read', methodId);
 }
 
-/**
- * What was read off a spectrum, as a reading to keep. With a second wavelength subtracted the difference may
- * look harmless while the reading itself was above the absorbance limit; such a reading is kept as a gap.
- */
-export function readingOf(read: SpectrumReadingView, rule: ReadingRule, absorbanceLimit: number): NewReading {
+/** What was read off a spectrum by a rule, as a reading to keep. */
+export function readingOf(read: SpectrumReadingView, rule: ReadingRule): NewReading {
   const from = { signal: 'absorbance', origin: 'spectrum', spectrumId: read.spectrumId, rule } as const;
-  if (read.value === null)
-    return { ...from, value: null, gapReason: read.gapReason ?? 'missing', gapText: textOfGap(read) };
-  const hidden = Math.max(read.mainValue ?? 0, read.minusValue ?? 0) > absorbanceLimit;
-  if (hidden && read.value <= absorbanceLimit)
-    return { ...from, value: null, gapReason: 'aboveRange', gapText: `>${absorbanceLimit}` };
-  return { ...from, value: read.value, gapReason: null, gapText: null };
-}
-
-/** The engine knows a gap by its text; words of ours for "above range" become the one it knows. */
-function textOfGap({ gapReason, gapText }: SpectrumReadingView): string {
-  if (gapReason === 'aboveRange') return /\d|over/i.test(gapText ?? '') ? (gapText ?? 'OVER') : 'OVER';
-  return gapText ?? '';
+  return { ...keptReading(read), ...from };
 }
 
 /** Read the chosen spectra by the rule of the batch's method. @throws AppError INVALID_INPUT naming the spectrum */
@@ -54,7 +41,7 @@ export async function samplesFromSpectra(
         const detail = `${one?.name ?? 'A spectrum'} cannot be read: ${one?.error ?? 'it is not there'}`;
         throw new AppError('INVALID_INPUT', detail, [{ pointer: `/samples.${index}.spectrumIds`, detail }]);
       }
-      return readingOf(one, method.readingRule, method.absorbanceLimit);
+      return readingOf(one, method.readingRule);
     }),
   }));
 }

@@ -4,7 +4,6 @@ import { Button } from '@/components/ui/button';
 import { Notice } from '@/components/ui/notice';
 import { TYPED_COLUMNS } from '@/lib/curve/draft-issues';
 import { BLANK_WORD, looksLikeBlank } from '@/lib/curve/grid-standards';
-import { absorbanceText } from '@/lib/format/optical';
 import type { CurveFormState } from './use-curve-form';
 
 /* What a person is told about their standards before the calculation has to refuse or to flag them. */
@@ -60,25 +59,6 @@ export function PathAdvice({ form }: { form: CurveFormState }) {
       The file of {first.name} states a path of {first.pathLengthMm} mm
       {other.length > 1 && `, and ${other.length - 1} more state another than the method`}; the method says{' '}
       {calculation.pathLengthMm} mm. The method counts: correct the one that is wrong.
-    </Notice>
-  );
-}
-
-/** The limit belongs to the reading as it came; after a second wavelength is taken off it no longer shows. */
-export function LimitAdvice({ form }: { form: CurveFormState }) {
-  const { readings, spectrumIds, calculation } = form;
-  const limit = Number(calculation.absorbanceLimit.replace(',', '.'));
-  const above = spectrumIds.flatMap((id) => {
-    const read = readings.spectra.get(id);
-    return read && read.minusValue !== null && (read.mainValue ?? 0) > limit ? [read] : [];
-  });
-  const [first] = above;
-  if (!first) return null;
-  return (
-    <Notice tone="decide">
-      {first.name} reads {absorbanceText(first.mainValue ?? 0)} before the second wavelength is taken off
-      {above.length > 1 && `, and ${above.length - 1} more read too high`}: above the limit of{' '}
-      {calculation.absorbanceLimit}. Leave it out, or dilute and measure again.
     </Notice>
   );
 }

@@ -18,7 +18,7 @@ import { spectrumRule } from '@/lib/schemas/spectrum-rule';
 import type { SpectrumView } from '@/lib/views/spectrum';
 import { SignalField } from './method-fields';
 import { SpectraPicker } from './spectra-picker';
-import { BlankAdvice, LimitAdvice, PathAdvice } from './standards-advice';
+import { BlankAdvice, PathAdvice } from './standards-advice';
 import type { CurveFormState } from './use-curve-form';
 
 interface EditorProps {
@@ -117,7 +117,10 @@ function SpectraGrid({ form, issues }: EditorProps) {
         if (column.key !== 'reading') return undefined;
         const read = readOf(row);
         if (!read) return '…';
-        return read.value === null ? (read.gapText ?? 'not read') : absorbanceText(read.value);
+        if (read.value === null) return read.gapText ?? 'not read';
+        return read.minusValue === null
+          ? absorbanceText(read.value)
+          : `${absorbanceText(read.mainValue ?? read.value)} − ${absorbanceText(read.minusValue)}`;
       }}
       adorn={(row, column) =>
         column.key === 'reading' && readOf(row) ? (
@@ -158,7 +161,6 @@ function SpectraStandards({
         </Notice>
       )}
       <PathAdvice form={form} />
-      <LimitAdvice form={form} />
       <BlankAdvice form={form} />
       {issues.standards && <p className="text-sm text-red">▲ {issues.standards}</p>}
       <div>

@@ -14,8 +14,9 @@ interface ReadingLook {
 }
 
 function ReadingText({ cell, spectrumHref }: ReadingLook & { cell: ReadingCell }) {
-  const text =
+  const read =
     cell.absorbanceAsRead === null ? (cell.gapText ?? 'no reading') : absorbanceText(cell.absorbanceAsRead);
+  const text = cell.takenOff === null ? read : `${read} − ${absorbanceText(cell.takenOff)}`;
   const look = cell.absorbanceAsRead === null ? 'text-amber italic' : undefined;
   const struck = cell.leftOutBecause ? (
     <s className="text-ink-2">{text}</s>

@@ -102,7 +102,10 @@ export interface ReadingRow extends Row<ReadingRow> {
   standardId: string | null;
   determinationId: string | null;
   position: number;
+  /** As it came, in its signal. */
   value: number | null;
+  /** What the second wavelength of the rule read, taken off by the calculation; null without one. */
+  minusValue: CreationOptional<number | null>;
   gapReason: 'aboveRange' | 'missing' | 'unreadable' | null;
   /** What stood where the number should be, such as OVER. */
   gapText: string | null;
@@ -131,6 +134,7 @@ export const defineReading = (sequelize: Sequelize) =>
       determinationId: optionalReference,
       position: whole,
       value: optionalReal,
+      minusValue: optionalReal,
       gapReason: optionalText,
       gapText: optionalText,
       signal: text,

@@ -54,9 +54,9 @@ async function movedReadings({ actor, batch, from, to }: Moving, rows: readonly 
     const one = row.spectrumId === null ? undefined : again.get(row.spectrumId);
     if (one?.error !== undefined)
       throw new AppError('INVALID_INPUT', `${one.name} cannot be read by the new curve's rule: ${one.error}`);
-    if (one) return { ...readingOf(one, to.readingRule, to.absorbanceLimit), reason };
-    const { value, gapReason, gapText, signal, origin, spectrumId, rule } = row;
-    return { value, gapReason, gapText, signal, origin, spectrumId, rule, reason };
+    if (one) return { ...readingOf(one, to.readingRule), reason };
+    const { value, minusValue, gapReason, gapText, signal, origin, spectrumId, rule } = row;
+    return { value, minusValue, gapReason, gapText, signal, origin, spectrumId, rule, reason };
   };
 }
 

@@ -58,7 +58,8 @@ export function correctReading(actor: Actor, input: CorrectReading): Promise<Cha
         'CHANGED_MEANWHILE',
         'This reading was corrected meanwhile. Look at the new one first',
       );
-    if (old.value === input.reading.value && old.gapText === input.reading.gapText)
+    const typed = (old.minusValue ?? null) === null;
+    if (typed && old.value === input.reading.value && old.gapText === input.reading.gapText)
       throw sameAsBefore('/reading', 'This is the reading as it stands. Enter another one, or leave it');
     const { signal } = await curveRequestOf(actor, opened.curveId);
     const corrected = { ...input.reading, signal, origin: 'typed', spectrumId: null, rule: null } as const;

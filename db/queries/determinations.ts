@@ -131,7 +131,14 @@ export async function readSpectraForBatch(
   const method = await methodOfCurve(actor, batch.curveId);
   const read = await readingsFromSpectra(actor, batch.notebookId, spectrumIds, method.readingRule);
   return read.map((one) => {
-    const { value, gapText } = readingOf(one, method.readingRule, method.absorbanceLimit);
-    return { spectrumId: one.spectrumId, value, gapText, atNm: one.atNm, error: one.error ?? null };
+    const { value, minusValue = null, gapText } = readingOf(one, method.readingRule);
+    return {
+      spectrumId: one.spectrumId,
+      value,
+      minusValue,
+      gapText,
+      atNm: one.atNm,
+      error: one.error ?? null,
+    };
   });
 }

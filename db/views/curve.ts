@@ -47,6 +47,7 @@ export function readingOfStandard(row: ReadingRow, spectrumNames: Names): Standa
     id: row.id,
     position: row.position,
     value: row.value,
+    minusValue: row.minusValue ?? null,
     gapReason: row.gapReason,
     gapText: row.gapText,
     signal: row.signal,

@@ -6,6 +6,7 @@ export function readingView(row: ReadingRow): DeterminationReadingView {
     id: row.id,
     position: row.position,
     value: row.value,
+    minusValue: row.minusValue ?? null,
     gapReason: row.gapReason,
     gapText: row.gapText,
     signal: row.signal,

@@ -72,7 +72,9 @@ export function liveSample(
   const [path, steps] = [parseDecimal(pathLengthMm), parseDilution(dilution)];
   const readings = spectra.flatMap(({ id }) => {
     const one = read.get(id);
-    return one && one.error === null ? [{ value: one.value, gapText: one.gapText, signal: SIGNAL }] : [];
+    return one && one.error === null
+      ? [{ value: one.value, minusValue: one.minusValue, gapText: one.gapText, signal: SIGNAL }]
+      : [];
   });
   if (!path.ok || path.value <= 0 || !steps.ok || readings.length < spectra.length || sample.trim() === '')
     return null;

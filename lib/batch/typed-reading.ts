@@ -3,7 +3,10 @@ import { parseDecimal } from '@/lib/schemas/decimal';
 
 /** A reading as it is kept: a number, or why there is none and what stood there instead. */
 export interface KeptReading {
+  /** As it came, in its signal; with a second wavelength, the first one's. */
   readonly value: number | null;
+  /** What the second wavelength of the reading rule read, to be taken off; null without one. */
+  readonly minusValue?: number | null;
   readonly gapReason: 'aboveRange' | 'missing' | 'unreadable' | null;
   readonly gapText: string | null;
 }

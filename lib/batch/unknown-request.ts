@@ -1,42 +1,18 @@
-import {
-  absorbanceOf,
-  type CurveRequest,
-  type DilutionStep,
-  type Reading,
-  type Signal,
-  type UnknownRequest,
-} from '@/lib/engine';
-
-/** A reading of an unknown, typed or read from a spectrum, before it is calculated with. */
-export interface UnknownReading {
-  readonly value: number | null;
-  readonly gapText: string | null;
-  readonly signal: Signal;
-}
+import { type CalculatedReading, readingInSignal } from '@/lib/curve/reading-in-signal';
+import type { CurveRequest, DilutionStep, Signal, UnknownRequest } from '@/lib/engine';
 
 export interface UnknownSample {
   readonly sample: string;
   readonly pathLengthMm: number;
   readonly pathLengthUMm?: number | null;
   readonly dilution: readonly DilutionStep[];
-  readonly readings: readonly UnknownReading[];
-}
-
-const FACTOR = { transmittance: 1, percentTransmittance: 100 } as const;
-
-/** A reading in the signal of the curve. A spectrum is read in absorbance; the curve may have been typed in per cent T. */
-function inSignal(reading: UnknownReading, signal: Signal): Reading {
-  if (reading.value === null) return reading.gapText ?? '';
-  if (reading.signal === signal) return reading.value;
-  const { value } = absorbanceOf(reading.value, reading.signal);
-  if (value === null) return 'OVER';
-  return signal === 'absorbance' ? value : FACTOR[signal] * 10 ** -value;
+  readonly readings: readonly CalculatedReading[];
 }
 
 export function unknownOf(sample: UnknownSample, signal: Signal): UnknownRequest {
   return {
     name: sample.sample,
-    readings: sample.readings.map((reading) => inSignal(reading, signal)),
+    readings: sample.readings.map((reading) => readingInSignal(reading, signal)),
     pathLengthMm: sample.pathLengthMm,
     ...(typeof sample.pathLengthUMm === 'number' ? { pathLengthUMm: sample.pathLengthUMm } : {}),
     dilution: sample.dilution,

@@ -1,16 +1,6 @@
-import { absorbanceOf, type BlankRequest, type CurveRequest, type Reading, type Signal } from '@/lib/engine';
-import type { CalculatedMethod, StoredReading, StoredStandard } from './stored-curve';
-
-const SCALE = { transmittance: 1, percentTransmittance: 100 } as const;
-
-/** A kept reading as the engine takes it: the number in the curve's signal, or the text that came instead. */
-function readingOf(reading: StoredReading, signal: Signal): Reading {
-  if (reading.value === null) return reading.gapText ?? '';
-  if (reading.signal === signal) return reading.value;
-  const { value } = absorbanceOf(reading.value, reading.signal);
-  if (value === null) return 'OVER';
-  return signal === 'absorbance' ? value : SCALE[signal] * 10 ** -value;
-}
+import type { BlankRequest, CurveRequest, Reading, Signal } from '@/lib/engine';
+import { readingInSignal } from './reading-in-signal';
+import type { CalculatedMethod, StoredStandard } from './stored-curve';
 
 /** Blank readings by path. One that is left out takes no part, so it does not reach the calculation. */
 function blankOf(method: CalculatedMethod, standards: readonly StoredStandard[]): BlankRequest | undefined {
@@ -21,7 +11,7 @@ function blankOf(method: CalculatedMethod, standards: readonly StoredStandard[])
     const readings = blank.readings.filter((reading) => reading.excludedReason === null);
     byPath.set(blank.pathLengthMm, [
       ...(byPath.get(blank.pathLengthMm) ?? []),
-      ...readings.map((reading) => readingOf(reading, method.signal)),
+      ...readings.map((reading) => readingInSignal(reading, method.signal)),
     ]);
   }
   const own = byPath.get(method.pathLengthMm) ?? [];
@@ -37,7 +27,7 @@ function standardOf(standard: StoredStandard, signal: Signal) {
   return {
     name: standard.name,
     concentration: standard.concentration,
-    readings: standard.readings.map((reading) => readingOf(reading, signal)),
+    readings: standard.readings.map((reading) => readingInSignal(reading, signal)),
     pathLengthMm: standard.pathLengthMm,
     ...(standard.excludedReason === null ? {} : { excluded: true }),
     ...(excludedReadings.length === 0 ? {} : { excludedReadings }),

@@ -1,4 +1,4 @@
-import { absorbanceOf, type CurveResult, type PointAnswer } from '@/lib/engine';
+import { absorbanceOf, type CurveResult, type PointAnswer, type Signal } from '@/lib/engine';
 import type { StoredReading, StoredStandard } from './stored-curve';
 
 /** One reading of the table of standards: what came, what became of it in the fit. */
@@ -6,6 +6,8 @@ export interface ReadingCell {
   readonly pointId: string;
   readonly position: number;
   readonly absorbanceAsRead: number | null;
+  /** The absorbance that a second wavelength takes off; null without one. */
+  readonly takenOff: number | null;
   /** What stood there instead of a number. */
   readonly gapText: string | null;
   readonly leftOutBecause: string | null;
@@ -66,6 +68,9 @@ export function placedPoints(
   });
 }
 
+const absorbanceOrNull = (value: number | null, signal: Signal) =>
+  value === null ? null : absorbanceOf(value, signal).value;
+
 const mean = (values: readonly number[]) =>
   values.length === 0 ? null : values.reduce((sum, value) => sum + value, 0) / values.length;
 
@@ -92,7 +97,8 @@ function rowOf(standard: StoredStandard, index: number, points: ReadonlyMap<stri
       return {
         pointId: pointId(index, at),
         position: at + 1,
-        absorbanceAsRead: reading.value === null ? null : absorbanceOf(reading.value, reading.signal).value,
+        absorbanceAsRead: absorbanceOrNull(reading.value, reading.signal),
+        takenOff: absorbanceOrNull(reading.minusValue ?? null, reading.signal),
         gapText: reading.gapText,
         leftOutBecause:
           reading.excludedReason ?? standard.excludedReason ?? (why && ENGINE_REASON[why]) ?? null,

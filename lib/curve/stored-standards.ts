@@ -2,6 +2,7 @@ import { typedReading } from '@/lib/batch/typed-reading';
 import type { ReadingRule, Signal } from '@/lib/engine';
 import type { StandardDraft } from '@/lib/schemas/curve';
 import type { SpectrumReadingView } from '@/lib/views/spectrum';
+import { keptReading } from '@/lib/spectrum/kept-reading';
 import type { StoredReading, StoredStandard } from './stored-curve';
 
 /** Something in the draft that cannot be kept: where, with dots, and what to do. */
@@ -33,9 +34,8 @@ function fromSpectrum(spectrumId: string, leftOut: string | null, context: Stand
   const read = context.spectra.get(spectrumId);
   if (!read) return { message: 'This spectrum has not been read' };
   if (read.error !== undefined) return { message: `${read.name}: ${read.error}` };
-  const { value, gapReason, gapText } = read;
   const whence = { signal: 'absorbance', origin: 'spectrum', spectrumId, rule: context.rule } as const;
-  return { reading: { value, gapReason, gapText, ...whence, excludedReason: leftOut } };
+  return { reading: { ...keptReading(read), ...whence, excludedReason: leftOut } };
 }
 
 const kept = (draft: DraftReading, context: StandardsContext) =>

@@ -1,10 +1,12 @@
-import { absorbanceOf } from './absorbance';
+import { type Absorbance, absorbanceOf, readingText } from './absorbance';
 import { EngineError } from './errors';
 import type { CurveRequest, Reading } from './types';
 
 export interface BlankReading {
   readonly reading: Reading;
+  /** What is calculated with. */
   readonly asRead: number;
+  readonly absorbance: Absorbance;
   readonly pathLengthMm: number;
 }
 
@@ -28,15 +30,16 @@ export function prepareBlanks(request: CurveRequest): Blanks {
   const { blank } = request;
   const convert = (readings: readonly Reading[], pathLengthMm: number, pointer: string) =>
     readings.map((reading, i): BlankReading => {
-      const asRead = absorbanceOf(reading, request.signal, `${pointer}/${i}`).value;
+      const absorbance = absorbanceOf(reading, request.signal, `${pointer}/${i}`);
+      const asRead = absorbance.value;
       if (asRead === null) {
         throw new EngineError(
           'BLANK_CENSORED',
-          `a blank reading must have a number, got "${reading}"; leave it out or read the blank again`,
+          `a blank reading must have a number, got "${readingText(reading)}"; leave it out or read the blank again`,
           `${pointer}/${i}`,
         );
       }
-      return { reading, asRead, pathLengthMm };
+      return { reading, asRead, absorbance, pathLengthMm };
     });
   const readings = blank
     ? [

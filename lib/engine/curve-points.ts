@@ -1,3 +1,4 @@
+import { absorbanceAsRead } from './absorbance';
 import { invert } from './calibration/invert';
 import type { FittedCurve } from './fit-curve';
 import type { CurvePoint } from './prepare-points';
@@ -29,7 +30,7 @@ function pointAnswer(curve: FittedCurve, point: CurvePoint, position: number | u
     replicate: point.replicate,
     concentration: point.concentration,
     pathLengthMm: point.pathLengthMm,
-    absorbanceAsRead: point.asRead.value,
+    absorbanceAsRead: absorbanceAsRead(point.asRead),
     ...(point.asRead.censored ? { censored: point.asRead.censored.text } : {}),
     absorbance: point.y,
     weight,

@@ -1,4 +1,5 @@
 import { significantText } from '../format/round';
+import { highestAsRead } from './absorbance';
 import { slopeLooseness } from './calibration/fieller';
 import type { FittedCurve } from './fit-curve';
 import { fitModel } from './fit-curve';
@@ -46,8 +47,9 @@ function judgeStandards(request: CurveRequest, points: readonly CurvePoint[]): F
       flags.push(flag('STANDARD_CENSORED', { name, detail: asRead.censored.text }));
     }
     const limit = request.absorbanceLimit;
-    if (point.excludedBecause === undefined && asRead.value !== null && asRead.value > limit) {
-      flags.push(flag('STANDARD_OVER_LIMIT', { name, value: asRead.value, limit }));
+    const highest = highestAsRead(asRead);
+    if (point.excludedBecause === undefined && highest > limit) {
+      flags.push(flag('STANDARD_OVER_LIMIT', { name, value: highest, limit }));
     }
   }
   return flags;

@@ -46,7 +46,7 @@ export function preparePoints(request: CurveRequest, blanks: Blanks): readonly C
     concentration: 0,
     pathLengthMm: blank.pathLengthMm,
     reading: blank.reading,
-    asRead: { value: blank.asRead },
+    asRead: blank.absorbance,
     blank: null,
     y: normalise(blank.asRead, null, blank.pathLengthMm),
     ...(withoutWeightAtZero(request, 0) ? { excludedBecause: 'zeroWithReciprocalWeights' as const } : {}),

@@ -14,7 +14,16 @@ export type Weighting =
   'none' | '1/x' | '1/x2' | '1/y' | '1/y2' | 'varianceFunction' | 'replicates' | 'given';
 
 /** A reading as it came: a number in the request's signal, or the text the instrument showed instead. */
-export type Reading = number | string;
+export type Reading = number | string | TwoWavelengthReading;
+
+/**
+ * Two readings of one solution in the request's signal: A = A(main) - A(minus), each converted by itself. The
+ * absorbance limit and the light disc refer to the readings as they came, not to the difference.
+ */
+export interface TwoWavelengthReading {
+  readonly main: number;
+  readonly minus: number;
+}
 
 /** What is known about a volumetric vessel: one filling's standard uncertainty is made from it. */
 export interface Ware {

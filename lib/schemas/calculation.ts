@@ -8,7 +8,10 @@ import { unitName } from './method';
  * must be to be calculated with (positive, enough, distinct) the engine says, with the same JSON pointers.
  */
 
-const reading = z.union([z.number(), z.string().max(60)], 'A reading is a number or text');
+const reading = z.union(
+  [z.number(), z.string().max(60), z.strictObject({ main: z.number(), minus: z.number() })],
+  'A reading is a number, text, or {main, minus} for two wavelengths',
+);
 const readings = z.array(reading).max(LIMITS.readingsPerStandard);
 const name = z.string().max(LIMITS.name).optional();
 const numbers = z.number().optional();

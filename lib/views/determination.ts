@@ -5,6 +5,8 @@ export interface DeterminationReadingView {
   readonly id: string;
   readonly position: number;
   readonly value: number | null;
+  /** What the second wavelength read; null without one. */
+  readonly minusValue: number | null;
   readonly gapReason: 'aboveRange' | 'missing' | 'unreadable' | null;
   readonly gapText: string | null;
   readonly signal: Signal;
@@ -59,6 +61,7 @@ export interface DeterminationDetail extends DeterminationView {
 export interface SpectrumPreview {
   readonly spectrumId: string;
   readonly value: number | null;
+  readonly minusValue: number | null;
   readonly gapText: string | null;
   readonly atNm: number | null;
   readonly error: string | null;

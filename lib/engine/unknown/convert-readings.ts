@@ -1,4 +1,4 @@
-import { absorbanceOf, type Absorbance } from '../absorbance';
+import { absorbanceAsRead, absorbanceOf, type Absorbance } from '../absorbance';
 import { isAboveRange } from '../censoring';
 import type { FittedCurve } from '../fit-curve';
 import { normalise } from '../prepare-points';
@@ -13,8 +13,10 @@ export interface ConvertedReadings {
   readonly blank: number | null;
   /** Per 10 mm after the blank, one for each used reading. */
   readonly y: readonly number[];
-  /** Null when a reading lies above the instrument's range, or none is left. */
+  /** Null when a reading lies above the instrument's range, or none is left. Of the first wavelength, where a second was taken off. */
   readonly meanAsRead: number | null;
+  /** Mean of what a second wavelength took off; 0 when there is none. */
+  readonly meanTakenOff: number;
   readonly meanY: number | null;
   /** Lower bound of the mean as read when one is above range and its bound is known. */
   readonly atLeast: number | null;
@@ -45,13 +47,16 @@ export function convertReadings(
   const above = asRead.some((item) => item.censored && isAboveRange(item.censored.reason));
   const state = above ? 'aboveRange' : used.length === 0 ? 'nothing' : 'numbers';
   const y = numbers.map((value) => normalise(value, blank, pathLengthMm));
+  const shown = used.map((i) => absorbanceAsRead(asRead[i] ?? { value: NaN }) ?? NaN);
+  const takenOff = used.map((i) => asRead[i]?.two?.minus ?? 0);
   return {
     asRead,
     used,
     pathLengthMm,
     blank,
     y,
-    meanAsRead: state === 'numbers' ? mean(numbers) : null,
+    meanAsRead: state === 'numbers' ? mean(shown) : null,
+    meanTakenOff: state === 'numbers' ? mean(takenOff) : 0,
     meanY: state === 'numbers' ? mean(y) : null,
     atLeast: above ? boundOf(asRead) : null,
     state,
@@ -59,7 +64,7 @@ export function convertReadings(
 }
 
 function boundOf(asRead: readonly Absorbance[]): number | null {
-  const bounds = asRead.map((item) => item.value ?? item.censored?.atLeast);
+  const bounds = asRead.map((item) => absorbanceAsRead(item) ?? item.censored?.atLeast);
   const known = bounds.filter((bound) => bound !== undefined);
   return known.length === bounds.length ? mean(known) : null;
 }

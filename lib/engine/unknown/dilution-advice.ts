@@ -1,4 +1,5 @@
 import { significantText } from '../../format/round';
+import { highestAsRead } from '../absorbance';
 import { invert } from '../calibration/invert';
 import type { FittedCurve } from '../fit-curve';
 import { NORMAL_PATH_MM } from '../prepare-points';
@@ -30,12 +31,15 @@ export function adviseDilution(
   c: number | null,
 ): DilutionAdvice {
   const { meanAsRead, asRead } = readings;
-  if (c === null || meanAsRead === null || asRead.some((item) => (item.value ?? 0) >= PLATEAU_ABSORBANCE))
+  if (c === null || meanAsRead === null || asRead.some((item) => highestAsRead(item) >= PLATEAU_ABSORBANCE))
     return BLIND;
-  const asReadAt = (concentration: number) =>
-    (valueAt(curve.fit, concentration) * readings.pathLengthMm) / NORMAL_PATH_MM + (readings.blank ?? 0);
+  // What a second wavelength takes off (turbidity, say) is diluted with the sample; the blank is not.
+  const asReadAfter = (factor: number) =>
+    (valueAt(curve.fit, c / factor) * readings.pathLengthMm) / NORMAL_PATH_MM +
+    (readings.blank ?? 0) +
+    readings.meanTakenOff / factor;
   const needed = c / concentrationAimedAt(curve, readings);
-  const fits = (factor: number) => c / factor <= curve.range.max && asReadAt(c / factor) <= HIGHEST_AIM;
+  const fits = (factor: number) => c / factor <= curve.range.max && asReadAfter(factor) <= HIGHEST_AIM;
   const possible = GLASSWARE_FACTORS.filter(fits);
   const distance = (factor: number) => Math.abs(Math.log(factor / needed));
   const strongest = GLASSWARE_FACTORS[GLASSWARE_FACTORS.length - 1] ?? BLIND.factor;
@@ -43,9 +47,9 @@ export function adviseDilution(
     (best, candidate) => (distance(candidate) < distance(best) ? candidate : best),
     possible[0] ?? strongest,
   );
-  const overLimit = asRead.some((item) => (item.value ?? 0) > curve.request.absorbanceLimit);
+  const overLimit = asRead.some((item) => highestAsRead(item) > curve.request.absorbanceLimit);
   const atLeast = overLimit || possible.length === 0;
-  return { factor, atLeast, expectedAbsorbance: atLeast ? null : asReadAt(c / factor) };
+  return { factor, atLeast, expectedAbsorbance: atLeast ? null : asReadAfter(factor) };
 }
 
 function concentrationAimedAt(curve: FittedCurve, readings: ConvertedReadings): number {

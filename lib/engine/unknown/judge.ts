@@ -1,3 +1,4 @@
+import { highestAsRead } from '../absorbance';
 import { isAboveRange } from '../censoring';
 import type { FittedCurve } from '../fit-curve';
 import { type Flag, flag } from '../flags';
@@ -25,7 +26,7 @@ function judgeReadings({ curve, readings, back, advice }: UnknownFacts): Flag[] 
   const flags: Flag[] = [];
   const limit = curve.request.absorbanceLimit;
   const detail = `${advice ?? ''}.`;
-  const highest = Math.max(...readings.asRead.map((item) => item.value ?? -Infinity));
+  const highest = Math.max(...readings.asRead.map(highestAsRead));
   const without = readings.asRead.flatMap((item) => (item.censored ? [item.censored] : []));
   const above = without.find((item) => isAboveRange(item.reason));
   const [first] = without;

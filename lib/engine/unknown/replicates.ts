@@ -1,3 +1,4 @@
+import { highestAsRead } from '../absorbance';
 import type { FittedCurve } from '../fit-curve';
 import { studentizedRangeQuantile } from '../stats/studentized-range';
 import { type ConvertedReadings, mean } from './convert-readings';
@@ -31,7 +32,7 @@ export function judgeReplicates(
   const { y, used, asRead } = readings;
   const p = y.length;
   const numbers = used.map((i) => asRead[i]?.value ?? NaN);
-  const overLimit = numbers.some((value) => value > curve.request.absorbanceLimit);
+  const overLimit = asRead.some((item) => highestAsRead(item) > curve.request.absorbanceLimit);
   const agree = { sd: curveSd, own: false, disagree: false, range: 0, limit: 0 };
   if (p < 2 || overLimit) return agree;
   const set = curve.request.replicateLimit;

@@ -1,4 +1,5 @@
 import { plusMinusText, significantText } from '../../format/round';
+import { highestAsRead } from '../absorbance';
 import type { FittedCurve } from '../fit-curve';
 import type { ReportCase } from '../types';
 import type { ConvertedReadings } from './convert-readings';
@@ -20,7 +21,7 @@ export function reportCase(
   critical: number,
 ): ReportCase {
   const { range, request } = curve;
-  const overLimit = readings.asRead.some((item) => (item.value ?? 0) > request.absorbanceLimit);
+  const overLimit = readings.asRead.some((item) => highestAsRead(item) > request.absorbanceLimit);
   if (readings.state !== 'numbers' || overLimit || c === null) return 'notQuantified';
   if (c > range.max * (1 + SAME)) return 'aboveTopStandard';
   if (c >= range.min * (1 - SAME)) return 'value';

@@ -40,7 +40,7 @@ function recordBlanks(ledger: Ledger, curve: FittedCurve): void {
         id: `curve.blankReading.${pathLengthMm}.${i + 1}`,
         label: `Blank at ${pathLengthMm} mm, reading ${i + 1}`,
         reading: blank.reading,
-        asRead: { value: blank.asRead },
+        asRead: blank.absorbance,
         // As read: the blank is subtracted before the path is normalised.
         pathLengthMm: 10,
         pathId: '',

@@ -1,7 +1,7 @@
-import type { Absorbance } from '../absorbance';
+import { type Absorbance, readingText } from '../absorbance';
 import type { Blanks } from '../blanks';
 import { NORMAL_PATH_MM } from '../prepare-points';
-import type { CurveRequest, Reading } from '../types';
+import type { CurveRequest, Reading, TwoWavelengthReading } from '../types';
 import type { Ledger } from './ledger';
 
 /** One reading with everything done to it. */
@@ -20,6 +20,12 @@ export interface ReadingToRecord {
 
 const LAW = 'Beer-Lambert law; measurement order of this notebook';
 
+const DIFFERENCE = {
+  absorbance: 'A_1 - A_2',
+  transmittance: '-log10(T_1) + log10(T_2)',
+  percentTransmittance: '-log10(%T_1 / 100) + log10(%T_2 / 100)',
+} as const;
+
 const SIGNAL_SYMBOL = { absorbance: 'A', transmittance: 'T', percentTransmittance: '%T' } as const;
 
 export function blankLineId(pathLengthMm: number): string {
@@ -36,6 +42,8 @@ export function recordReading(
   const { id, label } = item;
   const symbol = SIGNAL_SYMBOL[request.signal];
   const unit = request.signal === 'percentTransmittance' ? '%' : '';
+  if (typeof item.reading === 'object')
+    return recordDifference(ledger, request, blanks, { ...item, reading: item.reading });
   ledger.given(
     { id: `${id}.reading`, label: `${label}, as it came`, symbol, unit, source: 'reading' },
     item.reading,
@@ -58,6 +66,41 @@ export function recordReading(
     last = `${id}.absorbance`;
   }
   return recordNormalised(ledger, blanks, item, last);
+}
+
+/** Two wavelengths: both readings as they came, and the difference of their absorbances. */
+function recordDifference(
+  ledger: Ledger,
+  request: CurveRequest,
+  blanks: Blanks,
+  item: ReadingToRecord & { readonly reading: TwoWavelengthReading },
+): string {
+  const { id, label, reading } = item;
+  const symbol = SIGNAL_SYMBOL[request.signal];
+  const unit = request.signal === 'percentTransmittance' ? '%' : '';
+  const given = (which: 'main' | 'minus', place: string, index: number) =>
+    ledger.given(
+      {
+        id: `${id}.${which}`,
+        label: `${label}, ${place}`,
+        symbol: `${symbol}_${index}`,
+        unit,
+        source: 'reading',
+      },
+      reading[which],
+    );
+  given('main', 'as it came', 1);
+  given('minus', 'as it came at the second wavelength', 2);
+  const absorbance = DIFFERENCE[request.signal];
+  ledger.line(
+    { id: `${id}.reading`, label: `${label}, second wavelength taken off`, symbol: 'A', source: LAW },
+    absorbance,
+    { [`${symbol}_1`]: `${id}.main`, [`${symbol}_2`]: `${id}.minus` },
+    item.asRead.value ?? readingText(reading),
+  );
+  return item.asRead.value === null
+    ? `${id}.reading`
+    : recordNormalised(ledger, blanks, item, `${id}.reading`);
 }
 
 function recordNormalised(

@@ -51,8 +51,17 @@ const save = (draft: CurveDraftInput) =>
 test('reads the stored spectra by the rule and keeps where each reading came from', async () => {
   const curve = await loadCurve(owner, (await save(draftOf(ids, '502', '500'))).id);
   const readings = curve.standards.flatMap((standard) => standard.readings);
-  // by the points of the files: 0.2 − 0.01, 0.41 − 0.01, 0.79 − 0.01
-  readings.forEach(({ value }, index) => expect(value).toBeCloseTo([0.19, 0.4, 0.78][index] ?? NaN, 12));
+  // as they came, by the points of the files; the curve is made of 0.2 − 0.01, 0.41 − 0.01, 0.79 − 0.01
+  expect(readings.map(({ value, minusValue }) => [value, minusValue])).toEqual([
+    [0.2, 0.01],
+    [0.41, 0.01],
+    [0.79, 0.01],
+  ]);
+  const { points } = curve.result.curve;
+  points.forEach(({ absorbance }, index) =>
+    expect(absorbance).toBeCloseTo([0.19, 0.4, 0.78][index] ?? NaN, 12),
+  );
+  expect(points.map(({ absorbanceAsRead }) => absorbanceAsRead)).toEqual([0.2, 0.41, 0.79]);
   expect(readings[1]).toMatchObject({
     origin: 'spectrum',
     spectrumId: ids[1],
@@ -60,6 +69,15 @@ test('reads the stored spectra by the rule and keeps where each reading came fro
     rule: { kind: 'point', wavelengthNm: 502, minusNm: 500 },
   });
   expect(curve.result).toEqual(calculateStandardCurve(curve.request));
+});
+
+test('a standard above the absorbance limit is seen though its difference is harmless', async () => {
+  const high = await upload(notebookId, 'High', [1.4, 1.5, 2.6, 0.5]);
+  const draft = draftOf([...ids, high], '502', '500');
+  const curve = await loadCurve(owner, (await save(draft)).id);
+  expect(curve.result.curve.points[3]?.absorbance).toBeCloseTo(1.2, 12);
+  const over = curve.result.curve.flags.filter(({ code }) => code === 'STANDARD_OVER_LIMIT');
+  expect(over).toMatchObject([{ value: 2.6, limit: 2 }]);
 });
 
 test('a wavelength outside a spectrum is refused at its reading', async () => {

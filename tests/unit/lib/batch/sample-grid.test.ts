@@ -105,7 +105,7 @@ describe('samples from spectra', () => {
   test('nothing is calculated before every spectrum of the sample is read', () => {
     const [sample] = chosenSamples(choice, spectra, 10);
     if (!sample) throw new Error('a sample was chosen');
-    const one = { spectrumId: '1', value: 0.4, gapText: null, atNm: 510, error: null };
+    const one = { spectrumId: '1', value: 0.4, minusValue: null, gapText: null, atNm: 510, error: null };
     expect(liveSample(sample, new Map([['1', one]]))).toBeNull();
     const both = new Map([
       ['1', one],

@@ -1,6 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { absorbanceOf, transmittanceOf } from '@/lib/engine';
+import { absorbanceAsRead, highestAsRead } from '@/lib/engine/absorbance';
 import { expectDigits } from '../../../support/digits';
 
 describe('absorbanceOf', () => {
@@ -75,5 +76,29 @@ describe('absorbanceOf', () => {
     expect(() => absorbanceOf(reading, 'absorbance')).toThrow(
       expect.objectContaining({ code: 'NOT_FINITE' }),
     );
+  });
+});
+
+describe('a reading at two wavelengths', () => {
+  // Identity: A(main) - A(minus), each converted by itself; 10 %T and 50 %T make 1 - 0.30103.
+  test('is the difference of two absorbances, whatever the signal', () => {
+    const { value, two } = absorbanceOf({ main: 10, minus: 50 }, 'percentTransmittance');
+    expectDigits(value ?? NaN, 1 - Math.log10(2), 14);
+    expectDigits(two?.main ?? NaN, 1, 15);
+    expect(absorbanceOf({ main: 0.75, minus: 0.25 }, 'absorbance')).toEqual({
+      value: 0.5,
+      two: { main: 0.75, minus: 0.25 },
+    });
+  });
+
+  test('shows the first absorbance and the higher of the two, not the difference', () => {
+    const item = absorbanceOf({ main: 2.3, minus: 2.5 }, 'absorbance');
+    expect([absorbanceAsRead(item), highestAsRead(item)]).toEqual([2.3, 2.5]);
+    expect(highestAsRead({ value: null })).toBe(-Infinity);
+  });
+
+  test('has no number when no light came at one of them', () => {
+    expect(absorbanceOf({ main: 0, minus: 50 }, 'percentTransmittance').censored?.reason).toBe('noLight');
+    expect(absorbanceOf({ main: 50, minus: 0 }, 'percentTransmittance').censored?.reason).toBe('noLight');
   });
 });

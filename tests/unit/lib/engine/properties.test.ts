@@ -1,6 +1,12 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
-import { calculateStandardCurve, curveBand, type CurveRequest, type Weighting } from '@/lib/engine';
+import {
+  calculateStandardCurve,
+  curveBand,
+  type CurveRequest,
+  type Reading,
+  type Weighting,
+} from '@/lib/engine';
 import { expectDigits } from '../../../support/digits';
 import { request, standardsOf, unknown } from './requests';
 
@@ -72,8 +78,7 @@ describe('properties of a standard curve', () => {
   test('a constant added to every absorbance moves the intercept and nothing else', () => {
     check((asked) => {
       const was = first(asked);
-      const add = (readings: readonly (number | string)[]) =>
-        readings.map((reading) => Number(reading) + 0.25);
+      const add = (readings: readonly Reading[]) => readings.map((reading) => Number(reading) + 0.25);
       const is = first({
         ...asked,
         standards: asked.standards.map((s) => ({ ...s, readings: add(s.readings) })),
@@ -102,8 +107,7 @@ describe('properties of a standard curve', () => {
 
   test('a path twice as long with readings twice as high is the same curve', () => {
     check((asked) => {
-      const twice = (readings: readonly (number | string)[]) =>
-        readings.map((reading) => 2 * Number(reading));
+      const twice = (readings: readonly Reading[]) => readings.map((reading) => 2 * Number(reading));
       const was = first(asked);
       const is = first({
         ...asked,

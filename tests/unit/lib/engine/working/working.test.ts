@@ -1,6 +1,6 @@
 import { evaluate } from 'mathjs';
 import { describe, expect, test } from 'vitest';
-import { calculateStandardCurve, type CurveRequest, type WorkingStep } from '@/lib/engine';
+import { calculateStandardCurve, type CurveRequest, type Reading, type WorkingStep } from '@/lib/engine';
 import { request, unknown } from '../requests';
 
 const BLANK = {
@@ -96,7 +96,7 @@ const firstUnknown = (asked: CurveRequest, changes: object): CurveRequest => ({
   ...asked,
   unknowns: asked.unknowns.map((item) => ({ ...item, ...changes })),
 });
-const bump = (readings: readonly (number | string)[]) => [Number(readings[0]) * 1.001, ...readings.slice(1)];
+const bump = (readings: readonly Reading[]) => [Number(readings[0]) * 1.001, ...readings.slice(1)];
 
 /** What is altered, and the line that holds it. */
 const CHANGES: readonly [string, string, Change][] = [
