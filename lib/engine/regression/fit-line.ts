@@ -1,5 +1,6 @@
 import { SimpleLinearRegression } from 'ml-regression-simple-linear';
-import { dot, type Fit, type FitData, finishFit, weightedMean } from './fit';
+import { type Fit, type FitData, finishFit } from './fit';
+import { type Moments, momentsOf } from './moments';
 
 /**
  * Straight line with free intercept, weighted least squares.
@@ -12,26 +13,18 @@ import { dot, type Fit, type FitData, finishFit, weightedMean } from './fit';
  * @source IUPAC 1998 (Danzer, Currie), in our own words; checked against NIST StRD Norris
  */
 export function fitLine(data: FitData): Fit {
-  const { x, y, w } = data;
-  const meanX = weightedMean(x, w);
-  const meanY = weightedMean(y, w);
-  const dx = x.map((value) => value - meanX);
-  const dy = y.map((value) => value - meanY);
-  const sxx = dx.reduce((sum, d, i) => sum + (w[i] ?? 0) * d * d, 0);
-  const slope = slopeOfCentred(dx, dy, w, sxx);
-  // One step of refinement: the residuals are small, so what is left of their mean is known to many digits.
-  const rest = weightedMean(
-    dy.map((d, i) => d - slope * (dx[i] ?? 0)),
-    w,
-  );
-  const offset = meanY + rest;
-  return finishFit(data, {
+  const moments = momentsOf(data);
+  const { meanX, weight, sxx } = moments;
+  const slope = slopeOf(moments);
+  const { rest, squares } = residualsOf(moments, data.w, slope);
+  const offset = moments.meanY + rest;
+  return finishFit({
     model: 'linear',
     centre: meanX,
     scale: 1,
     beta: [offset, slope],
     betaInverse: [
-      [1 / w.reduce((sum, value) => sum + value, 0), 0],
+      [1 / weight, 0],
       [0, 1 / sxx],
     ],
     coefficients: [offset - slope * meanX, slope],
@@ -39,6 +32,8 @@ export function fitLine(data: FitData): Fit {
       [1, -meanX],
       [0, 1],
     ],
+    moments,
+    residualSquares: squares,
   });
 }
 
@@ -47,17 +42,24 @@ export function fitLine(data: FitData): Fit {
  * pass: with x about 1e9 every digit of the slope is lost, so it is only given deviations from the means, whose
  * sums vanish. It knows no weights and no uncertainties; those we take ourselves, beside it.
  */
-function slopeOfCentred(
-  dx: readonly number[],
-  dy: readonly number[],
-  w: readonly number[],
-  sxx: number,
-): number {
-  if (w.every((value) => value === 1)) return new SimpleLinearRegression([...dx], [...dy]).slope;
-  return (
-    dot(
-      w.map((wi, i) => wi * (dx[i] ?? 0)),
-      dy,
-    ) / sxx
-  );
+function slopeOf({ dx, dy, sxx, sxy, unweighted }: Moments): number {
+  // The package types its arrays as writable; it does not write to them.
+  return unweighted ? new SimpleLinearRegression(dx as number[], dy as number[]).slope : sxy / sxx;
+}
+
+/**
+ * What is left of the mean after the slope, and the residuals' Σ w r² without it. Residuals are small, so the rest
+ * is known to many digits: one step of refinement for the offset.
+ */
+function residualsOf({ dx, dy, weight }: Moments, w: FitData['w'], slope: number) {
+  let sum = 0;
+  let squares = 0;
+  for (let i = 0; i < dx.length; i += 1) {
+    const r = (dy[i] as number) - slope * (dx[i] as number);
+    const wr = (w[i] as number) * r;
+    sum += wr;
+    squares += wr * r;
+  }
+  const rest = sum / weight;
+  return { rest, squares: Math.max(0, squares - weight * rest * rest) };
 }

@@ -1,4 +1,5 @@
-import { type Fit, type FitData, finishFit } from './fit';
+import { type Fit, type FitData, finishFit, residualSquaresOf } from './fit';
+import { momentsOf } from './moments';
 
 /**
  * Straight line through zero, weighted least squares: b = Σ w x y / Σ w x², s² = Σ w r² / (n - 1),
@@ -8,14 +9,18 @@ import { type Fit, type FitData, finishFit } from './fit';
  */
 export function fitProportional(data: FitData): Fit {
   const { x, y, w } = data;
-  const squares = x.reduce((sum, value, i) => sum + (w[i] ?? 0) * value * value, 0);
-  const products = x.reduce((sum, value, i) => sum + (w[i] ?? 0) * value * (y[i] ?? 0), 0);
+  let squares = 0;
+  let products = 0;
+  for (let i = 0; i < x.length; i += 1) {
+    const wx = (w[i] as number) * (x[i] as number);
+    squares += wx * (x[i] as number);
+    products += wx * (y[i] as number);
+  }
   const slope = products / squares;
-  return finishFit(data, {
+  const shape = { centre: 0, scale: 1, beta: [0, slope] };
+  return finishFit({
     model: 'proportional',
-    centre: 0,
-    scale: 1,
-    beta: [0, slope],
+    ...shape,
     betaInverse: [
       [0, 0],
       [0, 1 / squares],
@@ -25,5 +30,7 @@ export function fitProportional(data: FitData): Fit {
       [1, 0],
       [0, 1],
     ],
+    moments: momentsOf(data),
+    residualSquares: residualSquaresOf(data, shape),
   });
 }

@@ -1,4 +1,5 @@
-import { dot, type Fit, type FitData, finishFit, weightedMean } from './fit';
+import { dot, type Fit, type FitData, finishFit, residualSquaresOf, valueAt } from './fit';
+import { momentsOf } from './moments';
 import { householder, inverseOfRtR, leastSquares } from './qr';
 
 /**
@@ -12,34 +13,35 @@ import { householder, inverseOfRtR, leastSquares } from './qr';
  */
 export function fitQuadratic(data: FitData): Fit {
   const { x, y, w } = data;
-  const m = weightedMean(x, w);
-  const h = Math.max(...x.map((value) => Math.abs(value - m)));
+  const moments = momentsOf(data);
+  const centre = moments.meanX;
+  const scale = moments.dx.reduce((largest, d) => Math.max(largest, Math.abs(d)), 0);
   const root = w.map(Math.sqrt);
-  const basis = x.map((value) => {
-    const t = (value - m) / h;
-    return [1, t, t * t];
-  });
-  const weighted = basis.map((row, i) => row.map((value) => value * (root[i] ?? 0)));
-  const qr = householder(weighted);
+  const t = moments.dx.map((d, i) => ((root[i] as number) * d) / scale);
+  const qr = householder([root, t, t.map((value, i) => (value * (moments.dx[i] as number)) / scale)]);
   const first = leastSquares(
     qr,
-    y.map((value, i) => value * (root[i] ?? 0)),
+    y.map((value, i) => value * (root[i] as number)),
   );
-  const rest = y.map((value, i) => (value - dot(basis[i] ?? [], first)) * (root[i] ?? 0));
+  const about = { centre, scale, beta: first };
+  const rest = y.map((value, i) => (value - valueAt(about, x[i] as number)) * (root[i] as number));
   const correction = leastSquares(qr, rest);
-  const beta = first.map((value, i) => value + (correction[i] ?? 0));
+  const beta = first.map((value, i) => value + (correction[i] as number));
+  const m = centre / scale;
   const transform = [
-    [1, -m / h, (m / h) ** 2],
-    [0, 1 / h, (-2 * m) / (h * h)],
-    [0, 0, 1 / (h * h)],
+    [1, -m, m * m],
+    [0, 1 / scale, (-2 * m) / scale],
+    [0, 0, 1 / (scale * scale)],
   ];
-  return finishFit(data, {
+  return finishFit({
     model: 'quadratic',
-    centre: m,
-    scale: h,
+    centre,
+    scale,
     beta,
     betaInverse: inverseOfRtR(qr),
     coefficients: transform.map((row) => dot(row, beta)),
     transform,
+    moments,
+    residualSquares: residualSquaresOf(data, { centre, scale, beta }),
   });
 }

@@ -1,6 +1,10 @@
 import type { Model } from '../types';
+import type { Moments } from './moments';
 
-/** What a fit needs: x and y of the points that take part, and their weights scaled to Σw = n. */
+/**
+ * What a fit needs: x and y of the points that take part, and their weights scaled to Σw = n. The three are of one
+ * length, which is why the loops of this folder read their members `as number`.
+ */
 export interface FitData {
   readonly x: readonly number[];
   readonly y: readonly number[];
@@ -49,8 +53,13 @@ export function gradientAt(fit: Fit, x: number): readonly number[] {
   return fit.model === 'linear' ? [1, t] : [0, x];
 }
 
-export function valueAt(fit: Fit, x: number): number {
-  return dot(gradientAt(fit, x), fit.beta);
+/** What the value of a curve needs: y = β0 + β1 t (+ β2 t²), t = (x - centre) / scale. */
+type Shape = Pick<Fit, 'centre' | 'scale' | 'beta'>;
+
+export function valueAt({ centre, scale, beta }: Shape, x: number): number {
+  const [b0 = 0, b1 = 0, b2 = 0] = beta;
+  const t = (x - centre) / scale;
+  return b0 + t * (b1 + t * b2);
 }
 
 /** df/dx. */
@@ -78,41 +87,32 @@ export function dot(a: readonly number[], b: readonly number[]): number {
   return a.reduce((sum, value, i) => sum + value * (b[i] ?? 0), 0);
 }
 
-/** Weighted mean, taken again about its first value so that a large offset costs no digits. */
-export function weightedMean(x: readonly number[], w: readonly number[]): number {
-  const total = w.reduce((sum, value) => sum + value, 0);
-  const first = dot(x, w) / total;
-  return first + x.reduce((sum, value, i) => sum + (value - first) * (w[i] ?? 0), 0) / total;
-}
-
-interface Solved {
+/** A model solved about its centre, and the sums the solution came with. */
+export interface Solved extends Shape {
   readonly model: Model;
-  readonly centre: number;
-  readonly scale: number;
-  readonly beta: readonly number[];
   readonly betaInverse: readonly (readonly number[])[];
   /** Uncentred coefficient k = Σ_j transform[k][j]·β_j. */
   readonly coefficients: readonly number[];
   readonly transform: readonly (readonly number[])[];
+  readonly moments: Moments;
+  /** Σ w r². */
+  readonly residualSquares: number;
 }
 
-/** What follows from the coefficients alike for every model: residuals, s, V, r². */
-export function finishFit(data: FitData, solved: Solved): Fit {
-  const { x, y, w } = data;
-  const n = x.length;
-  const q = solved.model === 'quadratic' ? 3 : solved.model === 'linear' ? 2 : 1;
-  const meanX = weightedMean(x, w);
-  const meanY = weightedMean(y, w);
-  const about = { model: solved.model, centre: solved.centre, scale: solved.scale } as Fit;
-  const squares = (of: (i: number) => number) => w.reduce((sum, wi, i) => sum + wi * of(i) ** 2, 0);
-  const residualSquares = squares((i) => (y[i] ?? 0) - dot(gradientAt(about, x[i] ?? 0), solved.beta));
+const PARAMETERS = { proportional: 1, linear: 2, quadratic: 3 } as const;
+
+/** What follows from the coefficients alike for every model: s, V, r². */
+export function finishFit(solved: Solved): Fit {
+  const { model, moments, residualSquares } = solved;
+  const { n, meanX, meanY, sxx } = moments;
+  const q = PARAMETERS[model];
   // A line through zero is compared with no line at all, so its total is about zero (NIST, NoInt1 and NoInt2).
-  const total = squares((i) => (y[i] ?? 0) - (solved.model === 'proportional' ? 0 : meanY));
+  const total = moments.syy + (model === 'proportional' ? moments.weight * meanY * meanY : 0);
   const degreesOfFreedom = n - q;
   const s2 = residualSquares / degreesOfFreedom;
   const betaCovariance = solved.betaInverse.map((row) => row.map((value) => value * s2));
   return {
-    model: solved.model,
+    model,
     n,
     q,
     degreesOfFreedom,
@@ -128,8 +128,18 @@ export function finishFit(data: FitData, solved: Solved): Fit {
     rSquared: total === 0 ? 1 : 1 - residualSquares / total,
     meanX,
     meanY,
-    sxx: squares((i) => (x[i] ?? 0) - meanX),
+    sxx,
   };
+}
+
+/** Σ w (y - f(x))². */
+export function residualSquaresOf({ x, y, w }: FitData, shape: Shape): number {
+  let sum = 0;
+  for (let i = 0; i < x.length; i += 1) {
+    const r = (y[i] as number) - valueAt(shape, x[i] as number);
+    sum += (w[i] as number) * r * r;
+  }
+  return sum;
 }
 
 /** T M Tᵀ. */

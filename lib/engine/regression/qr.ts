@@ -1,4 +1,9 @@
-/** A Householder factorisation of an n × q matrix, n ≥ q, of full rank. */
+/*
+ * Householder's orthogonal decomposition. mathjs has one too, which builds all of Q, n by n, and is slower by the
+ * ratio that math.ts and `npm run bench` say; the tests ask it for its opinion.
+ */
+
+/** The decomposition of an n × q matrix, n ≥ q, of full rank. */
 export interface Qr {
   /** Upper triangle R, q × q. */
   readonly r: readonly (readonly number[])[];
@@ -11,26 +16,33 @@ function reflect(v: number[], u: readonly number[], from: number): void {
   let uv = 0;
   let uu = 0;
   for (let i = from; i < v.length; i += 1) {
-    uv += (u[i] ?? 0) * (v[i] ?? 0);
-    uu += (u[i] ?? 0) ** 2;
+    const ui = u[i] as number;
+    uv += ui * (v[i] as number);
+    uu += ui * ui;
   }
   const factor = uu === 0 ? 0 : (2 * uv) / uu;
-  for (let i = from; i < v.length; i += 1) v[i] = (v[i] ?? 0) - factor * (u[i] ?? 0);
+  for (let i = from; i < v.length; i += 1) v[i] = (v[i] as number) - factor * (u[i] as number);
 }
 
-export function householder(rows: readonly (readonly number[])[]): Qr {
-  const q = rows[0]?.length ?? 0;
-  const columns = Array.from({ length: q }, (_, j) => rows.map((row) => row[j] ?? 0));
-  const reflections: number[][] = [];
-  for (let j = 0; j < q; j += 1) {
-    const column = columns[j] ?? [];
-    const length = Math.hypot(...column.slice(j));
-    const u = column.map((value, i) => (i < j ? 0 : value));
-    u[j] = (u[j] ?? 0) + ((column[j] ?? 0) >= 0 ? length : -length);
-    for (const other of columns.slice(j)) reflect(other, u, j);
-    reflections.push(u);
-  }
-  const r = Array.from({ length: q }, (_, i) => columns.map((column, j) => (j < i ? 0 : (column[i] ?? 0))));
+/** Length of v from row `from` on. */
+function lengthFrom(v: readonly number[], from: number): number {
+  let sum = 0;
+  for (let i = from; i < v.length; i += 1) sum += (v[i] as number) ** 2;
+  return Math.sqrt(sum);
+}
+
+/** @param matrix its columns */
+export function householder(matrix: readonly (readonly number[])[]): Qr {
+  const columns = matrix.map((column) => [...column]);
+  const reflections = columns.map((column, j) => {
+    const u = [...column];
+    const head = column[j] as number;
+    const length = lengthFrom(column, j);
+    u[j] = head + (head >= 0 ? length : -length);
+    for (let k = j; k < columns.length; k += 1) reflect(columns[k] as number[], u, j);
+    return u;
+  });
+  const r = columns.map((_, i) => columns.map((column, j) => (j < i ? 0 : (column[i] as number))));
   return { r, reflections };
 }
 
@@ -38,9 +50,10 @@ function backSubstitute(r: Qr['r'], right: readonly number[]): number[] {
   const q = r.length;
   const solution = new Array<number>(q).fill(0);
   for (let i = q - 1; i >= 0; i -= 1) {
-    let rest = right[i] ?? 0;
-    for (let j = i + 1; j < q; j += 1) rest -= (r[i]?.[j] ?? 0) * (solution[j] ?? 0);
-    solution[i] = rest / (r[i]?.[i] ?? NaN);
+    const row = r[i] as readonly number[];
+    let rest = right[i] as number;
+    for (let j = i + 1; j < q; j += 1) rest -= (row[j] as number) * (solution[j] as number);
+    solution[i] = rest / (row[i] as number);
   }
   return solution;
 }
@@ -54,17 +67,16 @@ export function leastSquares(qr: Qr, y: readonly number[]): number[] {
 
 /** (RᵀR)⁻¹ = (XᵀX)⁻¹. */
 export function inverseOfRtR({ r }: Qr): number[][] {
-  const q = r.length;
   // Row k of the result of solving R z = e_k is column k of R⁻¹.
-  const columns = Array.from({ length: q }, (_, k) =>
+  const columns = r.map((_, k) =>
     backSubstitute(
       r,
-      Array.from({ length: q }, (_unused, i) => (i === k ? 1 : 0)),
+      r.map((_row, i) => (i === k ? 1 : 0)),
     ),
   );
-  return Array.from({ length: q }, (_, i) =>
-    Array.from({ length: q }, (_unused, j) =>
-      columns.reduce((sum, column) => sum + (column[i] ?? 0) * (column[j] ?? 0), 0),
+  return r.map((_, i) =>
+    r.map((_row, j) =>
+      columns.reduce((sum, column) => sum + (column[i] as number) * (column[j] as number), 0),
     ),
   );
 }
