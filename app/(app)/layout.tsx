@@ -1,9 +1,11 @@
 import type { ReactNode } from 'react';
+import { redirect } from 'next/navigation';
 import { AppFrame } from '@/components/frame/app-frame';
 import { DemoBanner } from '@/components/frame/demo-banner';
 import { Navigation } from '@/components/frame/navigation';
 import { PageFooter } from '@/components/frame/page-footer';
 import { laboratory } from '@/db/entry/settings';
+import { account } from '@/db/queries/account';
 import { listNotebooks } from '@/db/queries/notebooks';
 import { ROLE_WORDS } from '@/lib/policies/role-words';
 import { requireActor } from '@/app/_server/current-actor';
@@ -12,7 +14,10 @@ import { SignOutForm } from './sign-out/sign-out-form';
 
 const RECENT = 5;
 
-/** The frame of every page behind the door. Its redirect is a courtesy; the loaders are the guard. */
+/**
+ * The frame of every page behind the door. Its redirects are a courtesy, the loaders are the guard: a stranger is
+ * led to the sign-in, and a person who has not read the cautions to them.
+ */
 export default async function SignedInLayout({ children }: { children: ReactNode }) {
   const actor = await requireActor();
   const lab = await laboratory();
@@ -23,6 +28,7 @@ export default async function SignedInLayout({ children }: { children: ReactNode
         {children}
       </SharedLayout>
     );
+  if (!(await account(actor)).welcomed) redirect('/welcome');
   const notebooks = await listNotebooks(actor);
   const entries = [
     { href: '/notebooks', label: 'Notebooks', count: notebooks.length },

@@ -39,6 +39,8 @@ test('an empty real laboratory is set up with the code of the terminal, once', a
   await expect(page.getByRole('heading', { level: 1, name: 'Before you begin' })).toBeVisible();
   await expect(page.getByText('the passwords are public')).toHaveCount(0);
 
+  await page.getByRole('button', { name: 'I have read this, go on' }).click();
+  await expect(page.getByRole('heading', { level: 1, name: 'Notebooks' })).toBeVisible();
   expect((await page.goto(`${app.url}/set-up`))?.status()).toBe(404);
   await page.goto(`${app.url}/people`);
   await expect(page.getByRole('rowheader', { name: 'Aud Finn' })).toBeVisible();
