@@ -19,6 +19,7 @@ export const LIMITS = {
   readingsPerStandard: 50,
   determinations: 500,
   dilutionSteps: 8,
+  glassware: 60,
   pageSize: 100,
   sessionIdleMinutes: 8 * 60,
   sessionAbsoluteHours: 7 * 24,

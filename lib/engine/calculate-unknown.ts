@@ -3,14 +3,15 @@ import { criticalValue } from './calibration/critical-value';
 import { fiellerInterval } from './calibration/fieller';
 import type { FittedCurve } from './fit-curve';
 import type { Concentration, ReportCase, UnknownRequest, UnknownResult } from './types';
+import type { Expanded } from './uncertainty/combine';
 import { coverageFactor } from './uncertainty/expand';
-import { type Expanded, makeBudget } from './unknown/budget';
+import { makeBudget } from './unknown/budget';
 import { convertReadings } from './unknown/convert-readings';
 import { adviceText, adviseDilution } from './unknown/dilution-advice';
-import { type DilutionFactor, dilutionFactor } from './unknown/dilution-factor';
 import { judgeUnknown } from './unknown/judge';
 import { type ReadBack, readBack } from './unknown/read-back';
 import { reportCase, reportText } from './unknown/report';
+import { type Scaling, scalingOf } from './unknown/scaling';
 import { Ledger } from './working/ledger';
 import { recordUnknown } from './working/record-unknown';
 
@@ -24,7 +25,7 @@ function isQuantified(kind: ReportCase): boolean {
   return kind === 'value' || kind === 'belowLowestStandard';
 }
 
-function concentrationOf(curve: FittedCurve, result: Expanded): Concentration {
+export function concentrationOf(result: Expanded, unit: Concentration['unit']): Concentration {
   const { value, u, U, k, degreesOfFreedom } = result;
   return {
     value,
@@ -33,7 +34,7 @@ function concentrationOf(curve: FittedCurve, result: Expanded): Concentration {
     k,
     degreesOfFreedom: Number.isFinite(degreesOfFreedom) ? degreesOfFreedom : null,
     interval: [value - U, value + U],
-    unit: curve.request.unit,
+    unit,
   };
 }
 
@@ -42,12 +43,12 @@ function fiellerOf(
   curve: FittedCurve,
   y0: number,
   back: ReadBack,
-  factor: DilutionFactor,
+  scaling: Scaling,
 ): [number, number] | null {
   if (curve.fit.model === 'quadratic') return null;
   const t = coverageFactor(curve.request.confidence, curve.fit.degreesOfFreedom);
   const { interval } = fiellerInterval(curve.fit, y0, back.varianceY0, t);
-  return interval && [interval[0] * factor.value, interval[1] * factor.value];
+  return interval && [interval[0] * scaling.value, interval[1] * scaling.value];
 }
 
 /** One determination: readings to absorbance, read back, diluted, with its budget, report text, flags and working. */
@@ -59,23 +60,23 @@ export function calculateUnknown(
 ): UnknownResult {
   const readings = convertReadings(curve, unknown, `/unknowns/${index}`);
   const back = readBack(curve, readings, unknown);
-  const factor = dilutionFactor(unknown.dilution ?? []);
-  const budget = back && makeBudget(curve, unknown, readings, back, factor);
+  const scaling = scalingOf(unknown.dilution, unknown.recovery ?? curve.request.recovery);
+  const budget = back && makeBudget(curve, unknown, readings, back, scaling);
   const critical = criticalValue(curve, Math.max(1, readings.y.length), readings.pathLengthMm);
   const kind = reportCase(curve, readings, back?.c ?? null, critical.value);
   const dilute = wantsDilution(kind) && readings.state !== 'nothing';
   const dilutionAdvice = dilute ? adviseDilution(curve, readings, back?.c ?? null) : null;
-  const advice = dilutionAdvice && adviceText(dilutionAdvice, factor.value > 1);
+  const advice = dilutionAdvice && adviceText(dilutionAdvice, scaling.factor.value > 1);
   const report = reportText(curve, {
     reportCase: kind,
-    factor: factor.value,
+    factor: scaling.value,
     value: budget?.value ?? null,
     expanded: budget?.U ?? null,
     advice,
   });
   const quantified = isQuantified(kind) && budget !== null;
   const ledger = new Ledger(curveLedger);
-  recordUnknown(ledger, { curve, unknown, readings, back, factor, budget, critical, report });
+  recordUnknown(ledger, { curve, unknown, readings, back, scaling, budget, critical, report });
   return {
     name: unknown.name ?? `unknown ${index + 1}`,
     absorbanceAsRead: readings.meanAsRead,
@@ -83,10 +84,11 @@ export function calculateUnknown(
     absorbance: readings.meanY,
     transmittance: readings.meanAsRead === null ? null : transmittanceOf(readings.meanAsRead),
     measured: back && { value: back.c, u: back.u },
-    dilutionFactor: { value: factor.value, u: factor.u },
-    concentration: quantified ? concentrationOf(curve, budget) : null,
+    dilutionFactor: { value: scaling.factor.value, u: scaling.factor.u },
+    ...(scaling.recovery ? { recovery: scaling.recovery } : {}),
+    concentration: quantified ? concentrationOf(budget, curve.request.unit) : null,
     computed: budget?.value ?? null,
-    fieller: quantified && back ? fiellerOf(curve, readings.meanY ?? NaN, back, factor) : null,
+    fieller: quantified && back ? fiellerOf(curve, readings.meanY ?? NaN, back, scaling) : null,
     criticalValue: critical.value,
     budget: budget?.lines ?? [],
     reportCase: kind,

@@ -33,6 +33,8 @@ export interface Ware {
   readonly repeatabilityMl?: number;
   /** Half-width of the room's temperature range about 20 °C, taken as rectangular. */
   readonly temperatureRangeK?: number;
+  /** Names the very piece: its tolerance is one and the same error wherever the piece is named again. */
+  readonly piece?: string;
 }
 
 export interface DilutionStep {
@@ -43,6 +45,30 @@ export interface DilutionStep {
   readonly toUMl?: number;
   readonly takenWare?: Ware;
   readonly toWare?: Ware;
+}
+
+/** A dilution by weighing. Without densities the solutions are taken as equally dense. */
+export interface MassDilutionStep {
+  readonly takenG: number;
+  readonly toG: number;
+  /** Standard uncertainties. */
+  readonly takenUG?: number;
+  readonly toUG?: number;
+  readonly densities?: {
+    readonly takenGPerMl: number;
+    readonly toGPerMl: number;
+    readonly takenUGPerMl?: number;
+    readonly toUGPerMl?: number;
+  };
+}
+
+export type AnyDilutionStep = DilutionStep | MassDilutionStep;
+
+/** What all standards share under a name of its own: the purity of the material, the flask of the stock. */
+export interface SharedUncertainty {
+  readonly source: string;
+  /** Relative standard uncertainty. */
+  readonly relativeU: number;
 }
 
 export interface BlankRequest {
@@ -73,7 +99,16 @@ export interface UnknownRequest {
   /** Standard uncertainty of the path; giving it says that this is another cell than the standards'. */
   readonly pathLengthUMm?: number;
   readonly weight?: number;
-  readonly dilution?: readonly DilutionStep[];
+  readonly dilution?: readonly AnyDilutionStep[];
+  /** Recovery of the method as a fraction, which the result is divided by; instead of the request's. */
+  readonly recovery?: ValueWithU;
+  /** Concentration in the measured solution as estimated from the wing of its band, for advice only. */
+  readonly wingEstimate?: number;
+}
+
+export interface OwnedGlassware {
+  readonly pipettesMl: readonly number[];
+  readonly flasksMl: readonly number[];
 }
 
 export interface CurveRequest {
@@ -97,6 +132,12 @@ export interface CurveRequest {
   readonly standards: readonly StandardRequest[];
   /** Relative standard uncertainty of what all standards share (stock, purity, common ware). */
   readonly standardsRelativeU?: number;
+  /** The same, by name: each is a line of its own, beside standardsRelativeU. */
+  readonly standardsShared?: readonly SharedUncertainty[];
+  /** Recovery of the method as a fraction, which every result is divided by. */
+  readonly recovery?: ValueWithU;
+  /** Pipettes and flasks that dilutions are to be made with; without them, a usual set. */
+  readonly glassware?: OwnedGlassware;
   readonly unknowns: readonly UnknownRequest[];
 }
 
@@ -209,12 +250,19 @@ export interface CurveResult {
 }
 
 export interface BudgetLine {
-  /** "curve", "readings", "blank", "standards", "dilution 1, volume taken", "path length of the unknown" ... */
+  /** "curve", "readings", "blank", "standards", "dilution 1, volume taken", "path length of the unknown", "recovery" ... */
   readonly source: string;
   /** Contribution to u of the concentration in the sample, in its unit. */
   readonly u: number;
   /** u² over the sum of all u²; the shares add up to 1. */
   readonly share: number;
+  /** Standard uncertainty of the quantity behind the line, in its own unit (empty for a ratio or an absorbance). */
+  readonly inputU: number;
+  readonly inputUnit: string;
+  /** ∂C/∂(that quantity), with its sign: u = |sensitivity| inputU. */
+  readonly sensitivity: number;
+  /** Null when infinite. */
+  readonly degreesOfFreedom: number | null;
   /** True on the lines that rest on the curve's one residual standard deviation. */
   readonly sharesS?: true;
 }
@@ -238,6 +286,10 @@ export interface DilutionAdvice {
   readonly atLeast: boolean;
   /** Absorbance as read to expect after it; null when it cannot be foretold. */
   readonly expectedAbsorbance: number | null;
+  /** The glassware that makes it, of what the laboratory owns; absent when none was stated. */
+  readonly by?: readonly { readonly takenMl: number; readonly toMl: number }[];
+  /** True when it rests on the wing of the band, since the reading itself says too little. */
+  readonly fromWing?: true;
 }
 
 export interface UnknownResult {
@@ -251,6 +303,8 @@ export interface UnknownResult {
   readonly transmittance: number | null;
   readonly measured: ValueWithU | null;
   readonly dilutionFactor: ValueWithU;
+  /** What the result was divided by, when a recovery was given. */
+  readonly recovery?: ValueWithU;
   readonly concentration: Concentration | null;
   /** The signed number behind the report, in the sample; for the working only. */
   readonly computed: number | null;

@@ -17,10 +17,15 @@ const name = z.string().max(LIMITS.name).optional();
 const numbers = z.number().optional();
 
 const ware = z
-  .strictObject({ toleranceMl: numbers, repeatabilityMl: numbers, temperatureRangeK: numbers })
+  .strictObject({
+    toleranceMl: numbers,
+    repeatabilityMl: numbers,
+    temperatureRangeK: numbers,
+    piece: z.string().max(LIMITS.name).optional(),
+  })
   .optional();
 
-const dilutionStep = z.strictObject({
+const volumeStep = z.strictObject({
   takenMl: z.number(),
   toMl: z.number(),
   takenUMl: numbers,
@@ -28,6 +33,31 @@ const dilutionStep = z.strictObject({
   takenWare: ware,
   toWare: ware,
 });
+
+const massStep = z.strictObject({
+  takenG: z.number(),
+  toG: z.number(),
+  takenUG: numbers,
+  toUG: numbers,
+  densities: z
+    .strictObject({
+      takenGPerMl: z.number(),
+      toGPerMl: z.number(),
+      takenUGPerMl: numbers,
+      toUGPerMl: numbers,
+    })
+    .optional(),
+});
+
+const dilution = z
+  .array(
+    z.union([volumeStep, massStep], 'A dilution step is volumes (takenMl, toMl) or masses (takenG, toG)'),
+  )
+  .max(LIMITS.dilutionSteps)
+  .optional();
+
+const recovery = z.strictObject({ value: z.number(), u: z.number() }).optional();
+const volumes = z.array(z.number()).max(LIMITS.glassware);
 
 const standard = z.strictObject({
   name,
@@ -45,7 +75,9 @@ const unknown = z.strictObject({
   pathLengthMm: numbers,
   pathLengthUMm: numbers,
   weight: numbers,
-  dilution: z.array(dilutionStep).max(LIMITS.dilutionSteps).optional(),
+  dilution,
+  recovery,
+  wingEstimate: numbers,
 });
 
 export const standardCurveCalculation = z.strictObject({
@@ -73,5 +105,11 @@ export const standardCurveCalculation = z.strictObject({
     .optional(),
   standards: z.array(standard).max(LIMITS.standards),
   standardsRelativeU: numbers,
+  standardsShared: z
+    .array(z.strictObject({ source: z.string().min(1).max(LIMITS.name), relativeU: z.number() }))
+    .max(LIMITS.dilutionSteps)
+    .optional(),
+  recovery,
+  glassware: z.strictObject({ pipettesMl: volumes, flasksMl: volumes }).optional(),
   unknowns: z.array(unknown).max(LIMITS.determinations).default([]),
 }) satisfies z.ZodType<CurveRequest>;

@@ -21,7 +21,8 @@ export function molarAbsorptivity(curve: FittedCurve): MolarAbsorptivity | undef
   const b = fit.coefficients[1] ?? NaN;
   const value = b * epsilonFactor(request);
   const slope = Math.sqrt(fit.covariance[1]?.[1] ?? NaN) / Math.abs(b);
-  const standards = request.standardsRelativeU ?? 0;
+  const shared = (request.standardsShared ?? []).map((item) => item.relativeU);
+  const standards = Math.hypot(request.standardsRelativeU ?? 0, ...shared);
   const path = (request.pathLengthUMm ?? 0) / request.pathLengthMm;
   return {
     value,

@@ -1,7 +1,7 @@
 import { EngineError } from '../errors';
-import type { BlankRequest, CurveRequest, StandardRequest } from '../types';
+import type { BlankRequest, CurveRequest, OwnedGlassware, StandardRequest } from '../types';
 import { CONCENTRATION_UNIT_NAMES, isMolar } from '../units';
-import { checkUnknown } from './check-unknown';
+import { checkRecovery, checkUnknown } from './check-unknown';
 import {
   requireChoice,
   requireFinite,
@@ -76,6 +76,19 @@ function checkNumbers(request: CurveRequest): void {
     'the relative uncertainty of the standards',
     '/standardsRelativeU',
   );
+  request.standardsShared?.forEach(({ source, relativeU }, i) =>
+    requireNotNegative(relativeU, `the relative uncertainty of ${source}`, `/standardsShared/${i}/relativeU`),
+  );
+  checkRecovery(request.recovery, '/recovery');
+  checkGlassware(request.glassware);
+}
+
+function checkGlassware(owned: OwnedGlassware | undefined): void {
+  for (const list of ['pipettesMl', 'flasksMl'] as const) {
+    owned?.[list].forEach((volume, i) =>
+      requirePositive(volume, 'VOLUME_NOT_POSITIVE', 'the volume of a piece (mL)', `/glassware/${list}/${i}`),
+    );
+  }
 }
 
 function checkBlank(blank: BlankRequest, request: CurveRequest): void {

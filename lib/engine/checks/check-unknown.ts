@@ -1,5 +1,13 @@
 import { EngineError } from '../errors';
-import type { DilutionStep, UnknownRequest, Ware } from '../types';
+import type {
+  AnyDilutionStep,
+  DilutionStep,
+  MassDilutionStep,
+  UnknownRequest,
+  ValueWithU,
+  Ware,
+} from '../types';
+import { isMassStep } from '../unknown/dilution-factor';
 import { requireNotNegative, requirePositive, requireReadings } from './require';
 
 export function checkUnknown(unknown: UnknownRequest, pointer: string): void {
@@ -16,21 +24,57 @@ export function checkUnknown(unknown: UnknownRequest, pointer: string): void {
     `${pointer}/pathLengthUMm`,
   );
   requirePositive(unknown.weight, 'WEIGHT_NOT_POSITIVE', 'a weight', `${pointer}/weight`);
-  (unknown.dilution ?? []).forEach((step, i) => checkStep(step, `${pointer}/dilution/${i}`));
+  requirePositive(
+    unknown.wingEstimate,
+    'ESTIMATE_NOT_POSITIVE',
+    'the estimate from the wing',
+    `${pointer}/wingEstimate`,
+  );
+  checkDilution(unknown.dilution ?? [], `${pointer}/dilution`);
+  checkRecovery(unknown.recovery, `${pointer}/recovery`);
+}
+
+export function checkDilution(steps: readonly AnyDilutionStep[], pointer: string): void {
+  steps.forEach((step, i) => {
+    if (isMassStep(step)) checkMassStep(step, `${pointer}/${i}`);
+    else checkStep(step, `${pointer}/${i}`);
+  });
 }
 
 function checkStep(step: DilutionStep, pointer: string): void {
   requirePositive(step.takenMl, 'VOLUME_NOT_POSITIVE', 'the volume taken (mL)', `${pointer}/takenMl`);
   requirePositive(step.toMl, 'VOLUME_NOT_POSITIVE', 'the volume made up to (mL)', `${pointer}/toMl`);
-  if (step.toMl < step.takenMl) {
-    throw new EngineError(
-      'DILUTION_BELOW_TAKEN',
-      `a dilution must be made up to at least what was taken: ${step.takenMl} mL taken, made up to ${step.toMl} mL`,
-      `${pointer}/toMl`,
-    );
-  }
+  requireGrowth(step.takenMl, step.toMl, 'mL', `${pointer}/toMl`);
   checkVolume(step.takenUMl, step.takenWare, `${pointer}/taken`);
   checkVolume(step.toUMl, step.toWare, `${pointer}/to`);
+}
+
+function requireGrowth(taken: number, to: number, unit: string, pointer: string): void {
+  if (to >= taken) return;
+  throw new EngineError(
+    'DILUTION_BELOW_TAKEN',
+    `a dilution must be made up to at least what was taken: ${taken} ${unit} taken, made up to ${to} ${unit}`,
+    pointer,
+  );
+}
+
+function checkMassStep(step: MassDilutionStep, pointer: string): void {
+  requirePositive(step.takenG, 'MASS_NOT_POSITIVE', 'the mass taken (g)', `${pointer}/takenG`);
+  requirePositive(step.toG, 'MASS_NOT_POSITIVE', 'the mass made up to (g)', `${pointer}/toG`);
+  requireGrowth(step.takenG, step.toG, 'g', `${pointer}/toG`);
+  requireNotNegative(step.takenUG, 'the uncertainty of a mass (g)', `${pointer}/takenUG`);
+  requireNotNegative(step.toUG, 'the uncertainty of a mass (g)', `${pointer}/toUG`);
+  for (const [member, value] of Object.entries(step.densities ?? {})) {
+    const at = `${pointer}/densities/${member}`;
+    if (member.includes('UG')) requireNotNegative(value, 'the uncertainty of a density (g/mL)', at);
+    else requirePositive(value, 'MASS_NOT_POSITIVE', 'a density (g/mL)', at);
+  }
+}
+
+export function checkRecovery(recovery: ValueWithU | undefined, pointer: string): void {
+  if (!recovery) return;
+  requirePositive(recovery.value, 'RECOVERY_NOT_POSITIVE', 'the recovery', `${pointer}/value`);
+  requireNotNegative(recovery.u, 'the uncertainty of the recovery', `${pointer}/u`);
 }
 
 function checkVolume(uMl: number | undefined, ware: Ware | undefined, pointer: string): void {

@@ -1,37 +1,16 @@
 import type { FittedCurve } from '../fit-curve';
 import { NORMAL_PATH_MM } from '../prepare-points';
-import type { BudgetLine, UnknownRequest } from '../types';
-import { type Component, coverageFactor, effectiveDegreesOfFreedom } from '../uncertainty/expand';
+import { fittedVarianceAt } from '../regression/fit';
+import type { UnknownRequest } from '../types';
+import { type BudgetTerm, factorTerm, type Scale } from '../uncertainty/budget-term';
+import { combine, type Expanded } from '../uncertainty/combine';
+import { errorSources, type Quantity } from '../uncertainty/quantity';
 import type { ConvertedReadings } from './convert-readings';
-import type { DilutionFactor } from './dilution-factor';
 import type { ReadBack } from './read-back';
-
-/** A line of the budget with what the working needs to derive it. */
-export interface BudgetTerm {
-  readonly source: string;
-  readonly kind: 'curve' | 'readings' | 'blank' | 'standards' | 'volume' | 'path';
-  /** Of the concentration in the sample. */
-  readonly u: number;
-  readonly sharesS: boolean;
-  readonly degreesOfFreedom: number;
-  /** Relative uncertainty behind it, for the lines that are one. */
-  readonly relative?: number;
-  /** Which volume or path it is. */
-  readonly of?: string;
-}
-
-export interface Expanded {
-  readonly terms: readonly BudgetTerm[];
-  readonly lines: readonly BudgetLine[];
-  readonly value: number;
-  readonly u: number;
-  readonly degreesOfFreedom: number;
-  readonly k: number;
-  readonly U: number;
-}
+import { RESULT_OF, type Scaling, scaleText } from './scaling';
 
 /**
- * The budget of a concentration in the sample, C = c·F: u_c² = Σ (c_i u_i)². The lines that rest on the curve's
+ * The budget of a concentration in the sample, C = c·F/R: u_c² = Σ (c_i u_i)². The lines that rest on the curve's
  * one estimate s (curve, readings, a common blank) count as one component with ν = n - q in ν_eff.
  *
  * @source JCGM 100:2008 (GUM), 5.1 and G.4; EURACHEM/CITAC Guide CG 4
@@ -41,84 +20,85 @@ export function makeBudget(
   unknown: UnknownRequest,
   readings: ConvertedReadings,
   back: ReadBack,
-  factor: DilutionFactor,
+  scaling: Scaling,
 ): Expanded {
-  const value = back.c * factor.value;
+  const value = back.c * scaling.value;
+  const result = { of: 'result' as const, value, expression: 'C', from: RESULT_OF };
+  const factors = [...sharedByStandards(curve), ...scaling.quantities];
   const terms = [
-    ...ofTheCurve(curve, readings, back, factor.value),
-    ...ofTheStandards(curve, value),
-    ...factor.volumes
-      .filter((term) => term.uMl > 0)
-      .map((term) => typeB('volume', term.label, value, term.uMl / term.volumeMl, term.id)),
-    ...ofThePaths(curve, unknown, readings, back, factor.value),
+    ...ofTheCurve(curve, readings, back, scaling),
+    ...factorTerms(factors, result, 'unknown.budget.factor'),
+    ...ofThePaths(curve, unknown, readings, back, scaling),
   ];
-  const u = Math.hypot(...terms.map((term) => term.u));
-  const degreesOfFreedom = effectiveDegreesOfFreedom(components(terms), curve.fit.degreesOfFreedom);
-  const k = coverageFactor(curve.request.confidence, degreesOfFreedom);
-  const lines = terms.map((term): BudgetLine => ({
-    source: term.source,
-    u: term.u,
-    share: u === 0 ? 0 : (term.u / u) ** 2,
-    ...(term.sharesS ? { sharesS: true as const } : {}),
-  }));
-  return { terms, lines, value, u, degreesOfFreedom, k, U: k * u };
+  return combine(value, terms, curve.request.confidence, curve.fit.degreesOfFreedom);
 }
 
-function components(terms: readonly BudgetTerm[]): readonly Component[] {
-  const sharing = terms.filter((term) => term.sharesS);
-  const nu = sharing[0]?.degreesOfFreedom ?? Infinity;
-  return [
-    { u: Math.hypot(0, ...sharing.map((term) => term.u)), degreesOfFreedom: nu },
-    ...terms.filter((term) => !term.sharesS),
-  ];
-}
-
-function typeB(
-  kind: BudgetTerm['kind'],
-  source: string,
-  scale: number,
-  relative: number,
-  of?: string,
-): BudgetTerm {
-  return {
-    kind,
-    source,
-    u: Math.abs(scale) * relative,
-    sharesS: false,
-    degreesOfFreedom: Infinity,
-    relative,
-    ...(of === undefined ? {} : { of }),
-  };
+/** A line for every independent error in the factors of a result or reading. */
+export function factorTerms(
+  quantities: readonly Quantity[],
+  scale: Scale,
+  id: string,
+): readonly BudgetTerm[] {
+  return errorSources(quantities).map((source, i) => factorTerm(source, scale, `${id}.${i + 1}`));
 }
 
 function ofTheCurve(
   curve: FittedCurve,
   readings: ConvertedReadings,
   back: ReadBack,
-  factor: number,
+  scaling: Scaling,
 ): readonly BudgetTerm[] {
   const nu = curve.fit.degreesOfFreedom;
   const own = back.replicates.own;
-  const uBlank = commonBlankU(curve, readings, back);
-  const blank: BudgetTerm = {
-    kind: 'blank',
-    source: 'blank',
-    u: uBlank * factor,
+  const perAbsorbance = scaling.value / back.slope;
+  const part = (id: string) => ({
+    expression: scaleText('u', scaling),
+    from: { u: id, ...scaling.from },
+  });
+  const curveTerm: BudgetTerm = {
+    source: 'curve',
+    u: back.uCurve * scaling.value,
+    inputU: Math.sqrt(fittedVarianceAt(curve.fit, back.c)),
+    inputUnit: '',
+    sensitivity: -perAbsorbance,
     sharesS: true,
     degreesOfFreedom: nu,
+    working: part('unknown.u.curve'),
   };
-  return [
-    { kind: 'curve', source: 'curve', u: back.uCurve * factor, sharesS: true, degreesOfFreedom: nu },
-    {
-      kind: 'readings',
-      source: 'readings',
-      u: back.uReadings * factor,
-      // The unknown's own standard deviation is another estimate, with degrees of freedom of its own.
-      sharesS: !own,
-      degreesOfFreedom: own ? readings.y.length - 1 : nu,
+  const readingsTerm: BudgetTerm = {
+    source: 'readings',
+    u: back.uReadings * scaling.value,
+    inputU: Math.sqrt(back.varianceY0),
+    inputUnit: '',
+    sensitivity: perAbsorbance,
+    // The unknown's own standard deviation is another estimate, with degrees of freedom of its own.
+    sharesS: !own,
+    degreesOfFreedom: own ? readings.y.length - 1 : nu,
+    working: part('unknown.u.readings'),
+  };
+  const blanks = blankErrors(curve, readings, back).map((error): BudgetTerm => ({
+    source: error.onlyPath ? 'blank' : `blank at ${error.pathLengthMm} mm`,
+    u: Math.abs(error.sensitivity) * error.u * scaling.value,
+    inputU: error.u,
+    inputUnit: '',
+    sensitivity: error.sensitivity * scaling.value,
+    sharesS: true,
+    degreesOfFreedom: nu,
+    working: {
+      how: 's / sqrt(p_b) through y0 and the slope',
+      inputs: ['curve.s', 'curve.slope', 'unknown.result'],
     },
-    ...(uBlank > 0 ? [blank] : []),
-  ];
+  }));
+  return [curveTerm, readingsTerm, ...blanks.filter((term) => term.u > 0)];
+}
+
+/** The error of a mean blank and what it does to c in the measured solution. */
+export interface BlankError {
+  readonly pathLengthMm: number;
+  readonly onlyPath: boolean;
+  /** ∂c/∂δ, δ in absorbance as read. */
+  readonly sensitivity: number;
+  readonly u: number;
 }
 
 /**
@@ -127,13 +107,17 @@ function ofTheCurve(
  *
  *     ∂c/∂δ = (c Σ w x / Σ w x² - 1) / b        (one path)
  */
-export function commonBlankU(curve: FittedCurve, readings: ConvertedReadings, back: ReadBack): number {
+export function blankErrors(
+  curve: FittedCurve,
+  readings: ConvertedReadings,
+  back: ReadBack,
+): readonly BlankError[] {
   const { fit, blanks, data, active } = curve;
   const [, slope = NaN] = fit.beta;
-  if (fit.model !== 'proportional' || blanks.use !== 'subtract') return 0;
+  if (fit.model !== 'proportional' || blanks.use !== 'subtract') return [];
   const squares = data.x.reduce((sum, x, i) => sum + (data.w[i] ?? 0) * x * x, 0);
-  const paths = new Set(blanks.readings.map((blank) => blank.pathLengthMm));
-  const parts = [...paths].map((pathLengthMm) => {
+  const paths = [...new Set(blanks.readings.map((blank) => blank.pathLengthMm))];
+  return paths.map((pathLengthMm) => {
     const lever = active.reduce(
       (sum, point, i) =>
         point.pathLengthMm === pathLengthMm ? sum + (data.w[i] ?? 0) * (data.x[i] ?? 0) : sum,
@@ -141,19 +125,33 @@ export function commonBlankU(curve: FittedCurve, readings: ConvertedReadings, ba
     );
     const direct = readings.pathLengthMm === pathLengthMm ? 1 : 0;
     const perMm = NORMAL_PATH_MM / pathLengthMm;
-    const sensitivity = ((back.c * lever) / squares - direct) * (perMm / slope);
     // s²/(p_b w): the blank is a reading at the absorbance zero, in its own path.
     const weight = curve.weightAt(0, 0, pathLengthMm) * perMm ** 2;
-    const uMean = fit.residualSd / Math.sqrt(blanks.countAt(pathLengthMm) * weight);
-    return sensitivity * uMean;
+    return {
+      pathLengthMm,
+      onlyPath: paths.length === 1,
+      sensitivity: ((back.c * lever) / squares - direct) * (perMm / slope),
+      u: fit.residualSd / Math.sqrt(blanks.countAt(pathLengthMm) * weight),
+    };
   });
-  return Math.hypot(0, ...parts);
 }
 
-/** What all standards share (stock, purity, common ware), counted once. */
-function ofTheStandards(curve: FittedCurve, value: number): readonly BudgetTerm[] {
-  const relative = curve.request.standardsRelativeU ?? 0;
-  return relative > 0 ? [typeB('standards', 'standards', value, relative)] : [];
+/** What all standards share (stock, purity, common ware): each a factor of the result, counted once. */
+function sharedByStandards({ request }: FittedCurve): readonly Quantity[] {
+  const shared = [
+    { source: 'standards', relativeU: request.standardsRelativeU ?? 0 },
+    ...(request.standardsShared ?? []),
+  ];
+  return shared.map(({ source, relativeU }): Quantity => ({
+    id: '',
+    label: source,
+    symbol: 'f',
+    unit: '',
+    value: 1,
+    power: 1,
+    spreads: [{ shape: 'normal', u: relativeU }],
+    source: 'concentrations of the standards as stated',
+  }));
 }
 
 /**
@@ -165,15 +163,37 @@ function ofThePaths(
   unknown: UnknownRequest,
   readings: ConvertedReadings,
   back: ReadBack,
-  factor: number,
+  scaling: Scaling,
 ): readonly BudgetTerm[] {
   if (!isOtherCell(curve, unknown)) return [];
-  const scale = ((readings.meanY ?? 0) / back.slope) * factor;
-  const own = (unknown.pathLengthUMm ?? 0) / readings.pathLengthMm;
-  const standards = (curve.request.pathLengthUMm ?? 0) / curve.request.pathLengthMm;
+  const slope = curve.fit.model === 'quadratic' ? 'unknown.slope' : 'curve.slope';
+  const scale: Scale = {
+    of: 'reading',
+    value: ((readings.meanY ?? 0) / back.slope) * scaling.value,
+    expression: scaleText('(y0 / b)', scaling),
+    from: { y0: 'unknown.mean', b: slope, ...scaling.from },
+  };
+  return factorTerms(pathQuantities(curve, unknown, readings), scale, 'unknown.budget.path');
+}
+
+function pathQuantities(
+  curve: FittedCurve,
+  unknown: UnknownRequest,
+  readings: ConvertedReadings,
+): readonly Quantity[] {
+  const path = (whose: 'unknown' | 'standards', value: number, u: number, power: 1 | -1): Quantity => ({
+    id: whose === 'unknown' ? 'unknown.path' : 'unknown.standardsPath',
+    label: `path length of the ${whose}`,
+    symbol: 'l',
+    unit: 'mm',
+    value,
+    power,
+    spreads: [{ shape: 'normal', u }],
+    source: 'given',
+  });
   return [
-    ...(own > 0 ? [typeB('path', 'path length of the unknown', scale, own, 'unknown')] : []),
-    ...(standards > 0 ? [typeB('path', 'path length of the standards', scale, standards, 'standards')] : []),
+    path('unknown', readings.pathLengthMm, unknown.pathLengthUMm ?? 0, -1),
+    path('standards', curve.request.pathLengthMm, curve.request.pathLengthUMm ?? 0, 1),
   ];
 }
 

@@ -1,128 +1,93 @@
-import type { BudgetTerm, Expanded } from '../unknown/budget';
-import type { ReadBack } from '../unknown/read-back';
-import type { From, Ledger } from './ledger';
-import type { UnknownRecord } from './record-unknown';
+import type { BudgetTerm } from '../uncertainty/budget-term';
+import type { Expanded } from '../uncertainty/combine';
+import { type Scaling, scaleText } from '../unknown/scaling';
+import type { Ledger } from './ledger';
 
 const GUM = 'JCGM 100 (GUM)';
 
-/** Lines from the measured solution to the result in the sample: dilution, budget, coverage, interval. */
-export function recordBudget(ledger: Ledger, record: UnknownRecord, back: ReadBack, budget: Expanded): void {
-  const { unit } = record.curve.request;
-  recordFactor(ledger, record);
+/** What the last lines of a result are made of, whatever it was measured by. */
+export interface BudgetRecord {
+  readonly unit: string;
+  readonly confidence: number;
+  readonly scaling: Scaling;
+  readonly budget: Expanded;
+  /** Ids that ν rests on when every line shares one estimate; else the lines themselves. */
+  readonly nuFrom: readonly string[];
+}
+
+/** Lines from the measured solution to the result in the sample: dilution, recovery, budget, coverage, interval. */
+export function recordBudget(ledger: Ledger, record: BudgetRecord): void {
+  const { unit, scaling, budget } = record;
+  recordScaling(ledger, scaling);
   ledger.line(
     {
       id: 'unknown.result',
       label: 'Concentration in the sample',
       symbol: 'C',
       unit,
-      source: 'dilution undone',
+      source: scaling.recovery ? 'dilution undone, divided by the recovery' : 'dilution undone',
     },
-    'c * F',
-    { c: 'unknown.measured', F: 'unknown.factor' },
+    scaleText('c', scaling),
+    { c: 'unknown.measured', ...scaling.from },
     budget.value,
   );
-  const termIds = budget.terms.map((term, i) => recordTerm(ledger, record, back, term, i));
+  const termIds = budget.terms.map((term, i) => recordTerm(ledger, unit, term, i));
   ledger.line(
     { id: 'unknown.u', label: 'Combined standard uncertainty', symbol: 'u(C)', unit, source: `${GUM}, 5.1` },
-    `sqrt(${termIds.map((_, i) => `u_${i + 1}^2`).join(' + ')})`,
+    termIds.length === 0 ? '0' : `sqrt(${termIds.map((_, i) => `u_${i + 1}^2`).join(' + ')})`,
     Object.fromEntries(termIds.map((id, i) => [`u_${i + 1}`, id])),
     budget.u,
   );
-  recordCoverage(ledger, record, budget, termIds);
+  recordCoverage(ledger, record, termIds);
 }
 
-function recordFactor(ledger: Ledger, { factor, unknown }: UnknownRecord): void {
-  for (const volume of factor.volumes) {
-    ledger.given(
-      { id: volume.id, label: volume.label, symbol: volume.symbol, unit: 'mL', source: 'given' },
-      volume.volumeMl,
-    );
+function recordScaling(ledger: Ledger, { factor, quantities }: Scaling): void {
+  for (const { id, label, symbol, unit, source, value } of quantities) {
+    ledger.given({ id, label, symbol, unit, source }, value);
   }
-  const text = {
-    id: 'unknown.factor',
-    label: 'Dilution factor',
-    symbol: 'F',
-    source: 'volumes made up to over volumes taken',
-  };
-  const steps = unknown.dilution ?? [];
-  if (steps.length === 0) {
+  const text = { id: 'unknown.factor', label: 'Dilution factor', symbol: 'F' };
+  if (factor.quantities.length === 0) {
     ledger.given({ ...text, source: 'not diluted' }, factor.value);
     return;
   }
-  const expression = steps.map((_, i) => `(V_to${i + 1} / V_taken${i + 1})`).join(' * ');
+  const above = factor.quantities.filter(({ power }) => power === 1).map(({ symbol }) => symbol);
+  const below = factor.quantities.filter(({ power }) => power === -1).map(({ symbol }) => symbol);
   ledger.line(
-    text,
-    expression,
-    Object.fromEntries(factor.volumes.map((volume) => [volume.symbol, volume.id])),
+    { ...text, source: 'made up to over taken' },
+    `(${above.join(' * ')}) / (${below.join(' * ')})`,
+    Object.fromEntries(factor.quantities.map(({ symbol, id }) => [symbol, id])),
     factor.value,
   );
 }
 
 /** One line of the budget; returns its id. */
-function recordTerm(
-  ledger: Ledger,
-  { curve }: UnknownRecord,
-  back: ReadBack,
-  term: BudgetTerm,
-  index: number,
-): string {
+function recordTerm(ledger: Ledger, unit: string, term: BudgetTerm, index: number): string {
   const id = `unknown.budget.${index + 1}`;
   const text = {
     id,
     label: `Budget: ${term.source}`,
     symbol: `u_${index + 1}`,
-    unit: curve.request.unit,
+    unit,
     source: `${GUM}, 5.1`,
   };
-  if (term.kind === 'curve' || term.kind === 'readings') {
-    const part = `unknown.u.${term.kind}`;
-    ledger.line(text, 'u * F', { u: part, F: 'unknown.factor' }, term.u);
-  } else if (term.kind === 'blank') {
-    ledger.solved(
-      text,
-      's / sqrt(p_b) through y0 and the slope',
-      ['curve.s', 'curve.slope', 'unknown.result'],
-      term.u,
-    );
-  } else {
-    ledger.given(
-      {
-        id: `${id}.relative`,
-        label: `Relative uncertainty: ${term.source}`,
-        symbol: 'u_rel',
-        source: 'given',
-      },
-      term.relative ?? 0,
-    );
-    const scale: From = { C: 'unknown.result', u_rel: `${id}.relative` };
-    if (term.kind === 'path') {
-      const slope = curve.fit.model === 'quadratic' ? 'unknown.slope' : 'curve.slope';
-      ledger.line(
-        text,
-        'abs(y0 / b) * F * u_rel',
-        { y0: 'unknown.mean', b: slope, F: 'unknown.factor', u_rel: `${id}.relative` },
-        term.u,
-      );
-    } else ledger.line(text, 'abs(C) * u_rel', scale, term.u);
+  const { working } = term;
+  if ('how' in working) {
+    ledger.solved(text, working.how, working.inputs, term.u);
+    return id;
   }
+  if (working.given) ledger.given(working.given.text, working.given.value);
+  ledger.line(text, working.expression, working.from, term.u);
   return id;
 }
 
-function recordCoverage(
-  ledger: Ledger,
-  { curve }: UnknownRecord,
-  budget: Expanded,
-  termIds: readonly string[],
-): void {
-  const { unit, confidence } = curve.request;
+function recordCoverage(ledger: Ledger, record: BudgetRecord, termIds: readonly string[]): void {
+  const { unit, confidence, budget } = record;
   const nu = Number.isFinite(budget.degreesOfFreedom) ? budget.degreesOfFreedom : 'infinite';
   ledger.solved(
     { id: 'unknown.nu', label: 'Effective degrees of freedom', symbol: 'nu_eff', source: `${GUM}, G.4` },
     'u(C)^4 / sum(u_i^4 / nu_i), the lines that share s as one',
     // With nothing but lines that share s, ν is the curve's, whatever their sizes.
-    budget.terms.every((term) => term.sharesS)
-      ? ['curve.degreesOfFreedom']
-      : [...termIds, 'curve.degreesOfFreedom'],
+    budget.terms.every((term) => term.sharesS) ? record.nuFrom : [...termIds, ...record.nuFrom],
     nu,
   );
   ledger.solved(

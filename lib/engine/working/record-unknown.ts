@@ -1,10 +1,11 @@
 import type { CriticalValue } from '../calibration/critical-value';
 import type { FittedCurve } from '../fit-curve';
 import type { UnknownRequest } from '../types';
-import type { Expanded } from '../unknown/budget';
+import { isOtherCell } from '../unknown/budget';
+import type { Expanded } from '../uncertainty/combine';
 import type { ConvertedReadings } from '../unknown/convert-readings';
-import type { DilutionFactor } from '../unknown/dilution-factor';
 import type { ReadBack } from '../unknown/read-back';
+import type { Scaling } from '../unknown/scaling';
 import type { Ledger } from './ledger';
 import { recordBudget } from './record-budget';
 import { recordReadBack } from './record-read-back';
@@ -17,7 +18,7 @@ export interface UnknownRecord {
   readonly unknown: UnknownRequest;
   readonly readings: ConvertedReadings;
   readonly back: ReadBack | null;
-  readonly factor: DilutionFactor;
+  readonly scaling: Scaling;
   readonly budget: Expanded | null;
   readonly critical: CriticalValue;
   readonly report: string;
@@ -46,7 +47,11 @@ export function recordUnknown(ledger: Ledger, record: UnknownRecord): void {
     );
   }
   if (back) recordReadBack(ledger, record, back);
-  if (back && budget) recordBudget(ledger, record, back, budget);
+  if (back && budget) {
+    const { unit, confidence } = record.curve.request;
+    const { scaling } = record;
+    recordBudget(ledger, { unit, confidence, scaling, budget, nuFrom: ['curve.degreesOfFreedom'] });
+  }
   recordReport(ledger, record);
 }
 
@@ -57,6 +62,18 @@ function recordReadings(ledger: Ledger, { curve, unknown, readings }: UnknownRec
     { id: 'unknown.path', label: 'Path length of the unknown', symbol: 'l', unit: 'mm', source: 'given' },
     readings.pathLengthMm,
   );
+  if (isOtherCell(curve, unknown)) {
+    ledger.given(
+      {
+        id: 'unknown.standardsPath',
+        label: 'Path length of the standards',
+        symbol: 'l',
+        unit: 'mm',
+        source: 'given',
+      },
+      request.pathLengthMm,
+    );
+  }
   const last = unknown.readings.map((reading, i) =>
     recordReading(ledger, request, blanks, {
       id: `unknown.reading.${i + 1}`,

@@ -13,6 +13,10 @@ const diluted = (takenMl: number, toMl: number, more: object = {}) => [
   unknown([0.3], { dilution: [{ takenMl, toMl, ...more }] }),
 ];
 
+const weighed = (takenG: number, toG: number, more: object = {}) => [
+  unknown([0.3], { dilution: [{ takenG, toG, ...more }] }),
+];
+
 const REFUSALS: readonly [string, Partial<CurveRequest>, string | undefined][] = [
   ['NO_STANDARDS', { standards: [] }, '/standards'],
   ['TOO_FEW_STANDARDS', { standards: standardsOf([1, 2], [0.1, 0.2]) }, '/standards'],
@@ -64,6 +68,37 @@ const REFUSALS: readonly [string, Partial<CurveRequest>, string | undefined][] =
     { unknowns: diluted(1, 10, { takenWare: { toleranceMl: -1 } }) },
     '/unknowns/0/dilution/0/takenWare/toleranceMl',
   ],
+  ['MASS_NOT_POSITIVE', { unknowns: weighed(0, 10) }, '/unknowns/0/dilution/0/takenG'],
+  ['MASS_NOT_POSITIVE', { unknowns: weighed(1, 0) }, '/unknowns/0/dilution/0/toG'],
+  ['DILUTION_BELOW_TAKEN', { unknowns: weighed(10, 9) }, '/unknowns/0/dilution/0/toG'],
+  ['UNCERTAINTY_NEGATIVE', { unknowns: weighed(1, 10, { toUG: -1 }) }, '/unknowns/0/dilution/0/toUG'],
+  [
+    'MASS_NOT_POSITIVE',
+    { unknowns: weighed(1, 10, { densities: { takenGPerMl: 1, toGPerMl: 0 } }) },
+    '/unknowns/0/dilution/0/densities/toGPerMl',
+  ],
+  [
+    'UNCERTAINTY_NEGATIVE',
+    { unknowns: weighed(1, 10, { densities: { takenGPerMl: 1, toGPerMl: 1, toUGPerMl: -1 } }) },
+    '/unknowns/0/dilution/0/densities/toUGPerMl',
+  ],
+  ['RECOVERY_NOT_POSITIVE', { recovery: { value: 0, u: 0.01 } }, '/recovery/value'],
+  [
+    'UNCERTAINTY_NEGATIVE',
+    { unknowns: [unknown([0.3], { recovery: { value: 0.9, u: -1 } })] },
+    '/unknowns/0/recovery/u',
+  ],
+  [
+    'ESTIMATE_NOT_POSITIVE',
+    { unknowns: [unknown(['OVER'], { wingEstimate: 0 })] },
+    '/unknowns/0/wingEstimate',
+  ],
+  [
+    'UNCERTAINTY_NEGATIVE',
+    { standardsShared: [{ source: 'purity', relativeU: -0.1 }] },
+    '/standardsShared/0/relativeU',
+  ],
+  ['VOLUME_NOT_POSITIVE', { glassware: { pipettesMl: [1, 0], flasksMl: [10] } }, '/glassware/pipettesMl/1'],
   [
     'BLANK_LEVEL_THROUGH_ZERO',
     { model: 'proportional', blank: { readings: [0.01], use: 'level' } },

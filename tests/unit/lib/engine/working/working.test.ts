@@ -30,6 +30,19 @@ const CONFIGURATIONS: Readonly<Record<string, CurveRequest>> = {
       }),
     ],
   }),
+  'dilution by mass, recovery, named uncertainties, one pipette twice': request({
+    recovery: { value: 0.93, u: 0.011 },
+    standardsShared: [{ source: 'purity', relativeU: 0.0015 }],
+    unknowns: [
+      unknown([0.351, 0.3523], {
+        dilution: [
+          { takenG: 2.0013, toG: 19.987, takenUG: 0.0003, toUG: 0.0004 },
+          { takenMl: 5, toMl: 50, takenWare: { toleranceMl: 0.015, piece: 'P5' }, toUMl: 0.03 },
+          { takenMl: 5, toMl: 25, takenWare: { toleranceMl: 0.015, piece: 'P5' } },
+        ],
+      }),
+    ],
+  }),
   'weights 1/x': request({ weighting: '1/x', unknowns: [unknown([0.351, 0.3523])] }),
   'a line through zero': request({ model: 'proportional', unknowns: [unknown([0.351, 0.3523])] }),
   'a line through zero with its blank': request({
