@@ -46,3 +46,15 @@ test.each([
 ])('t(0.975; %d)', (nu, t) => {
   expectDigits(tQuantile(0.975, nu), t, 8);
 });
+
+// Reference: t_quantile of fixtures/reference/mpmath-judge/quantiles.py, fifty digits.
+test.each([
+  [0.975, 99999999, 1.9599640082627666781],
+  [0.975, 1e8, 1.9599640082627664408],
+  [0.975, 2e16, 1.9599639845400539742],
+  [0.975, 1e20, 1.9599639845400538556],
+  [0.505, 1e12, 0.012533469508072408153],
+  [0.9999, 1e8, 3.7190166233483241525],
+])('t(%d; %d), where it is all but normal', (probability, nu, t) => {
+  expectDigits(tQuantile(probability, nu), t, 13);
+});
