@@ -8,6 +8,8 @@ const TEST_NAMES: Readonly<Record<keyof CurveResult['tests'], string>> = {
   mandel: 'Curvature (Mandel)',
   intercept: 'Intercept against zero',
   homogeneity: 'Equal variances',
+  cochran: 'No level wider than the others (Cochran)',
+  levene: 'Levels alike (Levene)',
 };
 
 function Test({ name, test }: { name: string; test: TestAnswer }) {

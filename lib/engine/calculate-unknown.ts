@@ -75,8 +75,9 @@ export function calculateUnknown(
     advice,
   });
   const quantified = isQuantified(kind) && budget !== null;
-  const ledger = new Ledger(curveLedger);
-  recordUnknown(ledger, { curve, unknown, readings, back, scaling, budget, critical, report });
+  const ledger = new Ledger(curveLedger, (lines) =>
+    recordUnknown(lines, { curve, unknown, readings, back, scaling, budget, critical, report }),
+  );
   return {
     name: unknown.name ?? `unknown ${index + 1}`,
     absorbanceAsRead: readings.meanAsRead,
@@ -104,6 +105,8 @@ export function calculateUnknown(
     }),
     ...(advice === null ? {} : { advice }),
     ...(dilutionAdvice === null ? {} : { dilutionAdvice }),
-    working: ledger.steps,
+    get working() {
+      return ledger.steps;
+    },
   };
 }

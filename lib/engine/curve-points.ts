@@ -1,9 +1,13 @@
 import { absorbanceAsRead } from './absorbance';
 import { invert } from './calibration/invert';
 import type { FittedCurve } from './fit-curve';
+import type { Level } from './hypothesis/levels';
 import type { CurvePoint } from './prepare-points';
 import { leverageAt, valueAt } from './regression/fit';
 import type { LevelAnswer, PointAnswer } from './types';
+
+/** Leverage of a point that the curve must pass through: it has no residual to judge. */
+const FORCED = 1 - 1e-12;
 
 /** 100 (x' - x)/x; null at concentration zero. */
 function relativeErrorPercent(found: number | null, x: number): number | null {
@@ -21,7 +25,7 @@ function pointAnswer(curve: FittedCurve, point: CurvePoint, position: number | u
   const fitted = valueAt(fit, point.concentration);
   const residual = point.y === null ? null : point.y - fitted;
   const found = point.y === null ? null : invert(fit, point.y);
-  const weight = position === undefined ? 0 : (curve.data.w[position] ?? 0);
+  const weight = position === undefined ? 0 : (curve.data.w[position] as number);
   const leverage = position === undefined ? null : leverageAt(fit, point.concentration, weight);
   return {
     name: point.name,
@@ -39,11 +43,28 @@ function pointAnswer(curve: FittedCurve, point: CurvePoint, position: number | u
     backCalculated: found,
     relativeErrorPercent: relativeErrorPercent(found, point.concentration),
     leverage,
+    standardisedResidual: standardisedResidual(curve, residual, weight, leverage),
     cooksDistance: cooksDistance(curve, residual, weight, leverage),
     ...(point.excludedBecause === undefined
       ? {}
       : { excluded: true as const, excludedBecause: point.excludedBecause }),
   };
+}
+
+/**
+ * Internally studentised residual r √w / (s √(1 - h)): the residual in units of its own standard deviation. Null where
+ * Cook's distance is.
+ *
+ * @source Cook and Weisberg, Residuals and Influence in Regression (1982), 2.2
+ */
+function standardisedResidual(
+  { fit }: FittedCurve,
+  residual: number | null,
+  weight: number,
+  leverage: number | null,
+): number | null {
+  if (residual === null || leverage === null || leverage >= FORCED || fit.residualSd === 0) return null;
+  return (residual * Math.sqrt(weight)) / (fit.residualSd * Math.sqrt(1 - leverage));
 }
 
 /**
@@ -59,27 +80,24 @@ function cooksDistance(
   leverage: number | null,
 ): number | null {
   const { fit } = curve;
-  if (residual === null || leverage === null || leverage >= 1 - 1e-12 || fit.residualSd === 0) return null;
+  if (residual === null || leverage === null || leverage >= FORCED || fit.residualSd === 0) return null;
   return (weight * residual ** 2 * leverage) / (fit.q * fit.residualSd ** 2 * (1 - leverage) ** 2);
 }
 
 /** The fitted readings of each concentration together, in rising order. */
-export function levelAnswers(curve: FittedCurve): readonly LevelAnswer[] {
-  const { x, y } = curve.data;
-  return [...new Set(x)]
-    .sort((a, b) => a - b)
-    .map((concentration) => {
-      const own = y.filter((_, i) => x[i] === concentration);
-      const meanAbsorbance = own.reduce((sum, value) => sum + value, 0) / own.length;
-      const found = invert(curve.fit, meanAbsorbance);
-      return {
-        concentration,
-        readings: own.length,
-        meanAbsorbance,
-        meanBackCalculated: found,
-        relativeErrorPercent: relativeErrorPercent(found, concentration),
-      };
-    });
+export function levelAnswers(curve: FittedCurve, levels: readonly Level[]): readonly LevelAnswer[] {
+  const { y } = curve.data;
+  return levels.map(({ concentration, members }) => {
+    const meanAbsorbance = members.reduce((sum, i) => sum + (y[i] as number), 0) / members.length;
+    const found = invert(curve.fit, meanAbsorbance);
+    return {
+      concentration,
+      readings: members.length,
+      meanAbsorbance,
+      meanBackCalculated: found,
+      relativeErrorPercent: relativeErrorPercent(found, concentration),
+    };
+  });
 }
 
 /**

@@ -5,13 +5,11 @@ import { molarAbsorptivity } from './calibration/molar-absorptivity';
 import { checkRequest } from './checks/check-request';
 import { levelAnswers, pointAnswers, relativeStandardErrorPercent } from './curve-points';
 import { fitCurve, type FittedCurve } from './fit-curve';
-import { homogeneity } from './hypothesis/homogeneity';
-import { interceptTest } from './hypothesis/intercept';
-import { lackOfFit } from './hypothesis/lack-of-fit';
-import { mandel } from './hypothesis/mandel';
+import { curveJudgements, curveTests } from './hypothesis/curve-tests';
+import { levelsOf } from './hypothesis/levels';
 import { judgeCurve } from './judge-curve';
 import type { Fit } from './regression/fit';
-import type { CurveAnswer, CurveRequest, CurveResult, ValueWithU } from './types';
+import type { CurveAnswer, CurveRequest, CurveResult, MolarAbsorptivity, ValueWithU } from './types';
 import { parseUnit } from './units';
 import { ENGINE_VERSION } from './version';
 import { Ledger } from './working/ledger';
@@ -31,11 +29,15 @@ export function calculateStandardCurve(asked: CurveRequest): CurveAnswer {
   const request = { ...asked, unit: parseUnit(asked.unit) ?? asked.unit };
   checkRequest(request);
   const curve = fitCurve(request);
-  const ledger = new Ledger();
-  const result = curveResult(curve, ledger);
+  const epsilon = molarAbsorptivity(curve);
+  const critical = criticalOfCurve(curve);
+  const ledger = new Ledger(undefined, (lines) => {
+    recordCurve(lines, curve, epsilon);
+    recordCritical(lines, curve, critical, 'curve');
+  });
   return {
     engine: ENGINE_VERSION,
-    curve: result,
+    curve: curveResult(curve, epsilon, critical, ledger),
     unknowns: request.unknowns.map((unknown, i) => calculateUnknown(curve, unknown, i, ledger)),
   };
 }
@@ -51,20 +53,17 @@ function coefficient(fit: Fit, i: number): ValueWithU {
   return { value: fit.coefficients[i] ?? NaN, u: Math.sqrt(fit.covariance[i]?.[i] ?? NaN) };
 }
 
-function curveResult(curve: FittedCurve, ledger: Ledger): CurveResult {
+function curveResult(
+  curve: FittedCurve,
+  epsilon: MolarAbsorptivity | undefined,
+  critical: CriticalValue,
+  ledger: Ledger,
+): CurveResult {
   const { fit, request, range } = curve;
-  const epsilon = molarAbsorptivity(curve);
-  const critical = criticalOfCurve(curve);
   const points = pointAnswers(curve);
-  const levels = levelAnswers(curve);
-  const tests = {
-    lackOfFit: lackOfFit(curve),
-    mandel: mandel(curve),
-    intercept: interceptTest(curve),
-    homogeneity: homogeneity(curve),
-  };
-  recordCurve(ledger, curve, epsilon);
-  recordCritical(ledger, curve, critical, 'curve');
+  const grouped = levelsOf(curve.data);
+  const levels = levelAnswers(curve, grouped);
+  const tests = curveTests(curve, grouped);
   return {
     model: fit.model,
     weighting: request.weighting,
@@ -86,10 +85,13 @@ function curveResult(curve: FittedCurve, ledger: Ledger): CurveResult {
     criticalValueReadings: critical.readings,
     ...(epsilon ? { molarAbsorptivity: epsilon } : {}),
     tests,
+    judgements: curveJudgements(curve, grouped, points),
     limits: detectionLimits(curve, critical.readings),
     points,
     levels,
     flags: judgeCurve({ curve, points, levels, tests, criticalValue: critical.value }),
-    working: ledger.steps,
+    get working() {
+      return ledger.steps;
+    },
   };
 }

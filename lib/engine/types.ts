@@ -1,6 +1,9 @@
 import type { Flag } from './flags';
+import type { CurveJudgements } from './types-judgements';
 import type { ConcentrationUnit } from './units';
 import type { WorkingStep } from './working/ledger';
+
+export type * from './types-judgements';
 
 /*
  * The request and the answer of one standard curve. Plain objects that survive JSON unchanged: they are the
@@ -192,6 +195,8 @@ export interface PointAnswer {
   /** Null at concentration zero. */
   readonly relativeErrorPercent: number | null;
   readonly leverage: number | null;
+  /** r √w / (s √(1 - h)); null where it does not exist. Absent in results of engines before 1.1. */
+  readonly standardisedResidual?: number | null;
   readonly cooksDistance: number | null;
   readonly excluded?: true;
   readonly excludedBecause?: 'request' | 'censored' | 'zeroWithReciprocalWeights';
@@ -241,7 +246,11 @@ export interface CurveResult {
     readonly mandel: TestAnswer;
     readonly intercept: TestAnswer;
     readonly homogeneity: TestAnswer;
+    /** Absent, as `judgements`, in results of engines before 1.1. */
+    readonly cochran?: TestAnswer;
+    readonly levene?: TestAnswer;
   };
+  readonly judgements?: CurveJudgements;
   readonly limits: readonly LimitAnswer[];
   readonly points: readonly PointAnswer[];
   readonly levels: readonly LevelAnswer[];

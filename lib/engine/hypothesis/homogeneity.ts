@@ -1,7 +1,7 @@
 import type { FittedCurve } from '../fit-curve';
 import type { TestAnswer } from '../types';
 import { fTestAnswer } from './f-test';
-import { levelsOf } from './levels';
+import { type Level, noScatter } from './levels';
 
 /**
  * Do the two ends of the curve scatter alike? F = larger over smaller variance of the highest and the lowest level,
@@ -9,21 +9,18 @@ import { levelsOf } from './levels';
  *
  * @source ISO 8466-1, in our own words
  */
-export function homogeneity({ data }: FittedCurve): TestAnswer {
-  const levels = levelsOf(data);
-  const ends = [levels[0], levels.at(-1)].flatMap((level) => (level ? [level] : []));
+export function homogeneity({ data }: FittedCurve, levels: readonly Level[]): TestAnswer {
+  // A curve has two levels at least.
+  const ends = [levels[0] as Level, levels.at(-1) as Level];
   if (ends.some((level) => level.readings < 2)) {
     return {
       reason: 'Comparing variances needs two readings or more at the lowest and at the highest level.',
     };
   }
-  const variances = ends.map(({ squares, readings }) => ({
-    variance: squares / (readings - 1),
-    df: readings - 1,
-  }));
-  const [smaller, larger] = variances.sort((a, b) => a.variance - b.variance);
-  const size = data.y.reduce((sum, y, i) => sum + (data.w[i] ?? 0) * y * y, 0);
-  if (!smaller || !larger || smaller.variance <= 1e-24 * size) {
+  const [smaller, larger] = ends
+    .map(({ squares, readings }) => ({ variance: squares / (readings - 1), df: readings - 1 }))
+    .sort((a, b) => a.variance - b.variance) as [End, End];
+  if (smaller.variance <= noScatter(data)) {
     return { reason: 'Comparing variances needs readings that differ at both ends: some are identical.' };
   }
   return fTestAnswer({
@@ -34,4 +31,9 @@ export function homogeneity({ data }: FittedCurve): TestAnswer {
     stands: 'The two ends of the curve scatter alike',
     falls: 'The two ends of the curve scatter differently',
   });
+}
+
+interface End {
+  readonly variance: number;
+  readonly df: number;
 }

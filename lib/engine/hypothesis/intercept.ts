@@ -4,13 +4,14 @@ import { fitLine } from '../regression/fit-line';
 import { tTwoSidedP } from '../stats/student-t';
 import type { TestAnswer } from '../types';
 import { coverageFactor } from '../uncertainty/expand';
+import type { Level } from './levels';
 
 /**
  * Is the intercept told from zero? t = a / u(a) against t(1 - (1 - confidence)/2; ν). A line through zero has none
  * of its own, so the free line of the same points and weights is asked.
  */
-export function interceptTest({ fit, data, request }: FittedCurve): TestAnswer {
-  if (fit.model === 'proportional' && new Set(data.x).size < 3) {
+export function interceptTest({ fit, data, request }: FittedCurve, levels: readonly Level[]): TestAnswer {
+  if (fit.model === 'proportional' && levels.length < 3) {
     return { reason: 'The intercept can be tested with three levels or more.' };
   }
   const free = fit.model === 'proportional' ? fitLine(data) : fit;

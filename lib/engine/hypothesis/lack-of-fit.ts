@@ -1,10 +1,7 @@
 import type { FittedCurve } from '../fit-curve';
 import type { TestAnswer } from '../types';
 import { fTestAnswer } from './f-test';
-import { levelsOf } from './levels';
-
-/** Σ w (y - level mean)² against it stands as no scatter when it is this small a part of Σ w y². */
-const NO_SCATTER = 1e-24;
+import { type Level, noScatter } from './levels';
 
 /**
  * Lack of fit: is the scatter of the levels about the curve more than that of replicates within them?
@@ -13,16 +10,13 @@ const NO_SCATTER = 1e-24;
  *
  * @source IUPAC 1998 (Danzer, Currie), in our own words; checked on the data of CG 4 A5 with scipy
  */
-export function lackOfFit({ fit, data }: FittedCurve): TestAnswer {
-  const levels = levelsOf(data);
+export function lackOfFit({ fit, data }: FittedCurve, levels: readonly Level[]): TestAnswer {
   const df1 = levels.length - fit.q;
   const df2 = fit.n - levels.length;
   if (df2 <= 0)
     return { reason: 'Lack of fit needs replicates: two readings or more at one level at least.' };
-  if (df1 <= 0) return { reason: `Lack of fit needs more levels than the curve has parameters (${fit.q}).` };
   const pure = levels.reduce((sum, level) => sum + level.squares, 0);
-  const size = data.y.reduce((sum, y, i) => sum + (data.w[i] ?? 0) * y * y, 0);
-  if (pure <= NO_SCATTER * size)
+  if (pure <= noScatter(data))
     return { reason: 'Lack of fit needs replicates that differ: these are identical.' };
   return fTestAnswer({
     statistic: Math.max(0, fit.residualSquares - pure) / df1 / (pure / df2),

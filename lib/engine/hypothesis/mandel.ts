@@ -3,6 +3,7 @@ import { fitLine } from '../regression/fit-line';
 import { fitQuadratic } from '../regression/fit-quadratic';
 import type { TestAnswer } from '../types';
 import { fTestAnswer } from './f-test';
+import { type Level, noScatter } from './levels';
 
 /**
  * Mandel's test: does a quadratic leave less scatter than a straight line, by more than chance?
@@ -13,14 +14,13 @@ import { fTestAnswer } from './f-test';
  *
  * @source Mandel (1964), as used in ISO 8466-1, in our own words
  */
-export function mandel({ data }: FittedCurve): TestAnswer {
+export function mandel({ data, fit }: FittedCurve, levels: readonly Level[]): TestAnswer {
   const n = data.x.length;
   if (n < 4) return { reason: `Mandel's test needs at least four readings, got ${n}.` };
-  if (new Set(data.x).size < 3) return { reason: "Mandel's test needs at least three levels." };
-  const line = fitLine(data).residualSquares;
-  const quadratic = fitQuadratic(data).residualSquares;
-  const size = data.y.reduce((sum, y, i) => sum + (data.w[i] ?? 0) * y * y, 0);
-  if (quadratic <= 1e-24 * size)
+  if (levels.length < 3) return { reason: "Mandel's test needs at least three levels." };
+  const line = (fit.model === 'linear' ? fit : fitLine(data)).residualSquares;
+  const quadratic = (fit.model === 'quadratic' ? fit : fitQuadratic(data)).residualSquares;
+  if (quadratic <= noScatter(data))
     return { reason: "Mandel's test needs scatter: a quadratic runs through every point." };
   return fTestAnswer({
     statistic: Math.max(0, line - quadratic) / (quadratic / (n - 3)),

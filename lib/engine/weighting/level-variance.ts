@@ -1,5 +1,7 @@
 import { EngineError } from '../errors';
-import { type CurvePoint, NORMAL_PATH_MM } from '../prepare-points';
+import { mean } from '../math';
+import type { CurvePoint } from '../prepare-points';
+import { pointsByLevel, responseOf, scatterOf } from './replicate-scatter';
 
 interface Level {
   readonly meanY: number;
@@ -19,27 +21,20 @@ export function levelVariances(
   points: readonly CurvePoint[],
   weighting: 'replicates' | 'given',
 ): { readonly ofPoints: readonly number[]; readonly byMean: readonly Level[] } {
-  const groups = new Map<number, CurvePoint[]>();
-  for (const point of points) {
-    const group = groups.get(point.concentration);
-    if (group) group.push(point);
-    else groups.set(point.concentration, [point]);
-  }
-  const levels = new Map<number, Level>();
-  for (const [concentration, group] of groups) {
-    const meanY = group.reduce((sum, point) => sum + (point.y ?? 0), 0) / group.length;
-    const variance =
-      weighting === 'given'
-        ? group.reduce((sum, point) => sum + ofGiven(point), 0) / group.length
-        : replicateVariance(group, meanY, concentration);
-    levels.set(concentration, { meanY, variance });
-  }
+  const variances = new Map<CurvePoint, number>();
+  const byMean = [...pointsByLevel(points)].map(([concentration, group]): Level => {
+    const level = weighting === 'given' ? givenLevel(group) : replicateLevel(group, concentration);
+    for (const point of group) variances.set(point, weighting === 'given' ? ofGiven(point) : level.variance);
+    return level;
+  });
   return {
-    ofPoints: points.map((point) =>
-      weighting === 'given' ? ofGiven(point) : (levels.get(point.concentration)?.variance ?? NaN),
-    ),
-    byMean: [...levels.values()].sort((a, b) => a.meanY - b.meanY),
+    ofPoints: points.map((point) => variances.get(point) as number),
+    byMean: byMean.sort((a, b) => a.meanY - b.meanY),
   };
+}
+
+function givenLevel(group: readonly CurvePoint[]): Level {
+  return { meanY: mean(group.map(responseOf)), variance: mean(group.map(ofGiven)) };
 }
 
 /** A blank level carries no weight of its own in a request: it takes 1. */
@@ -47,7 +42,7 @@ function ofGiven(point: CurvePoint): number {
   return 1 / (point.givenWeight ?? 1);
 }
 
-function replicateVariance(group: readonly CurvePoint[], meanY: number, concentration: number): number {
+function replicateLevel(group: readonly CurvePoint[], concentration: number): Level {
   if (group.length < READINGS_NEEDED) {
     throw new EngineError(
       'REPLICATES_TOO_FEW',
@@ -55,28 +50,24 @@ function replicateVariance(group: readonly CurvePoint[], meanY: number, concentr
       '/weighting',
     );
   }
-  const squares = group.map(
-    (point) => ((((point.y ?? 0) - meanY) * point.pathLengthMm) / NORMAL_PATH_MM) ** 2,
-  );
-  const variance = squares.reduce((sum, value) => sum + value, 0) / (group.length - 1);
-  // Identical readings leave a rounding error of the mean, not an exact zero.
-  if (variance <= (1e-14 * meanY) ** 2) {
+  const scatter = scatterOf(group);
+  if (scatter.variance === 0) {
     throw new EngineError(
       'REPLICATES_WITHOUT_SPREAD',
       `weights from replicates need readings that differ, got the same one throughout at ${concentration}`,
       '/weighting',
     );
   }
-  return variance;
+  return scatter;
 }
 
 /** v read linearly in y between levels, constant outside them. */
 export function interpolateLevels(levels: readonly Level[], y: number): number {
   const next = levels.findIndex((level) => level.meanY >= y);
-  const high = levels[next] ?? levels.at(-1);
-  const low = next > 0 ? levels[next - 1] : high;
-  if (!high || !low) return NaN;
-  if (low === high || next === -1) return high.variance;
+  // A curve has two levels at least; above them all the last one holds.
+  const high = (levels[next] ?? levels.at(-1)) as Level;
+  const low = levels[next - 1];
+  if (low === undefined || next === -1) return high.variance;
   const part = (y - low.meanY) / (high.meanY - low.meanY);
   return low.variance + part * (high.variance - low.variance);
 }

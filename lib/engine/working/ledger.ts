@@ -60,12 +60,30 @@ function templateOf(expression: string, symbols: readonly string[]): Template {
  * anything that was not calculated.
  */
 export class Ledger {
-  readonly steps: WorkingStep[] = [];
+  private readonly recorded: WorkingStep[] = [];
   /** The text of each line's value. */
   private readonly texts = new Map<string, string>();
 
-  /** @param above lines recorded elsewhere (the curve's) that lines here may be made from */
-  constructor(private readonly above?: Ledger) {}
+  /**
+   * @param above lines recorded elsewhere (the curve's) that lines here may be made from
+   * @param record writes the lines when somebody first asks for one: writing them takes longer than the whole
+   *   calculation, and a page that recalculates at every keystroke shows them only on request
+   */
+  constructor(
+    private readonly above?: Ledger,
+    private record?: (ledger: Ledger) => void,
+  ) {}
+
+  get steps(): readonly WorkingStep[] {
+    this.settle();
+    return this.recorded;
+  }
+
+  private settle(): void {
+    const { record } = this;
+    this.record = undefined;
+    record?.(this);
+  }
 
   /** A number that was given, not calculated. */
   given(text: LineText, value: number | string): void {
@@ -104,7 +122,12 @@ export class Ledger {
 
   /** Of these ids, the ones that have a line. */
   present(ids: readonly string[]): readonly string[] {
-    return ids.filter((id) => this.texts.has(id) || this.above?.texts.has(id) === true);
+    return ids.filter((id) => this.textOf(id) !== undefined);
+  }
+
+  private textOf(id: string): string | undefined {
+    this.settle();
+    return this.texts.get(id) ?? this.above?.textOf(id);
   }
 
   private fill(template: Template, from: From): string {
@@ -117,7 +140,7 @@ export class Ledger {
   }
 
   private shown(id: string): string {
-    const text = this.texts.get(id) ?? this.above?.texts.get(id);
+    const text = this.textOf(id);
     // Not a wrong call from outside: a line was recorded before what it is made from.
     if (text === undefined) throw new Error(`the working has no line ${id}`);
     return text;
@@ -131,7 +154,7 @@ export class Ledger {
     inputs: readonly string[],
   ): void {
     const substituted = `${symbol} = ${numbers}`;
-    this.steps.push({ id, label, symbol, formula, substituted, value, unit, source, inputs });
+    this.recorded.push({ id, label, symbol, formula, substituted, value, unit, source, inputs });
     this.texts.set(id, numberText(value));
   }
 }
