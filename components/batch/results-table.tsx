@@ -44,6 +44,30 @@ function Dilution({ row }: { row: ResultRow }) {
 const placeOf = ({ reportCase, measured }: UnknownResult) =>
   reportCase === 'notQuantified' ? null : (measured?.value ?? null);
 
+/** On a narrow screen the result stands under the name of its sample, where it is seen without scrolling. */
+function ResultOnPhone({
+  row,
+  method,
+  aligned,
+}: {
+  row: ResultRow;
+  method: TableMethod;
+  aligned: AlignedResult | null;
+}) {
+  const { result } = row;
+  return (
+    <span className="mt-1 grid gap-1 font-normal md:hidden">
+      <span className="num">
+        <ResultCell result={result} aligned={aligned} />
+        {result.concentration && <span className="aside"> {method.unit}</span>}
+      </span>
+      {result.reportCase !== 'value' && (
+        <MeaningCell result={result} range={method.range} unit={method.unit} />
+      )}
+    </span>
+  );
+}
+
 function Row({
   row,
   method,
@@ -66,6 +90,7 @@ function Row({
         ) : (
           row.sample
         )}
+        <ResultOnPhone row={row} method={method} aligned={aligned} />
       </RowHead>
       <Td className="text-[0.84375rem]">
         <span className="flex flex-wrap gap-x-3 gap-y-0.5">
@@ -80,7 +105,7 @@ function Row({
       <Td numeric>
         <Dilution row={row} />
       </Td>
-      <Td numeric className="text-base!">
+      <Td numeric className="text-base! max-md:hidden">
         <ResultCell result={result} aligned={aligned} />
       </Td>
       <Td numeric>{k === undefined ? '' : significantText(k, 3)}</Td>
@@ -115,7 +140,9 @@ export function ResultsTable({
           <Th>Sample</Th>
           <Th>Readings, {SIGNAL_SYMBOL[method.signal]} as read</Th>
           <Th numeric>Dilution</Th>
-          <Th numeric>c in the sample ± U, {unitWithBasis(method.unit, method.basis)}</Th>
+          <Th numeric className="max-md:hidden">
+            c in the sample ± U, {unitWithBasis(method.unit, method.basis)}
+          </Th>
           <Th numeric>k</Th>
           <Th>Place on the curve</Th>
           <Th>What it means</Th>

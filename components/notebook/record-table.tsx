@@ -1,3 +1,4 @@
+import { Disclosure } from '@/components/ui/disclosure';
 import { EmptyState } from '@/components/ui/empty-state';
 import { Table, Td, Th } from '@/components/ui/table';
 import { formatDateTime } from '@/lib/format/dates';
@@ -22,9 +23,16 @@ const columnWords = (name: string) => name.replace(/([a-z])([A-Z])/g, '$1 $2').t
 
 const INTERNAL = /Id$/;
 
+/** What a row was made with is folded away: it stands on the row's own page too. A change is always seen. */
 function Changes({ entry }: { entry: RecordEntryView }) {
   const columns = Object.keys(entry.to ?? {}).filter((name) => !INTERNAL.test(name));
   if (columns.length === 0) return null;
+  const list = <ChangeList entry={entry} columns={columns} />;
+  if (entry.from || columns.length <= 3) return list;
+  return <Disclosure summary={`with ${columns.length} values`}>{list}</Disclosure>;
+}
+
+function ChangeList({ entry, columns }: { entry: RecordEntryView; columns: readonly string[] }) {
   return (
     <ul className="grid gap-0.5">
       {columns.map((name) => (

@@ -31,7 +31,7 @@ export function ReadingsTable({
   const looks = spectrumLooks(drawn);
   const span = 2 + (showsPlace ? 1 : 0) + (hasMinus ? 2 : 0);
   return (
-    <Table label="Readings">
+    <Table label="Readings" tall>
       <thead>
         <tr>
           <Th>Spectrum</Th>

@@ -6,9 +6,15 @@ import { ScrollRegion } from './scroll-region';
 const SIDE = 'px-3 first:pl-4 last:pr-4';
 
 /** A dense table of 33 px rows that scrolls inside its card. `label` is its name for those who do not see the card's title. */
-export function Table({ label, className, children, ...rest }: ComponentProps<'table'> & { label: string }) {
+export function Table({
+  label,
+  tall,
+  className,
+  children,
+  ...rest
+}: ComponentProps<'table'> & { label: string; tall?: boolean }) {
   return (
-    <ScrollRegion label={label}>
+    <ScrollRegion label={label} tall={tall}>
       <table
         aria-label={label}
         className={classNames('w-full border-collapse text-left', className)}
