@@ -26,7 +26,7 @@ export interface Blanks {
  *
  * @throws EngineError BLANK_CENSORED; and BLANK_PATH_MISSING when a reading's path has no blank
  */
-export function prepareBlanks(request: CurveRequest): Blanks {
+export function prepareBlanks(request: Pick<CurveRequest, 'blank' | 'signal' | 'pathLengthMm'>): Blanks {
   const { blank } = request;
   const convert = (readings: readonly Reading[], pathLengthMm: number, pointer: string) =>
     readings.map((reading, i): BlankReading => {

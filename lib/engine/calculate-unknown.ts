@@ -7,7 +7,7 @@ import type { Expanded } from './uncertainty/combine';
 import { coverageFactor } from './uncertainty/expand';
 import { makeBudget } from './unknown/budget';
 import { convertReadings } from './unknown/convert-readings';
-import { adviceText, adviseDilution } from './unknown/dilution-advice';
+import { adviceText, adviseDilution, aimOfCurve } from './unknown/dilution-advice';
 import { judgeUnknown } from './unknown/judge';
 import { type ReadBack, readBack } from './unknown/read-back';
 import { reportCase, reportText } from './unknown/report';
@@ -65,7 +65,9 @@ export function calculateUnknown(
   const critical = criticalValue(curve, Math.max(1, readings.y.length), readings.pathLengthMm);
   const kind = reportCase(curve, readings, back?.c ?? null, critical.value);
   const dilute = wantsDilution(kind) && readings.state !== 'nothing';
-  const dilutionAdvice = dilute ? adviseDilution(curve, readings, back?.c ?? null) : null;
+  const dilutionAdvice = dilute
+    ? adviseDilution(aimOfCurve(curve), readings, back?.c ?? null, unknown.wingEstimate)
+    : null;
   const advice = dilutionAdvice && adviceText(dilutionAdvice, scaling.factor.value > 1);
   const report = reportText(curve, {
     reportCase: kind,

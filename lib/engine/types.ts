@@ -265,13 +265,16 @@ export interface BudgetLine {
   readonly u: number;
   /** u² over the sum of all u²; the shares add up to 1. */
   readonly share: number;
-  /** Standard uncertainty of the quantity behind the line, in its own unit (empty for a ratio or an absorbance). */
-  readonly inputU: number;
-  readonly inputUnit: string;
+  /**
+   * Standard uncertainty of the quantity behind the line, in its own unit (empty for a ratio or an absorbance).
+   * Absent, as the two after it, in results of engines before 1.1.
+   */
+  readonly inputU?: number;
+  readonly inputUnit?: string;
   /** ∂C/∂(that quantity), with its sign: u = |sensitivity| inputU. */
-  readonly sensitivity: number;
+  readonly sensitivity?: number;
   /** Null when infinite. */
-  readonly degreesOfFreedom: number | null;
+  readonly degreesOfFreedom?: number | null;
   /** True on the lines that rest on the curve's one residual standard deviation. */
   readonly sharesS?: true;
 }

@@ -1,7 +1,7 @@
 import type { FittedCurve } from '../fit-curve';
 import { NORMAL_PATH_MM } from '../prepare-points';
 import { fittedVarianceAt } from '../regression/fit';
-import type { UnknownRequest } from '../types';
+import type { CurveRequest, UnknownRequest } from '../types';
 import { type BudgetTerm, factorTerm, type Scale } from '../uncertainty/budget-term';
 import { combine, type Expanded } from '../uncertainty/combine';
 import { errorSources, type Quantity } from '../uncertainty/quantity';
@@ -24,7 +24,7 @@ export function makeBudget(
 ): Expanded {
   const value = back.c * scaling.value;
   const result = { of: 'result' as const, value, expression: 'C', from: RESULT_OF };
-  const factors = [...sharedByStandards(curve), ...scaling.quantities];
+  const factors = [...sharedByStandards(curve.request), ...scaling.quantities];
   const terms = [
     ...ofTheCurve(curve, readings, back, scaling),
     ...factorTerms(factors, result, 'unknown.budget.factor'),
@@ -137,7 +137,9 @@ export function blankErrors(
 }
 
 /** What all standards share (stock, purity, common ware): each a factor of the result, counted once. */
-function sharedByStandards({ request }: FittedCurve): readonly Quantity[] {
+export function sharedByStandards(
+  request: Pick<CurveRequest, 'standardsRelativeU' | 'standardsShared'>,
+): readonly Quantity[] {
   const shared = [
     { source: 'standards', relativeU: request.standardsRelativeU ?? 0 },
     ...(request.standardsShared ?? []),
@@ -173,12 +175,12 @@ function ofThePaths(
     expression: scaleText('(y0 / b)', scaling),
     from: { y0: 'unknown.mean', b: slope, ...scaling.from },
   };
-  return factorTerms(pathQuantities(curve, unknown, readings), scale, 'unknown.budget.path');
+  return factorTerms(pathQuantities(curve.request, unknown, readings), scale, 'unknown.budget.path');
 }
 
-function pathQuantities(
-  curve: FittedCurve,
-  unknown: UnknownRequest,
+export function pathQuantities(
+  request: Pick<CurveRequest, 'pathLengthMm' | 'pathLengthUMm'>,
+  unknown: Pick<UnknownRequest, 'pathLengthUMm'>,
   readings: ConvertedReadings,
 ): readonly Quantity[] {
   const path = (whose: 'unknown' | 'standards', value: number, u: number, power: 1 | -1): Quantity => ({
@@ -193,12 +195,15 @@ function pathQuantities(
   });
   return [
     path('unknown', readings.pathLengthMm, unknown.pathLengthUMm ?? 0, -1),
-    path('standards', curve.request.pathLengthMm, curve.request.pathLengthUMm ?? 0, 1),
+    path('standards', request.pathLengthMm, request.pathLengthUMm ?? 0, 1),
   ];
 }
 
 /** Another path length than the standards', or an uncertainty of its own: another cell. */
-export function isOtherCell(curve: FittedCurve, unknown: UnknownRequest): boolean {
-  const path = unknown.pathLengthMm ?? curve.request.pathLengthMm;
-  return unknown.pathLengthUMm !== undefined || path !== curve.request.pathLengthMm;
+export function isOtherCell(
+  { request }: { readonly request: Pick<CurveRequest, 'pathLengthMm'> },
+  unknown: Pick<UnknownRequest, 'pathLengthMm' | 'pathLengthUMm'>,
+): boolean {
+  const path = unknown.pathLengthMm ?? request.pathLengthMm;
+  return unknown.pathLengthUMm !== undefined || path !== request.pathLengthMm;
 }

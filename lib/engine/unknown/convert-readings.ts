@@ -1,8 +1,8 @@
 import { absorbanceAsRead, absorbanceOf, type Absorbance } from '../absorbance';
 import { isAboveRange } from '../censoring';
-import type { FittedCurve } from '../fit-curve';
 import { normalise } from '../prepare-points';
 import type { UnknownRequest } from '../types';
+import type { Measuring } from './measuring';
 
 /** The readings of one unknown, each converted by itself. */
 export interface ConvertedReadings {
@@ -32,11 +32,10 @@ export function mean(values: readonly number[]): number {
  * say about the mean: the others make it, and a flag tells.
  */
 export function convertReadings(
-  curve: FittedCurve,
-  unknown: UnknownRequest,
+  { request, blanks }: Pick<Measuring, 'request' | 'blanks'>,
+  unknown: Pick<UnknownRequest, 'readings' | 'pathLengthMm'>,
   pointer: string,
 ): ConvertedReadings {
-  const { request, blanks } = curve;
   const asRead = unknown.readings.map((reading, i) =>
     absorbanceOf(reading, request.signal, `${pointer}/readings/${i}`),
   );

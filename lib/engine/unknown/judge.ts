@@ -22,9 +22,9 @@ export function judgeUnknown(facts: UnknownFacts): readonly Flag[] {
   return [...judgeReadings(facts), ...judgePlace(facts), ...judgePrecision(facts)];
 }
 
-function judgeReadings({ curve, readings, back, advice }: UnknownFacts): Flag[] {
+/** What the readings say by themselves, as they came. */
+export function judgeAsRead(limit: number, readings: ConvertedReadings, advice: string | null): Flag[] {
   const flags: Flag[] = [];
-  const limit = curve.request.absorbanceLimit;
   const detail = `${advice ?? ''}.`;
   const highest = Math.max(...readings.asRead.map(highestAsRead));
   const without = readings.asRead.flatMap((item) => (item.censored ? [item.censored] : []));
@@ -38,6 +38,11 @@ function judgeReadings({ curve, readings, back, advice }: UnknownFacts): Flag[] 
       flag('READING_LEFT_OUT', { value: without.length, limit: readings.asRead.length, name: first.text }),
     );
   }
+  return flags;
+}
+
+function judgeReadings({ curve, readings, back, advice }: UnknownFacts): Flag[] {
+  const flags = judgeAsRead(curve.request.absorbanceLimit, readings, advice);
   if (readings.meanY !== null && back) {
     const floor = (-3 * curve.fit.residualSd) / Math.sqrt(back.weight);
     if (readings.meanY < floor) flags.push(flag('READING_NEGATIVE', { value: readings.meanY, limit: floor }));

@@ -1,8 +1,8 @@
 import { plusMinusText, significantText } from '../../format/round';
 import { highestAsRead } from '../absorbance';
-import type { FittedCurve } from '../fit-curve';
 import type { ReportCase } from '../types';
 import type { ConvertedReadings } from './convert-readings';
+import type { Measuring } from './measuring';
 
 /** Digits of a bound ("< 0.4 mg/L"): the standards' concentrations carry no uncertainty to round by. */
 const BOUND_DIGITS = 4;
@@ -15,12 +15,11 @@ const SAME = 1e-12;
  * that applies (measurement model, section 6).
  */
 export function reportCase(
-  curve: FittedCurve,
+  { range, request }: Measuring,
   readings: ConvertedReadings,
   c: number | null,
   critical: number,
 ): ReportCase {
-  const { range, request } = curve;
   const overLimit = readings.asRead.some((item) => highestAsRead(item) > request.absorbanceLimit);
   if (readings.state !== 'numbers' || overLimit || c === null) return 'notQuantified';
   if (c > range.max * (1 + SAME)) return 'aboveTopStandard';
@@ -38,20 +37,20 @@ export interface ReportFacts {
 }
 
 /** The text that leaves the notebook. */
-export function reportText(curve: FittedCurve, facts: ReportFacts): string {
-  const { unit } = curve.request;
+export function reportText({ request, range }: Measuring, facts: ReportFacts): string {
+  const { unit } = request;
   const bound = (c: number) => `${significantText(c * facts.factor, BOUND_DIGITS)} ${unit}`;
   const measured = () => `${plusMinusText(facts.value ?? NaN, facts.expanded ?? NaN)} ${unit}`;
   switch (facts.reportCase) {
     case 'notQuantified':
       return facts.advice === null ? 'not quantified: read again' : `not quantified: dilute ${facts.advice}`;
     case 'aboveTopStandard':
-      return `> ${bound(curve.range.max)}; dilute ${facts.advice ?? ''}`;
+      return `> ${bound(range.max)}; dilute ${facts.advice ?? ''}`;
     case 'value':
       return measured();
     case 'belowLowestStandard':
       return `${measured()}, detected, below the lowest standard`;
     case 'belowCriticalValue':
-      return `< ${bound(curve.range.min)}`;
+      return range.min > 0 ? `< ${bound(range.min)}` : 'not detected';
   }
 }

@@ -1,6 +1,7 @@
 import type { FittedCurve } from '../fit-curve';
 import type { CurvePoint } from '../prepare-points';
 import type { MolarAbsorptivity } from '../types';
+import type { Measuring } from '../unknown/measuring';
 import { recordCoefficients } from './record-coefficients';
 import { recordEpsilon } from './record-epsilon';
 import type { Ledger } from './ledger';
@@ -28,8 +29,10 @@ export function recordCurve(
   recordEpsilon(ledger, curve, epsilon);
 }
 
-function recordBlanks(ledger: Ledger, curve: FittedCurve): void {
-  const { blanks, request } = curve;
+export function recordBlanks(
+  ledger: Ledger,
+  { blanks, request }: Pick<Measuring, 'blanks' | 'request'>,
+): void {
   if (blanks.use !== 'subtract') return;
   const paths = [...new Set(blanks.readings.map((blank) => blank.pathLengthMm))];
   const noBlank = { ...blanks, use: 'none' as const };

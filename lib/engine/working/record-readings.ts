@@ -35,7 +35,7 @@ export function blankLineId(pathLengthMm: number): string {
 /** Lines of one reading: as it came, as absorbance, after its blank, per 10 mm. Returns the id of the last one. */
 export function recordReading(
   ledger: Ledger,
-  request: CurveRequest,
+  request: Pick<CurveRequest, 'signal'>,
   blanks: Blanks,
   item: ReadingToRecord,
 ): string {
@@ -71,7 +71,7 @@ export function recordReading(
 /** Two wavelengths: both readings as they came, and the difference of their absorbances. */
 function recordDifference(
   ledger: Ledger,
-  request: CurveRequest,
+  request: Pick<CurveRequest, 'signal'>,
   blanks: Blanks,
   item: ReadingToRecord & { readonly reading: TwoWavelengthReading },
 ): string {
