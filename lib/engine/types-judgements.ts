@@ -1,4 +1,5 @@
-import type { Weighting } from './types';
+import type { EngineErrorCode } from './errors';
+import type { Model, ReportCase, ValueWithU, Weighting } from './types';
 import type { LearnedVarianceFunction } from './weighting/learn-variance-function';
 
 /** A reading that lies apart by a test: advice only. */
@@ -45,3 +46,62 @@ export interface CurveJudgements {
   /** Null for a line through zero. */
   readonly interceptSize: InterceptSize | null;
 }
+
+/** Why a case of a comparison cannot be had. */
+export interface Refusal {
+  readonly code: EngineErrorCode;
+  readonly reason: string;
+}
+
+/** One of today's unknowns under a changed curve, beside the curve in use. */
+export interface UnknownUnder {
+  readonly name: string;
+  /** In the measured solution. */
+  readonly measured: ValueWithU | null;
+  /** In the sample; null when it is not quantified. */
+  readonly concentration: ValueWithU | null;
+  readonly reportCase: ReportCase;
+  readonly report: string;
+  /** Of the measured concentration; null where either has none. */
+  readonly changePercent: number | null;
+  /** The same change in standard uncertainties of the result in use. */
+  readonly changeInU: number | null;
+}
+
+/** A model under a weighting, by its effect. */
+export type ModelUnder = {
+  readonly model: Model;
+  readonly weighting: Weighting;
+  /** True for what the request asks for. */
+  readonly inUse: boolean;
+} & (
+  | {
+      /** At weight one: comparable between models, not between weightings. */
+      readonly residualSd: number;
+      readonly degreesOfFreedom: number;
+      /** Comparable between all. */
+      readonly relativeStandardErrorPercent: number | null;
+      readonly unknowns: readonly UnknownUnder[];
+      readonly reason?: undefined;
+    }
+  | Refusal
+);
+
+/** What leaving out a standard, or one reading of it, changes. */
+export type LeftOut = {
+  readonly standardIndex: number;
+  /** Counts from 1; null for the whole standard. */
+  readonly replicate: number | null;
+  readonly name: string;
+  readonly concentration: number;
+} & (
+  | {
+      readonly slope: number;
+      readonly slopeChangePercent: number;
+      readonly residualSd: number;
+      readonly range: { readonly min: number; readonly max: number };
+      readonly unknowns: readonly UnknownUnder[];
+      readonly reason?: undefined;
+    }
+  | Refusal
+);

@@ -25,6 +25,8 @@ export const DEGREES_OF_FREEDOM_NEEDED = 10;
 /** λ = ln(k² y²_max / s0²) is looked for in steps, from where one term is nothing to where the other is. */
 const STEPS = 48;
 const NOTHING = 1e-8;
+/** A gain in -2 ln L that is rounding: an edge is as good. */
+const NO_BETTER = 1e-9;
 
 /**
  * The variance function v = s0² + (k y)² that makes the observed variances most likely, s0 ≥ 0, k ≥ 0.
@@ -53,7 +55,8 @@ export function learnVarianceFunction(levels: readonly LevelScatter[]): LearnedV
   );
   const proportional = profile(levels, z);
   const inner = insideProfile(levels, z, smallest / largest);
-  const best = [proportional, inner].reduce((a, b) => (b.value < a.value ? b : a), constant);
+  const edge = proportional.value < constant.value ? proportional : constant;
+  const best = inner.value < edge.value - NO_BETTER ? inner : edge;
   const degreesOfFreedom = levels.reduce((sum, level) => sum + level.degreesOfFreedom, 0);
   const share = best === constant ? 0 : best === proportional ? Infinity : best.ratio;
   return {
