@@ -16,12 +16,12 @@ import { Ledger } from './working/ledger';
 import { recordUnknown } from './working/record-unknown';
 
 /** Cases whose text asks for a dilution. */
-function wantsDilution(kind: ReportCase): boolean {
+export function wantsDilution(kind: ReportCase): boolean {
   return kind === 'notQuantified' || kind === 'aboveTopStandard';
 }
 
 /** Cases that leave with a number. */
-function isQuantified(kind: ReportCase): boolean {
+export function isQuantified(kind: ReportCase): boolean {
   return kind === 'value' || kind === 'belowLowestStandard';
 }
 

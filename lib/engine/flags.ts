@@ -55,7 +55,7 @@ export const FLAGS = {
   },
   REPLICATES_APART: {
     level: 'warn',
-    meaning: 'replicate readings of an unknown that disagree',
+    meaning: 'replicate readings that disagree',
     text: (f) =>
       `The replicate readings differ by ${n(f.value)}, more than the ${n(f.limit)} allowed. ${f.detail ?? ''} Look for a bubble, a fingerprint or carry-over, and read again; every reading stays on record.`,
   },
@@ -94,6 +94,54 @@ export const FLAGS = {
     meaning: 'an unknown read in a cell of another path length whose uncertainty was not given',
     text: (f) =>
       `The unknown was read at ${n(f.value)} mm, the curve at ${n(f.limit)} mm: another cell. Its path length enters the result without an uncertainty until one is given.`,
+  },
+  READING_WITHOUT_U: {
+    level: 'note',
+    meaning: 'one reading, and nothing known of its scatter',
+    text: (f) =>
+      `${named(f.name)} was read once and nothing is known of the scatter: its reading enters without an uncertainty. Read it again, or state the standard deviation of a reading.`,
+  },
+  PATH_WITHOUT_U: {
+    level: 'note',
+    meaning: 'a path length without an uncertainty where it does not cancel',
+    text: (f) =>
+      `The path length of ${n(f.value)} mm divides the result and has no uncertainty. State the tolerance of the cell.`,
+  },
+  ABSORPTIVITY_WITHOUT_U: {
+    level: 'note',
+    meaning: 'a known absorptivity without an uncertainty',
+    text: (f) =>
+      `The absorptivity ${n(f.value)} has no uncertainty, so that of the result is too small. Take it from where the value comes from.`,
+  },
+  ABSORPTIVITY_WITHOUT_CONDITIONS: {
+    level: 'note',
+    meaning: 'a known absorptivity whose conditions were not stated',
+    text: () =>
+      'An absorptivity holds for one wavelength, solvent, acidity, temperature and bandwidth, and none was stated. Check that the readings were taken under the same.',
+  },
+  FAR_FROM_STANDARD: {
+    level: 'warn',
+    meaning: 'an unknown far from the one standard it is compared with',
+    text: (f) =>
+      `The unknown reads ${n(f.value)} times the standard, outside 1/${n(f.limit)} to ${n(f.limit)}: one standard rests on a line through zero all that way. Use a standard nearer to it, or a curve.`,
+  },
+  STANDARD_DRIFTED: {
+    level: 'warn',
+    meaning: 'a standard that read differently before and after the unknowns',
+    text: (f) =>
+      `The standard changed by ${n(f.value)} % between before and after the unknowns, more than ${n(f.limit)} %. Find the drift and read the unknowns again.`,
+  },
+  MDL_DESIGN: {
+    level: 'warn',
+    meaning: 'a method detection limit whose study does not have the prescribed design',
+    text: (f) =>
+      `The study of the method detection limit falls short: ${f.detail ?? ''}. The limit is computed, but it is not one by 40 CFR 136.`,
+  },
+  MDL_SPIKE_LEVEL: {
+    level: 'warn',
+    meaning: 'spikes of a method detection limit too near to it or too far above it',
+    text: (f) =>
+      `The spikes of ${n(f.value)} ${f.unit ?? ''} are not 2 to 10 times the limit found, ${n(f.limit)}. Repeat the study with spikes ${f.detail ?? ''}.`,
   },
   FEW_DEGREES_OF_FREEDOM: {
     level: 'note',

@@ -3,8 +3,30 @@ export { absorbanceOf, transmittanceOf, type Absorbance, type CensorReason } fro
 export { compareModels } from './comparison/compare-models';
 export { effectOfLeavingOut } from './comparison/leave-out';
 export { curveBand, type BandPoint } from './curve-band';
+export { resultFromBracketing } from './direct/bracketing';
+export { resultFromKnownAbsorptivity } from './direct/known-absorptivity';
+export { resultFromSingleStandard } from './direct/single-standard';
+export type {
+  AbsorptivityKind,
+  BracketingRequest,
+  DirectAnswer,
+  DirectRequest,
+  DirectResult,
+  KnownAbsorptivityRequest,
+  SingleStandardRequest,
+} from './direct/types';
 export { ENGINE_ERRORS, EngineError, type EngineErrorCode } from './errors';
 export { FLAGS, type Flag, type FlagCode, type FlagLevel } from './flags';
+export { peakSeenThroughSlit, slopeLoss } from './photometry/bandwidth';
+export { LEAST_PHOTOMETRIC_ERROR_AT, photometricErrorPercent } from './photometry/photometric-error';
+export {
+  strayAbsorbance,
+  strayBias,
+  strayCeiling,
+  strayPlateau,
+  type StrayBias,
+  type StrayCeiling,
+} from './photometry/stray-light';
 export {
   readSpectrum,
   type ReadingRule,

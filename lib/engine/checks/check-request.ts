@@ -61,16 +61,27 @@ function checkNumbers(request: CurveRequest): void {
       '/formulaMass',
     );
   }
-  requireFinite(request.confidence, 'the confidence', '/confidence');
-  if (request.confidence <= 0 || request.confidence >= 1) {
+  checkConfidence(request.confidence);
+  requirePositive(request.absorbanceLimit, 'LIMIT_NOT_POSITIVE', 'the absorbance limit', '/absorbanceLimit');
+  requireNotNegative(request.replicateLimit, 'the limit of replicates', '/replicateLimit');
+  checkShared(request);
+  checkRecovery(request.recovery, '/recovery');
+  checkGlassware(request.glassware);
+}
+
+export function checkConfidence(confidence: number): void {
+  requireFinite(confidence, 'the confidence', '/confidence');
+  if (confidence <= 0 || confidence >= 1) {
     throw new EngineError(
       'CONFIDENCE_OUT_OF_RANGE',
-      `the confidence must lie between 0 and 1, got ${request.confidence}`,
+      `the confidence must lie between 0 and 1, got ${confidence}`,
       '/confidence',
     );
   }
-  requirePositive(request.absorbanceLimit, 'LIMIT_NOT_POSITIVE', 'the absorbance limit', '/absorbanceLimit');
-  requireNotNegative(request.replicateLimit, 'the limit of replicates', '/replicateLimit');
+}
+
+/** What all standards share. */
+export function checkShared(request: Pick<CurveRequest, 'standardsRelativeU' | 'standardsShared'>): void {
   requireNotNegative(
     request.standardsRelativeU,
     'the relative uncertainty of the standards',
@@ -79,11 +90,9 @@ function checkNumbers(request: CurveRequest): void {
   request.standardsShared?.forEach(({ source, relativeU }, i) =>
     requireNotNegative(relativeU, `the relative uncertainty of ${source}`, `/standardsShared/${i}/relativeU`),
   );
-  checkRecovery(request.recovery, '/recovery');
-  checkGlassware(request.glassware);
 }
 
-function checkGlassware(owned: OwnedGlassware | undefined): void {
+export function checkGlassware(owned: OwnedGlassware | undefined): void {
   for (const list of ['pipettesMl', 'flasksMl'] as const) {
     owned?.[list].forEach((volume, i) =>
       requirePositive(volume, 'VOLUME_NOT_POSITIVE', 'the volume of a piece (mL)', `/glassware/${list}/${i}`),

@@ -7,6 +7,7 @@ import type { ReadBack } from '../unknown/read-back';
 import type { Scaling } from '../unknown/scaling';
 import type { Ledger } from './ledger';
 import { recordBudget } from './record-budget';
+import { recordReport } from './record-report';
 import { recordReadBack } from './record-read-back';
 import { recordCritical } from './record-critical';
 import { recordMean } from './record-mean';
@@ -33,21 +34,6 @@ export function recordUnknown(ledger: Ledger, record: UnknownRecord): void {
     const { scaling } = record;
     recordBudget(ledger, { unit, confidence, scaling, budget, nuFrom: ['curve.degreesOfFreedom'] });
   }
-  recordReport(ledger, record);
-}
-
-function recordReport(ledger: Ledger, { curve, critical, budget, unknown, report }: UnknownRecord): void {
-  recordCritical(ledger, curve, critical, 'unknown');
-  const readingIds = unknown.readings.map((_, i) => `unknown.reading.${i + 1}.reading`);
-  ledger.solved(
-    {
-      id: 'unknown.report',
-      label: 'What is reported',
-      symbol: 'report',
-      source: 'report rules of this notebook',
-    },
-    'the first case that applies',
-    [...(budget ? ['unknown.result', 'unknown.U'] : readingIds), 'unknown.critical'],
-    report,
-  );
+  recordCritical(ledger, record.curve, record.critical, 'unknown');
+  recordReport(ledger, record.unknown, budget !== null, ['unknown.critical'], record.report);
 }

@@ -1,6 +1,6 @@
 import { readFileSync } from 'node:fs';
 import { fileURLToPath } from 'node:url';
-import type { CurveRequest, UnknownRequest } from '@/lib/engine';
+import { calculateStandardCurve, type CurveRequest, type UnknownRequest } from '@/lib/engine';
 
 /** Data of a published reference, with its SOURCE.md beside it. */
 export function reference<T>(name: string): T {
@@ -38,4 +38,17 @@ export const unknown = (readings: UnknownRequest['readings'], changes: Partial<U
 /** Points of x and y as standards of one reading each. */
 export function standardsOf(x: readonly number[], y: readonly number[]) {
   return x.map((concentration, i) => ({ concentration, readings: [y[i] ?? NaN] }));
+}
+
+/** The result of one unknown on the plain curve, with changes to either. */
+export function resultOf(
+  readings: UnknownRequest['readings'],
+  more: Partial<UnknownRequest> = {},
+  changes: Partial<CurveRequest> = {},
+) {
+  const [result] = calculateStandardCurve(
+    request({ unknowns: [unknown(readings, more)], ...changes }),
+  ).unknowns;
+  if (!result) throw new Error('no result');
+  return result;
 }

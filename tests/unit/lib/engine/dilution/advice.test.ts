@@ -1,23 +1,10 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
-import { calculateStandardCurve, type CurveRequest, type UnknownRequest } from '@/lib/engine';
 import { makings } from '@/lib/engine/dilution/glassware';
 import { expectDigits } from '../../../../support/digits';
-import { request, unknown } from '../requests';
+import { resultOf } from '../requests';
 
 const OWNED = { pipettesMl: [1, 5, 10], flasksMl: [25, 50, 100] };
-
-function read(
-  readings: UnknownRequest['readings'],
-  more: Partial<UnknownRequest> = {},
-  changes: Partial<CurveRequest> = {},
-) {
-  const [result] = calculateStandardCurve(
-    request({ unknowns: [unknown(readings, more)], ...changes }),
-  ).unknowns;
-  if (!result) throw new Error('no result');
-  return result;
-}
 
 describe('what glassware makes', () => {
   // By hand: 25/10, 50/10, 100/10 = 25/5 ... each factor once, by the larger pipette.
@@ -54,7 +41,7 @@ describe('what glassware makes', () => {
 describe('advice', () => {
   test('is rounded to the glassware the laboratory owns and names it', () => {
     // 1.9 reads back near 19 mg/L, the middle of the curve near 4.5: 1 in 5 with this glassware.
-    const result = read([1.9], {}, { glassware: OWNED });
+    const result = resultOf([1.9], {}, { glassware: OWNED });
     expect(result.dilutionAdvice).toMatchObject({
       factor: 5,
       atLeast: false,
@@ -65,30 +52,30 @@ describe('advice', () => {
   });
 
   test('falls back on the strongest, or on blind advice without any that dilutes', () => {
-    const strongest = read([1.9], {}, { glassware: { pipettesMl: [20], flasksMl: [25] } });
+    const strongest = resultOf([1.9], {}, { glassware: { pipettesMl: [20], flasksMl: [25] } });
     expect(strongest.advice).toBe(
       'at least 1 in 1.5625 (20 mL made up to 25 mL, then 20 mL made up to 25 mL), then read again',
     );
-    expect(read([1.9], {}, { glassware: { pipettesMl: [], flasksMl: [] } }).advice).toBe(
+    expect(resultOf([1.9], {}, { glassware: { pipettesMl: [], flasksMl: [] } }).advice).toBe(
       'at least 1 in 10, then read again',
     );
   });
 
   test('rests on the wing of the band where the reading says too little', () => {
     for (const readings of [['OVER'], [3.4], [2.6]]) {
-      const result = read(readings, { wingEstimate: 48 });
+      const result = resultOf(readings, { wingEstimate: 48 });
       expect(result.dilutionAdvice).toMatchObject({ factor: 10, fromWing: true, atLeast: false });
       expect(result.advice).toBe('1 in 10 (1 part made up to 10), as the wing of the band suggests');
       expect(result.concentration).toBeNull();
     }
-    expect(read(['OVER'], { wingEstimate: 1e7 }).advice).toBe(
+    expect(resultOf(['OVER'], { wingEstimate: 1e7 }).advice).toBe(
       'at least 1 in 10000 (1 part made up to 10000), as the wing of the band suggests, then read again',
     );
   });
 
   test('needs no wing where the reading is good', () => {
     // 12 mg/L: halved it would read 0.604, above the 0.6 that a dilution aims at.
-    expect(read([1.2], { wingEstimate: 900 }).dilutionAdvice).toMatchObject({ factor: 4 });
-    expect(read([1.2], { wingEstimate: 900 }).dilutionAdvice?.fromWing).toBeUndefined();
+    expect(resultOf([1.2], { wingEstimate: 900 }).dilutionAdvice).toMatchObject({ factor: 4 });
+    expect(resultOf([1.2], { wingEstimate: 900 }).dilutionAdvice?.fromWing).toBeUndefined();
   });
 });

@@ -8,14 +8,10 @@ import {
 } from '@/lib/engine';
 import { dilutionFactor } from '@/lib/engine/unknown/dilution-factor';
 import { expectDigits } from '../../../../support/digits';
-import { request, unknown } from '../requests';
+import { request, resultOf, unknown } from '../requests';
 
-function read(more: Partial<UnknownRequest> = {}, changes: Partial<CurveRequest> = {}) {
-  const answer = calculateStandardCurve(request({ unknowns: [unknown([0.4032, 0.404], more)], ...changes }));
-  const [result] = answer.unknowns;
-  if (!result) throw new Error('no result');
-  return result;
-}
+const read = (more: Partial<UnknownRequest> = {}, changes: Partial<CurveRequest> = {}) =>
+  resultOf([0.4032, 0.404], more, changes);
 const lineOf = (result: ReturnType<typeof read>, source: string) => {
   const found = result.budget.find((line) => line.source === source);
   if (!found) throw new Error(`no line ${source}`);

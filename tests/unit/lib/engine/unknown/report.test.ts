@@ -1,19 +1,8 @@
 import { describe, expect, test } from 'vitest';
 import { calculateStandardCurve, type CurveRequest, type UnknownRequest } from '@/lib/engine';
 import { expectDigits } from '../../../../support/digits';
-import { request, standardsOf, unknown } from '../requests';
+import { request, resultOf as read, standardsOf, unknown } from '../requests';
 
-function read(
-  readings: UnknownRequest['readings'],
-  more: Partial<UnknownRequest> = {},
-  changes: Partial<CurveRequest> = {},
-) {
-  const [result] = calculateStandardCurve(
-    request({ unknowns: [unknown(readings, more)], ...changes }),
-  ).unknowns;
-  if (!result) throw new Error('no result');
-  return result;
-}
 const dilution = [{ takenMl: 10, toMl: 50 }];
 
 // The table of measurement-model section 6, row by row.

@@ -1,0 +1,32 @@
+import { checkRecovery, checkUnknown } from '../checks/check-unknown';
+import { checkConfidence, checkGlassware, checkShared } from '../checks/check-request';
+import { requireChoice, requireNotNegative, requirePositive, requireReadings } from '../checks/require';
+import { CONCENTRATION_UNIT_NAMES } from '../units';
+import type { DirectRequest } from './types';
+import type { CurveRequest } from '../types';
+
+type Common = DirectRequest & Pick<CurveRequest, 'standardsRelativeU' | 'standardsShared'>;
+
+/** Refuse what no method without a curve can be calculated with. */
+export function checkDirect(request: Common): void {
+  requireChoice(
+    request.signal,
+    ['absorbance', 'transmittance', 'percentTransmittance'],
+    'the signal',
+    '/signal',
+  );
+  requireChoice(request.unit, CONCENTRATION_UNIT_NAMES, 'the unit', '/unit');
+  requirePositive(request.pathLengthMm, 'PATH_LENGTH_NOT_POSITIVE', 'the path length (mm)', '/pathLengthMm');
+  requireNotNegative(request.pathLengthUMm, 'the uncertainty of the path length (mm)', '/pathLengthUMm');
+  requireNotNegative(request.readingSd, 'the standard deviation of a reading', '/readingSd');
+  requirePositive(request.absorbanceLimit, 'LIMIT_NOT_POSITIVE', 'the absorbance limit', '/absorbanceLimit');
+  checkConfidence(request.confidence);
+  checkShared(request);
+  checkRecovery(request.recovery, '/recovery');
+  checkGlassware(request.glassware);
+  if (request.blank) {
+    const others = request.blank.otherPaths ?? [];
+    if (others.length === 0) requireReadings(request.blank.readings, 'the blank', '/blank/readings');
+  }
+  request.unknowns.forEach((unknown, i) => checkUnknown(unknown, `/unknowns/${i}`));
+}
