@@ -15,10 +15,11 @@ export function fitQuadratic(data: FitData): Fit {
   const { x, y, w } = data;
   const moments = momentsOf(data);
   const centre = moments.meanX;
-  const scale = moments.dx.reduce((largest, d) => Math.max(largest, Math.abs(d)), 0);
+  const dx = x.map((value) => value - centre);
+  const scale = dx.reduce((largest, d) => Math.max(largest, Math.abs(d)), 0);
   const root = w.map(Math.sqrt);
-  const t = moments.dx.map((d, i) => ((root[i] as number) * d) / scale);
-  const qr = householder([root, t, t.map((value, i) => (value * (moments.dx[i] as number)) / scale)]);
+  const t = dx.map((d, i) => ((root[i] as number) * d) / scale);
+  const qr = householder([root, t, t.map((value, i) => (value * (dx[i] as number)) / scale)]);
   const first = leastSquares(
     qr,
     y.map((value, i) => value * (root[i] as number)),

@@ -10,9 +10,6 @@ export interface Moments {
   readonly sxx: number;
   readonly sxy: number;
   readonly syy: number;
-  /** x - x̄ and y - ȳ. */
-  readonly dx: readonly number[];
-  readonly dy: readonly number[];
   /** True when every weight is 1. */
   readonly unweighted: boolean;
 }
@@ -40,20 +37,16 @@ export function momentsOf({ x, y, w }: FitData): Moments {
   }
   const meanX = x1 + sumX / weight;
   const meanY = y1 + sumY / weight;
-  const dx = new Array<number>(n);
-  const dy = new Array<number>(n);
   let sxx = 0;
   let sxy = 0;
   let syy = 0;
   for (let i = 0; i < n; i += 1) {
     const a = (x[i] as number) - meanX;
     const b = (y[i] as number) - meanY;
-    dx[i] = a;
-    dy[i] = b;
     const wa = (w[i] as number) * a;
     sxx += wa * a;
     sxy += wa * b;
     syy += (w[i] as number) * b * b;
   }
-  return { n, weight, meanX, meanY, sxx, sxy, syy, dx, dy, unweighted };
+  return { n, weight, meanX, meanY, sxx, sxy, syy, unweighted };
 }

@@ -32,9 +32,9 @@ const NO_BETTER = 1e-9;
  * The variance function v = s0² + (k y)² that makes the observed variances most likely, s0 ≥ 0, k ≥ 0.
  *
  * Level variances of normal readings are scaled χ², so -2 ln L = Σ ν_i [ln v_i + s_i²/v_i] up to a constant. For a
- * given ratio of the two terms, v = c·u with u = 1 + e^λ z and z = (y/y_max)², the best c is Σ ν s²/u / Σ ν; what is left is a
- * function of λ alone, which is looked through in steps and then solved where its slope crosses zero. Both edges,
- * k = 0 and s0 = 0, stand for themselves.
+ * given ratio of the two terms, v = c·u with u = 1 + e^λ z and z = (y/y_max)², the best c is Σ ν s²/u / Σ ν; what is
+ * left is a function of λ alone, which is looked through in steps and then solved where its slope crosses zero. Both
+ * edges, k = 0 and s0 = 0, stand for themselves.
  *
  * @param levels two levels or more that differ in y, with some scatter
  * @returns null when there are none such, or when readings at y = 0 are all the same (any s0 would be too large)
@@ -49,19 +49,15 @@ export function learnVarianceFunction(levels: readonly LevelScatter[]): LearnedV
   if (still.length === levels.length || still.some(({ meanY }) => meanY ** 2 <= NOTHING * largest))
     return null;
   const z = squares.map((square) => square / largest);
-  const constant = profile(
-    levels,
-    z.map(() => 1),
-  );
-  const proportional = profile(levels, z);
+  const constant = profile(levels, z, 1, 0);
+  const proportional = profile(levels, z, 0, 1);
   const inner = insideProfile(levels, z, smallest / largest);
   const edge = proportional.value < constant.value ? proportional : constant;
   const best = inner.value < edge.value - NO_BETTER ? inner : edge;
   const degreesOfFreedom = levels.reduce((sum, level) => sum + level.degreesOfFreedom, 0);
-  const share = best === constant ? 0 : best === proportional ? Infinity : best.ratio;
   return {
-    s0: share === Infinity ? 0 : Math.sqrt(best.scale),
-    k: Math.sqrt(share === Infinity ? best.scale / largest : (best.scale * share) / largest),
+    s0: Math.sqrt(best.floor * best.scale),
+    k: Math.sqrt((best.ratio * best.scale) / largest),
     degreesOfFreedom,
     adviceOnly: degreesOfFreedom < DEGREES_OF_FREEDOM_NEEDED,
     // Half a χ² with one degree of freedom, since k = 0 lies on the edge of what k may be.
@@ -74,24 +70,31 @@ interface Profile {
   readonly scale: number;
   /** -2 ln L up to a constant. */
   readonly value: number;
-  /** e^λ. */
+  /** u = floor + ratio·z: 1 and e^λ, or an edge. */
+  readonly floor: number;
   readonly ratio: number;
 }
 
-/** -2 ln L at the best c for these u; infinite where a level that scatters is given no variance. */
-function profile(levels: readonly LevelScatter[], u: readonly number[], ratio = 0): Profile {
+/** -2 ln L of u = floor + ratio·z at its best c; infinite where a level that scatters is given no variance. */
+function profile(
+  levels: readonly LevelScatter[],
+  z: readonly number[],
+  floor: number,
+  ratio: number,
+): Profile {
   let nu = 0;
   let logs = 0;
   let sum = 0;
-  levels.forEach(({ variance, degreesOfFreedom }, i) => {
-    const ui = u[i] as number;
+  for (let i = 0; i < levels.length; i += 1) {
+    const { variance, degreesOfFreedom } = levels[i] as LevelScatter;
+    const u = floor + ratio * (z[i] as number);
     nu += degreesOfFreedom;
-    logs += degreesOfFreedom * Math.log(ui);
-    sum += (degreesOfFreedom * variance) / ui;
-  });
+    logs += degreesOfFreedom * Math.log(u);
+    sum += (degreesOfFreedom * variance) / u;
+  }
   const scale = sum / nu;
   const value = nu * Math.log(scale) + logs;
-  return { scale, value: Number.isNaN(value) ? Infinity : value, ratio };
+  return { scale, value: Number.isNaN(value) ? Infinity : value, floor, ratio };
 }
 
 /** Slope of the profile in λ: Σ ν p - N Σ ν s² p/u / Σ ν s²/u, p = e^λ z/u. */
@@ -118,14 +121,7 @@ function insideProfile(levels: readonly LevelScatter[], z: readonly number[], lo
   const from = Math.log(NOTHING);
   const to = -Math.log(NOTHING * Math.max(lowest, NOTHING));
   const step = (to - from) / STEPS;
-  const at = (lambda: number) => {
-    const ratio = Math.exp(lambda);
-    return profile(
-      levels,
-      z.map((value) => 1 + ratio * value),
-      ratio,
-    );
-  };
+  const at = (lambda: number) => profile(levels, z, 1, Math.exp(lambda));
   let best = 0;
   let deepest = Infinity;
   for (let i = 0; i <= STEPS; i += 1) {

@@ -108,6 +108,18 @@ describe('fitLine', () => {
   });
 });
 
+// Property: a line through every point again as often gives the same coefficients; the long one goes without the package.
+test('many points give the slope that few give', () => {
+  const { x, y } = strd.Norris;
+  const times = (values: readonly number[]) => Array.from({ length: 40 }, () => values).flat();
+  const few = fitLine({ x, y, w: ones(x) });
+  const many = fitLine({ x: times(x), y: times(y), w: ones(times(x)) });
+  expect(many.n).toBe(1440);
+  expectDigits(many.coefficients[1] ?? NaN, few.coefficients[1] ?? NaN, 13);
+  expectDigits(many.coefficients[0] ?? NaN, few.coefficients[0] ?? NaN, 11);
+  expectDigits(many.residualSquares, 40 * few.residualSquares, 12);
+});
+
 describe('the orthogonal decomposition', () => {
   // Second opinion: mathjs, on random weighted problems of a constant, a slope and a bend.
   test('agrees with that of mathjs to 12 digits in the fitted parabola', () => {
