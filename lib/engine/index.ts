@@ -17,6 +17,10 @@ export type {
 } from './direct/types';
 export { ENGINE_ERRORS, EngineError, type EngineErrorCode } from './errors';
 export { FLAGS, type Flag, type FlagCode, type FlagLevel } from './flags';
+export { MONTE_CARLO_TRIALS, monteCarlo } from './monte-carlo/monte-carlo';
+export { type Propagation, propagate } from './monte-carlo/propagate';
+export { type Simulated } from './monte-carlo/simulate';
+export { type MonteCarloAnswer, type MonteCarloOptions } from './monte-carlo/simulate-result';
 export { peakSeenThroughSlit, slopeLoss } from './photometry/bandwidth';
 export { LEAST_PHOTOMETRIC_ERROR_AT, photometricErrorPercent } from './photometry/photometric-error';
 export {

@@ -161,6 +161,8 @@ describe('a request that cannot be calculated', () => {
     'SOURCE_MISSING',
     'STANDARD_WITHOUT_NUMBER',
     'BRACKET_REVERSED',
+    'UNKNOWN_MISSING',
+    'TRIALS_OUT_OF_RANGE',
   ];
   test('every error code of the catalogue has a case here, with the spectra or without a curve', () => {
     const met = new Set(REFUSALS.map(([code]) => code));

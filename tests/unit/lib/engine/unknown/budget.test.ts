@@ -150,6 +150,8 @@ describe('molar absorptivity', () => {
       13,
     );
     expect(only.molarAbsorptivity?.covers).toMatch(/only the slope/i);
+    const path = calculateStandardCurve(request({ formulaMass: 55.845, pathLengthUMm: 0.02 })).curve;
+    expect(path.molarAbsorptivity?.covers).toMatch(/slope and the path length, but not the standards/);
     const all = calculateStandardCurve(
       request({ formulaMass: 55.845, standardsRelativeU: 0.01, pathLengthUMm: 0.02 }),
     ).curve;

@@ -1,7 +1,7 @@
 import { describe, expect, test } from 'vitest';
-import { calculateStandardCurve, type CurveRequest, type UnknownRequest } from '@/lib/engine';
+import { calculateStandardCurve } from '@/lib/engine';
 import { expectDigits } from '../../../../support/digits';
-import { request, resultOf as read, standardsOf, unknown } from '../requests';
+import { request, resultOf as read, standardsOf } from '../requests';
 
 const dilution = [{ takenMl: 10, toMl: 50 }];
 
