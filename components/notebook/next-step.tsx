@@ -5,6 +5,8 @@ interface Step {
   readonly words: string;
   readonly href: string;
   readonly label: string;
+  /** Another way to go on, where there is one. */
+  readonly or?: { readonly href: string; readonly label: string };
 }
 
 /** Where the work stands, in a sentence, and the one next step for somebody who works in the notebook. */
@@ -17,6 +19,7 @@ export function nextStep(base: string, progress: NotebookProgress): Step {
             'Nothing has been measured yet. Upload spectra first, or type the readings of your standards into a curve.',
           href: `${base}/spectra`,
           label: 'Upload spectra',
+          or: { href: `${base}/curves/new`, label: 'Type readings into a curve' },
         }
       : {
           words: `${count(spectra, 'spectrum', 'spectra')} uploaded, and no standard curve yet.`,
@@ -59,9 +62,12 @@ export function NextStep({
     <div className="grid justify-items-start gap-3">
       <p className="max-w-prose font-serif text-fact">{step.words}</p>
       {(mayEdit || worthReading) && (
-        <LinkButton href={step.href} variant="primary">
-          {step.label}
-        </LinkButton>
+        <div className="flex flex-wrap gap-3">
+          <LinkButton href={step.href} variant="primary">
+            {step.label}
+          </LinkButton>
+          {mayEdit && step.or && <LinkButton href={step.or.href}>{step.or.label}</LinkButton>}
+        </div>
       )}
     </div>
   );
