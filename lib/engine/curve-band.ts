@@ -1,3 +1,4 @@
+import { quadraticForm } from './regression/fit';
 import type { CurveResult } from './types';
 import { coverageFactor } from './uncertainty/expand';
 
@@ -16,14 +17,11 @@ export interface BandPoint {
  */
 export function curveBand(curve: CurveResult, concentrations: readonly number[]): readonly BandPoint[] {
   const t = coverageFactor(curve.confidence, curve.degreesOfFreedom);
-  const coefficients = [curve.intercept.value, curve.slope.value, curve.quadratic?.value ?? 0];
+  const [a, b, d] = [curve.intercept.value, curve.slope.value, curve.quadratic?.value ?? 0];
   return concentrations.map((concentration) => {
-    const g = [1, concentration, concentration ** 2];
-    const fitted = coefficients.reduce((sum, value, i) => sum + value * (g[i] ?? 0), 0);
-    const variance = curve.covariance.reduce(
-      (sum, row, i) => sum + row.reduce((part, v, j) => part + v * (g[i] ?? 0) * (g[j] ?? 0), 0),
-      0,
-    );
+    const g = [1, concentration, concentration ** 2].slice(0, curve.covariance.length);
+    const fitted = a + concentration * (b + concentration * d);
+    const variance = quadraticForm(curve.covariance, g);
     const half = t * Math.sqrt(Math.max(0, variance));
     return { concentration, fitted, low: fitted - half, high: fitted + half };
   });

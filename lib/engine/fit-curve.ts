@@ -1,6 +1,6 @@
 import { type Blanks, prepareBlanks } from './blanks';
 import { EngineError } from './errors';
-import { type CurvePoint, NORMAL_PATH_MM, preparePoints } from './prepare-points';
+import { type CurvePoint, NORMAL_PATH_MM, preparePoints, responseOf } from './prepare-points';
 import { type Fit, type FitData, slopeAt } from './regression/fit';
 import { fitLine } from './regression/fit-line';
 import { fitProportional } from './regression/fit-proportional';
@@ -48,11 +48,12 @@ export function fitCurve(request: CurveRequest): FittedCurve {
   const active = points.filter((point) => point.excludedBecause === undefined);
   requireLevels(request.model, active);
   const x = active.map((point) => point.concentration);
-  const y = active.map((point) => point.y ?? NaN);
+  const y = active.map(responseOf);
   const scaled = (variances: readonly number[]) => {
-    const raw = variances.map((v, i) => pathFactor(active[i]?.pathLengthMm ?? NORMAL_PATH_MM) / v);
+    // One variance for each point.
+    const raw = variances.map((v, i) => pathFactor((active[i] as CurvePoint).pathLengthMm) / v);
     const scale = raw.every((w) => w === raw[0])
-      ? 1 / (raw[0] ?? 1)
+      ? 1 / (raw[0] as number)
       : raw.length / raw.reduce((sum, w) => sum + w, 0);
     return { w: raw.map((w) => w * scale), scale };
   };

@@ -5,6 +5,7 @@ import type { FittedCurve } from './fit-curve';
 import { fitModel } from './fit-curve';
 import { type Flag, flag, type FlagCode } from './flags';
 import type { CurvePoint } from './prepare-points';
+import { coefficientOf } from './regression/fit';
 import type { CurveRequest, CurveResult, LevelAnswer, PointAnswer, TestAnswer } from './types';
 import { coverageFactor } from './uncertainty/expand';
 
@@ -73,7 +74,7 @@ function judgeSlope({ fit, request, data }: FittedCurve): Flag[] {
     flags.push(flag('FEW_DEGREES_OF_FREEDOM', { value: nu, limit: FEW_DEGREES_OF_FREEDOM }));
   const largest = Math.max(...data.y.map(Math.abs));
   if (fit.residualSd <= 1e-13 * largest) flags.push(flag('NO_SCATTER'));
-  const slope = fit.coefficients[1] ?? NaN;
+  const slope = coefficientOf(fit, 1).value;
   if (slope < 0) flags.push(flag('SLOPE_NEGATIVE', { value: slope }));
   if (fit.model !== 'quadratic') {
     const g = slopeLooseness(fit, coverageFactor(request.confidence, nu));
@@ -88,8 +89,8 @@ function judgeIntercept({ curve, tests }: CurveFacts): Flag[] {
   const { fit, data, range } = curve;
   if (fit.model !== 'proportional' || tests.intercept.reason !== undefined || tests.intercept.passed)
     return [];
-  const a = fitModel('linear', data).coefficients[0] ?? 0;
-  const lowestOff = (100 * a) / (range.min * (fit.coefficients[1] ?? NaN));
+  const a = coefficientOf(fitModel('linear', data), 0).value;
+  const lowestOff = (100 * a) / (range.min * coefficientOf(fit, 1).value);
   const detail = `about ${significantText(lowestOff, 2)} % at the lowest standard`;
   return [flag('INTERCEPT_NOT_ZERO', { value: a, limit: Math.abs(tests.intercept.statistic), detail })];
 }

@@ -22,6 +22,11 @@ export interface CurvePoint {
   readonly excludedBecause?: PointAnswer['excludedBecause'];
 }
 
+/** The response of a point that is fitted: it has a number. */
+export function responseOf(point: CurvePoint): number {
+  return point.y as number;
+}
+
 /** Everything is normalised to this path. */
 export const NORMAL_PATH_MM = 10;
 

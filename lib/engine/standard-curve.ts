@@ -2,15 +2,14 @@ import { calculateUnknown } from './calculate-unknown';
 import { type CriticalValue, criticalValue } from './calibration/critical-value';
 import { detectionLimits } from './calibration/detection-limits';
 import { molarAbsorptivity } from './calibration/molar-absorptivity';
-import { checkRequest } from './checks/check-request';
+import { acceptRequest } from './checks/accept-request';
 import { levelAnswers, pointAnswers, relativeStandardErrorPercent } from './curve-points';
 import { fitCurve, type FittedCurve } from './fit-curve';
 import { curveJudgements, curveTests } from './hypothesis/curve-tests';
 import { levelsOf } from './hypothesis/levels';
 import { judgeCurve } from './judge-curve';
-import type { Fit } from './regression/fit';
-import type { CurveAnswer, CurveRequest, CurveResult, MolarAbsorptivity, ValueWithU } from './types';
-import { parseUnit } from './units';
+import { coefficientOf } from './regression/fit';
+import type { CurveAnswer, CurveRequest, CurveResult, MolarAbsorptivity } from './types';
 import { ENGINE_VERSION } from './version';
 import { Ledger } from './working/ledger';
 import { recordCritical } from './working/record-critical';
@@ -26,8 +25,7 @@ import { recordCurve } from './working/record-curve';
  * @throws EngineError with a code of ENGINE_ERRORS and a JSON pointer to the member of the request at fault
  */
 export function calculateStandardCurve(asked: CurveRequest): CurveAnswer {
-  const request = { ...asked, unit: parseUnit(asked.unit) ?? asked.unit };
-  checkRequest(request);
+  const request = acceptRequest(asked);
   const curve = fitCurve(request);
   const epsilon = molarAbsorptivity(curve);
   const critical = criticalOfCurve(curve);
@@ -49,10 +47,6 @@ function criticalOfCurve(curve: FittedCurve): CriticalValue {
   return criticalValue(curve, fewest, curve.request.pathLengthMm);
 }
 
-function coefficient(fit: Fit, i: number): ValueWithU {
-  return { value: fit.coefficients[i] ?? NaN, u: Math.sqrt(fit.covariance[i]?.[i] ?? NaN) };
-}
-
 function curveResult(
   curve: FittedCurve,
   epsilon: MolarAbsorptivity | undefined,
@@ -71,9 +65,9 @@ function curveResult(
     confidence: request.confidence,
     n: fit.n,
     degreesOfFreedom: fit.degreesOfFreedom,
-    intercept: coefficient(fit, 0),
-    slope: coefficient(fit, 1),
-    ...(fit.model === 'quadratic' ? { quadratic: coefficient(fit, 2) } : {}),
+    intercept: coefficientOf(fit, 0),
+    slope: coefficientOf(fit, 1),
+    ...(fit.model === 'quadratic' ? { quadratic: coefficientOf(fit, 2) } : {}),
     covariance: fit.covariance,
     residualSd: fit.residualSd,
     rSquared: fit.rSquared,

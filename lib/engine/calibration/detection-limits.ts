@@ -1,6 +1,6 @@
 import type { FittedCurve } from '../fit-curve';
 import { normalise } from '../prepare-points';
-import { fittedVarianceAt, slopeAt, valueAt } from '../regression/fit';
+import { coefficientOf, fittedVarianceAt, slopeAt, valueAt } from '../regression/fit';
 import { detectionDelta } from '../stats/noncentral-t';
 import { tQuantile } from '../stats/student-t';
 import type { LimitAnswer } from '../types';
@@ -42,7 +42,7 @@ function ich(curve: FittedCurve): readonly LimitAnswer[] {
   const { fit } = curve;
   const slope = Math.abs(slopeAt(fit, 0));
   const blank = blankSd(curve);
-  const interceptU = Math.sqrt(fit.covariance[0]?.[0] ?? 0);
+  const interceptU = coefficientOf(fit, 0).u;
   const sigmas = [
     { sd: fit.residualSd, of: 'the residual standard deviation' },
     ...(fit.model === 'proportional'

@@ -1,4 +1,4 @@
-import { type Fit, fittedVarianceAt } from '../regression/fit';
+import { type Fit, fittedVarianceAt, slopeVariance } from '../regression/fit';
 
 export interface FiellerAnswer {
   /** In the measured solution; null when unbounded. */
@@ -10,7 +10,7 @@ export interface FiellerAnswer {
 /** g = t² V_bb / b²: how far the slope is from being told from zero. */
 export function slopeLooseness(fit: Fit, t: number): number {
   const [, b = 0] = fit.beta;
-  return (t * t * (fit.betaCovariance[1]?.[1] ?? 0)) / (b * b);
+  return (t * t * slopeVariance(fit)) / (b * b);
 }
 
 /**
@@ -28,9 +28,8 @@ export function fiellerInterval(fit: Fit, y0: number, varianceY0: number, t: num
   if (g >= 1) return { interval: null, g };
   const d = y0 - b0;
   const varianceAtCentre = varianceY0 + fittedVarianceAt(fit, fit.centre);
-  const slopeVariance = fit.betaCovariance[1]?.[1] ?? 0;
   const middle = d / (b * (1 - g));
-  const root = Math.sqrt((1 - g) * varianceAtCentre + (d * d * slopeVariance) / (b * b));
+  const root = Math.sqrt((1 - g) * varianceAtCentre + (d * d * slopeVariance(fit)) / (b * b));
   const half = (t * root) / (Math.abs(b) * (1 - g));
   return { interval: [fit.centre + middle - half, fit.centre + middle + half], g };
 }

@@ -1,11 +1,12 @@
 import type { FittedCurve } from '../fit-curve';
+import { coefficientOf } from '../regression/fit';
 import type { CurveRequest, MolarAbsorptivity } from '../types';
 import { CONCENTRATION_UNITS } from '../units';
 
-/** From a slope per 10 mm and unit concentration to L/(mol cm); the formula mass enters for mass units only. */
+/** From a slope per 10 mm and unit concentration to L/(mol cm); the formula mass, known by then, enters for mass units only. */
 export function epsilonFactor(request: CurveRequest): number {
   const { isMolar, perLitre } = CONCENTRATION_UNITS[request.unit];
-  return (isMolar ? 1 : (request.formulaMass ?? NaN)) / perLitre;
+  return (isMolar ? 1 : (request.formulaMass as number)) / perLitre;
 }
 
 /**
@@ -18,9 +19,9 @@ export function epsilonFactor(request: CurveRequest): number {
 export function molarAbsorptivity(curve: FittedCurve): MolarAbsorptivity | undefined {
   const { request, fit } = curve;
   if (request.pathLengthKnown === false || request.formulaMass === undefined) return undefined;
-  const b = fit.coefficients[1] ?? NaN;
+  const { value: b, u: uSlope } = coefficientOf(fit, 1);
   const value = b * epsilonFactor(request);
-  const slope = Math.sqrt(fit.covariance[1]?.[1] ?? NaN) / Math.abs(b);
+  const slope = uSlope / Math.abs(b);
   const shared = (request.standardsShared ?? []).map((item) => item.relativeU);
   const standards = Math.hypot(request.standardsRelativeU ?? 0, ...shared);
   const path = (request.pathLengthUMm ?? 0) / request.pathLengthMm;

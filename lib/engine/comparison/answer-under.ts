@@ -1,10 +1,9 @@
 import { calculateUnknown } from '../calculate-unknown';
-import { checkRequest } from '../checks/check-request';
+import { acceptRequest } from '../checks/accept-request';
 import { pointAnswers, relativeStandardErrorPercent } from '../curve-points';
 import { EngineError } from '../errors';
 import { fitCurve, type FittedCurve } from '../fit-curve';
 import type { CurveRequest, Refusal, UnknownResult, UnknownUnder, ValueWithU } from '../types';
-import { parseUnit } from '../units';
 import { Ledger } from '../working/ledger';
 
 /** A curve with today's unknowns read back through it: what a comparison needs, without tests, limits and working. */
@@ -16,8 +15,7 @@ export interface Answered {
 
 /** @throws EngineError as calculateStandardCurve does */
 export function answerUnder(asked: CurveRequest): Answered {
-  const request = { ...asked, unit: parseUnit(asked.unit) ?? asked.unit };
-  checkRequest(request);
+  const request = acceptRequest(asked);
   const curve = fitCurve(request);
   return {
     curve,

@@ -1,6 +1,5 @@
-import { checkRequest } from '../checks/check-request';
+import { acceptRequest } from '../checks/accept-request';
 import type { CurveRequest, ModelUnder, Model, Refusal, Weighting } from '../types';
-import { parseUnit } from '../units';
 import { learnVarianceFunction } from '../weighting/learn-variance-function';
 import { replicateScatter } from '../weighting/replicate-scatter';
 import { type Answered, answerUnder, orRefusal, unknownsBeside } from './answer-under';
@@ -25,9 +24,8 @@ const WEIGHTINGS: readonly Weighting[] = [
  * @throws EngineError for a request that is wrong under every model
  */
 export function compareModels(request: CurveRequest): readonly ModelUnder[] {
-  const unit = parseUnit(request.unit) ?? request.unit;
   // Lines through zero refuse a blank level and given weights may be missing: that is said in their rows.
-  checkRequest({ ...request, unit, model: 'linear', weighting: 'none' });
+  acceptRequest({ ...request, model: 'linear', weighting: 'none' });
   const inUse = orRefusal(() => answerUnder(request));
   const varianceFunction = request.varianceFunction ?? learned(request);
   const hasWeights = request.standards.some((standard) => standard.weight !== undefined);

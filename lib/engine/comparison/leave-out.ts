@@ -1,3 +1,4 @@
+import { coefficientOf } from '../regression/fit';
 import type { CurveRequest, LeftOut, StandardRequest } from '../types';
 import { type Answered, answerUnder, orRefusal, unknownsBeside } from './answer-under';
 
@@ -44,8 +45,8 @@ function effect(inUse: Answered, request: CurveRequest, { index, replicate, chan
   const answer = orRefusal(() => answerUnder({ ...request, standards }));
   if ('reason' in answer) return { ...key, ...answer };
   const { fit, range } = answer.curve;
-  const slope = fit.coefficients[1] as number;
-  const before = inUse.curve.fit.coefficients[1] as number;
+  const slope = coefficientOf(fit, 1).value;
+  const before = coefficientOf(inUse.curve.fit, 1).value;
   return {
     ...key,
     slope,

@@ -1,5 +1,6 @@
 import { significantText } from '../../format/round';
 import type { FittedCurve } from '../fit-curve';
+import { coefficientOf } from '../regression/fit';
 import type { InterceptSize } from '../types';
 
 /**
@@ -10,9 +11,8 @@ import type { InterceptSize } from '../types';
  * @source EPA method 8000D, in our own words
  */
 export function interceptSize({ fit, range, request }: FittedCurve): InterceptSize | null {
-  const [a = NaN, b = NaN] = fit.coefficients;
   if (fit.model === 'proportional') return null;
-  const asConcentration = Math.abs(a / b);
+  const asConcentration = Math.abs(coefficientOf(fit, 0).value / coefficientOf(fit, 1).value);
   const halfLowest = range.min / 2;
   const passed = asConcentration <= halfLowest;
   const text = (value: number) => `${significantText(value, 3)} ${request.unit}`;

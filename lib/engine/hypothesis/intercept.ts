@@ -1,5 +1,6 @@
 import { significantText } from '../../format/round';
 import type { FittedCurve } from '../fit-curve';
+import { coefficientOf } from '../regression/fit';
 import { fitLine } from '../regression/fit-line';
 import { tTwoSidedP } from '../stats/student-t';
 import type { TestAnswer } from '../types';
@@ -15,8 +16,7 @@ export function interceptTest({ fit, data, request }: FittedCurve, levels: reado
     return { reason: 'The intercept can be tested with three levels or more.' };
   }
   const free = fit.model === 'proportional' ? fitLine(data) : fit;
-  const a = free.coefficients[0] ?? NaN;
-  const u = Math.sqrt(free.covariance[0]?.[0] ?? NaN);
+  const { value: a, u } = coefficientOf(free, 0);
   if (!(u > 0)) return { reason: 'The intercept cannot be tested: the readings lie on the curve exactly.' };
   const statistic = a / u;
   const df1 = free.degreesOfFreedom;

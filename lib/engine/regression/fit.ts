@@ -1,4 +1,4 @@
-import type { Model } from '../types';
+import type { Model, ValueWithU } from '../types';
 import type { Moments } from './moments';
 
 /**
@@ -46,6 +46,17 @@ export interface Fit {
   readonly sxx: number;
 }
 
+/** Uncentred coefficient i (intercept, slope, quadratic) with its standard uncertainty. */
+export function coefficientOf({ coefficients, covariance }: Fit, i: 0 | 1 | 2): ValueWithU {
+  const row = covariance[i] as readonly number[];
+  return { value: coefficients[i] as number, u: Math.sqrt(row[i] as number) };
+}
+
+/** Variance of the slope at the centre: of the slope itself, for a line. */
+export function slopeVariance({ betaCovariance }: Fit): number {
+  return (betaCovariance[1] as readonly number[])[1] as number;
+}
+
 /** ∂f/∂β at x, about the centre. */
 export function gradientAt(fit: Fit, x: number): readonly number[] {
   const t = (x - fit.centre) / fit.scale;
@@ -70,7 +81,7 @@ export function slopeAt(fit: Fit, x: number): number {
 
 /** gᵀ M g. */
 export function quadraticForm(matrix: readonly (readonly number[])[], g: readonly number[]): number {
-  return g.reduce((sum, gi, i) => sum + gi * dot(matrix[i] ?? [], g), 0);
+  return g.reduce((sum, gi, i) => sum + gi * dot(matrix[i] as readonly number[], g), 0);
 }
 
 /** Variance of the fitted value at x, gᵀVg. */
@@ -84,7 +95,7 @@ export function leverageAt(fit: Fit, x: number, w: number): number {
 }
 
 export function dot(a: readonly number[], b: readonly number[]): number {
-  return a.reduce((sum, value, i) => sum + value * (b[i] ?? 0), 0);
+  return a.reduce((sum, value, i) => sum + value * (b[i] as number), 0);
 }
 
 /** A model solved about its centre, and the sums the solution came with. */
@@ -144,5 +155,7 @@ export function residualSquaresOf({ x, y, w }: FitData, shape: Shape): number {
 
 /** T M Tᵀ. */
 function sandwich(t: readonly (readonly number[])[], m: readonly (readonly number[])[]): number[][] {
-  return t.map((rowA) => t.map((rowB) => rowA.reduce((sum, a, i) => sum + a * dot(m[i] ?? [], rowB), 0)));
+  return t.map((rowA) =>
+    t.map((rowB) => rowA.reduce((sum, a, i) => sum + a * dot(m[i] as readonly number[], rowB), 0)),
+  );
 }

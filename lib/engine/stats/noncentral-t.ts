@@ -1,12 +1,12 @@
 import normalCdf from '@stdlib/stats-base-dists-normal-cdf';
-import { crossing } from './quadrature';
+import { average, crossing } from './quadrature';
 import { scaledChiMesh } from './scaled-chi';
 import { tQuantile } from './student-t';
 
 /** P(T' ≤ t) of the non-central t: the mean of Φ(t·s - δ) over s = χ_ν/√ν. */
 export function noncentralTCdf(t: number, nu: number, delta: number): number {
   const mesh = scaledChiMesh(nu);
-  return mesh.at.reduce((sum, s, i) => sum + (mesh.weight[i] ?? 0) * normalCdf(t * s - delta, 0, 1), 0);
+  return average(mesh, (s) => normalCdf(t * s - delta, 0, 1));
 }
 
 const known = new Map<string, number>();

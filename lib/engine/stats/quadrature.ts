@@ -48,15 +48,20 @@ export interface Mesh {
 export function meshOver(edges: readonly number[]): Mesh {
   const at: number[] = [];
   const weight: number[] = [];
-  for (let i = 1; i < edges.length; i += 1) {
-    const low = edges[i - 1] ?? 0;
-    const high = edges[i] ?? 0;
+  edges.slice(1).forEach((high, i) => {
+    // The edge before: the list without its first is one behind.
+    const low = edges[i] as number;
     RULE.nodes.forEach((node, k) => {
       at.push((low + high + (high - low) * node) / 2);
-      weight.push(((RULE.weights[k] ?? 0) * (high - low)) / 2);
+      weight.push(((RULE.weights[k] as number) * (high - low)) / 2);
     });
-  }
+  });
   return { at, weight };
+}
+
+/** Σ weight·f(node). */
+export function average(mesh: Mesh, f: (node: number) => number): number {
+  return mesh.at.reduce((sum, node, i) => sum + (mesh.weight[i] as number) * f(node), 0);
 }
 
 /** x in [low, high] where f crosses zero (f(low) < 0 ≤ f(high)), by false position in the Illinois form. */

@@ -1,18 +1,19 @@
 import normalCdf from '@stdlib/stats-base-dists-normal-cdf';
-import { crossing, meshOver, type Mesh } from './quadrature';
+import { average, crossing, meshOver, type Mesh } from './quadrature';
 import { scaledChiMesh } from './scaled-chi';
 import { tQuantile } from './student-t';
 
+/** Nodes over the normal density, with its density and distribution at each. */
 const Z = meshOver([-7, -4, -1.5, 1, 3.5, 7]);
-const PHI = Z.at.map((z, i) => ((Z.weight[i] ?? 0) * Math.exp((-z * z) / 2)) / Math.sqrt(2 * Math.PI));
+const PHI = Z.at.map((z, i) => ((Z.weight[i] as number) * Math.exp((-z * z) / 2)) / Math.sqrt(2 * Math.PI));
 const CDF = Z.at.map((z) => normalCdf(z, 0, 1));
 
 /** P(range of `count` standard normal values < w) = p ∫ φ(z) [Φ(z) - Φ(z - w)]^(p-1) dz. */
 function rangeCdf(w: number, count: number): number {
   let sum = 0;
   for (let i = 0; i < Z.at.length; i += 1) {
-    const span = (CDF[i] ?? 0) - normalCdf((Z.at[i] ?? 0) - w, 0, 1);
-    sum += (PHI[i] ?? 0) * span ** (count - 1);
+    const span = (CDF[i] as number) - normalCdf((Z.at[i] as number) - w, 0, 1);
+    sum += (PHI[i] as number) * span ** (count - 1);
   }
   return count * sum;
 }
@@ -23,7 +24,7 @@ export function studentizedRangeCdf(q: number, count: number, nu: number): numbe
 }
 
 function averageOver(mesh: Mesh, q: number, count: number): number {
-  return mesh.at.reduce((sum, s, i) => sum + (mesh.weight[i] ?? 0) * rangeCdf(q * s, count), 0);
+  return average(mesh, (s) => rangeCdf(q * s, count));
 }
 
 const known = new Map<string, number>();

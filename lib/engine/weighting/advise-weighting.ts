@@ -71,7 +71,8 @@ function fromResiduals(inUse: Weighting, fitted: readonly PointAnswer[]): Found 
     known.map((point) => point.fitted),
     known.map((point) => Math.abs(point.standardisedResidual as number)),
   );
-  const p = Math.abs(rank) >= 1 ? 0 : tTwoSidedP(rank * Math.sqrt((n - 2) / (1 - rank * rank)), n - 2);
+  const left = Math.max(Number.MIN_VALUE, 1 - rank * rank);
+  const p = tTwoSidedP(rank * Math.sqrt((n - 2) / left), n - 2);
   const numbers = `(rank correlation ${significantText(rank, 2)}, p ${significantText(p, 2)}, no replicates)`;
   if (p >= ALPHA) {
     const sentence = `The weights in use suit: the size of the residuals has no trend along the curve ${numbers}.`;

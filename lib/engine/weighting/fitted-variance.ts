@@ -30,9 +30,8 @@ export function fittedVariance(points: readonly CurvePoint[], first: Fit, power:
 export function varianceByFunction(
   points: readonly CurvePoint[],
   fitted: (x: number) => number,
-  given: { readonly s0: number; readonly k: number } | undefined,
+  { s0, k }: { readonly s0: number; readonly k: number },
 ): VarianceRule {
-  const { s0, k } = given ?? { s0: 1, k: 0 };
   const variance = (y: number) => s0 ** 2 + (k * y) ** 2;
   return {
     ofPoints: points.map((point) => variance(fitted(point.concentration))),

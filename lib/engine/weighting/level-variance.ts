@@ -1,7 +1,7 @@
 import { EngineError } from '../errors';
 import { mean } from '../math';
-import type { CurvePoint } from '../prepare-points';
-import { pointsByLevel, responseOf, scatterOf } from './replicate-scatter';
+import { type CurvePoint, responseOf } from '../prepare-points';
+import { pointsByLevel, scatterOf } from './replicate-scatter';
 
 interface Level {
   readonly meanY: number;

@@ -1,5 +1,5 @@
 import { mean } from '../math';
-import { type CurvePoint, NORMAL_PATH_MM } from '../prepare-points';
+import { type CurvePoint, NORMAL_PATH_MM, responseOf } from '../prepare-points';
 import type { LevelScatter } from './learn-variance-function';
 
 /** Variances below this part of the squared mean are what rounding leaves of identical readings. */
@@ -16,14 +16,9 @@ export function pointsByLevel(points: readonly CurvePoint[]): ReadonlyMap<number
   return groups;
 }
 
-/** What is fitted has a number. */
-export function responseOf(point: CurvePoint): number {
-  return point.y as number;
-}
-
 /**
  * Mean per 10 mm and variance of the readings of one level. The variance is that of the absorbance as read, so that
- * the path enters once, with the weight. Zero for readings that are all the same.
+ * the path enters once, with the weight. Zero for readings that are all the same. There are two readings at least.
  */
 export function scatterOf(group: readonly CurvePoint[]): LevelScatter {
   const meanY = mean(group.map(responseOf));
@@ -32,7 +27,7 @@ export function scatterOf(group: readonly CurvePoint[]): LevelScatter {
     0,
   );
   const degreesOfFreedom = group.length - 1;
-  const variance = degreesOfFreedom === 0 ? 0 : squares / degreesOfFreedom;
+  const variance = squares / degreesOfFreedom;
   return { meanY, variance: variance <= (IDENTICAL * meanY) ** 2 ? 0 : variance, degreesOfFreedom };
 }
 

@@ -33,7 +33,7 @@ export function varianceRule(
     case '1/y2':
       return fittedVariance(points, first(), 2);
     case 'varianceFunction':
-      return varianceByFunction(points, (x) => valueAt(first(), x), request.varianceFunction);
+      return varianceByFunction(points, (x) => valueAt(first(), x), functionOf(request));
     case 'replicates':
     case 'given': {
       const levels = levelVariances(points, request.weighting);
@@ -46,6 +46,11 @@ export function varianceRule(
       };
     }
   }
+}
+
+/** The checks of the request refuse this weighting without its function. */
+function functionOf(request: CurveRequest) {
+  return request.varianceFunction as NonNullable<CurveRequest['varianceFunction']>;
 }
 
 /** v = x or x². Below the lowest fitted standard its variance holds: v = 0 would make an unknown certain. */

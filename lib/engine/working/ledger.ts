@@ -36,7 +36,7 @@ export function numberText(x: number | string): string {
   return x < 0 ? `(${text})` : text;
 }
 
-/** A formula cut at its symbols: literal, symbol, literal, symbol, ..., literal. */
+/** A formula cut at its symbols: literal, symbol, literal, symbol, ..., literal. Every symbol has its line. */
 type Template = readonly string[];
 
 const templates = new Map<string, Template>();
@@ -98,18 +98,19 @@ export class Ledger {
 
   /** A sum over points: `expression` for one term, `terms` the ids behind its symbols, point by point. */
   sum(text: LineText, expression: string, terms: readonly From[], value: number, divisor?: From): void {
-    const [over] = Object.keys(divisor ?? {});
+    const [over] = Object.entries(divisor ?? {});
     const written = terms.length <= TERMS_WRITTEN ? terms : [...terms.slice(0, 2), ...terms.slice(-1)];
-    const template = templateOf(expression, Object.keys(terms[0] ?? {}));
+    // A sum has one term at least.
+    const template = templateOf(expression, Object.keys(terms[0] as From));
     const texts = written.map((from) => this.fill(template, from));
     if (terms.length > TERMS_WRITTEN) texts.splice(2, 0, `... ${terms.length - 3} more terms ...`);
     const sumText = texts.join(' + ');
     const inputs = new Set(Object.values(divisor ?? {}));
-    for (const from of terms) for (const symbol in from) inputs.add(from[symbol] ?? '');
+    for (const from of terms) for (const id of Object.values(from)) inputs.add(id);
     this.add(
       text,
-      `${text.symbol} = sum(${expression})${over === undefined ? '' : ` / ${over}`}`,
-      over === undefined ? sumText : `(${sumText}) / ${this.shown(divisor?.[over] ?? '')}`,
+      `${text.symbol} = sum(${expression})${over ? ` / ${over[0]}` : ''}`,
+      over ? `(${sumText}) / ${this.shown(over[1])}` : sumText,
       value,
       [...inputs],
     );
@@ -133,8 +134,8 @@ export class Ledger {
   private fill(template: Template, from: From): string {
     let text = '';
     for (let i = 0; i < template.length; i += 1) {
-      const part = template[i] ?? '';
-      text += i % 2 === 0 ? part : this.shown(from[part] ?? '');
+      const part = template[i] as string;
+      text += i % 2 === 0 ? part : this.shown(from[part] as string);
     }
     return text;
   }

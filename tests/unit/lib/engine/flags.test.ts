@@ -1,5 +1,6 @@
 import { describe, expect, test } from 'vitest';
 import { calculateStandardCurve, type CurveRequest, type FlagCode, FLAGS } from '@/lib/engine';
+import { flag } from '@/lib/engine/flags';
 import { request, standardsOf, unknown } from './requests';
 
 /** Each flag with a request that raises it and one just on the other side of its limit. */
@@ -135,4 +136,11 @@ describe('the catalogue', () => {
       expect(kind.meaning.length).toBeGreaterThan(10);
     }
   });
+});
+
+// A text made from fewer numbers than it could have still reads as a sentence.
+test.each(Object.keys(FLAGS) as FlagCode[])('%s says something without its numbers', (code) => {
+  const { message } = flag(code);
+  expect(message).toMatch(/[.?]$|:$/);
+  expect(message).not.toMatch(/undefined|NaN/);
 });

@@ -183,6 +183,9 @@ describe('effectOfLeavingOut', () => {
   });
 
   test('refuses a request that does not fit as it stands', () => {
+    expect(() =>
+      effectOfLeavingOut({ ...asked, standards: asked.standards.map((s) => ({ ...s, excluded: true })) }),
+    ).toThrow(expect.objectContaining({ message: expect.stringMatching(/got none$/) as string }));
     expect(() => effectOfLeavingOut({ ...asked, standards: asked.standards.slice(0, 2) })).toThrow(
       expect.objectContaining({ code: 'TOO_FEW_STANDARDS' }),
     );

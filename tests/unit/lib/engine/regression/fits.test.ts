@@ -5,6 +5,7 @@ import type { Fit } from '@/lib/engine/regression/fit';
 import { fitLine } from '@/lib/engine/regression/fit-line';
 import { fitProportional } from '@/lib/engine/regression/fit-proportional';
 import { fitQuadratic } from '@/lib/engine/regression/fit-quadratic';
+import { householder } from '@/lib/engine/regression/qr';
 import { expectDigits } from '../../../../support/digits';
 import { reference } from '../requests';
 
@@ -121,6 +122,18 @@ test('many points give the slope that few give', () => {
 });
 
 describe('the orthogonal decomposition', () => {
+  // Property: nothing to turn, nothing turned.
+  test('leaves a column of zeros as it is', () => {
+    const { r } = householder([
+      [0, 0, 0],
+      [0, 3, 4],
+    ]);
+    expect(r.map((row) => row.map(Math.abs))).toEqual([
+      [0, 0],
+      [0, 5],
+    ]);
+  });
+
   // Second opinion: mathjs, on random weighted problems of a constant, a slope and a bend.
   test('agrees with that of mathjs to 12 digits in the fitted parabola', () => {
     const number = fc.double({ min: -1, max: 1, noNaN: true });

@@ -37,6 +37,14 @@ test.each(Object.entries(reference<Record<string, number>>('iso-11843-1')))(
   },
 );
 
+// Reference: scipy.stats.nct.cdf solved for the non-centrality, and mpmath; a small beta lies far out.
+test.each([
+  [5, 0.001, 5.637196767863738],
+  [12, 0.01, 4.224470634467861],
+])('delta(%d; 0.05; %d) agrees with scipy', (nu, beta, delta) => {
+  expectDigits(detectionDelta(nu, 0.05, beta), delta, 8);
+});
+
 // Reference: scipy.stats.t.ppf(0.975, nu), fractional nu included; and the normal limit.
 test.each([
   [1, 12.706204736432095],
