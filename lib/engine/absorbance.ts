@@ -1,5 +1,6 @@
 import { censoredText, type CensorReason, plainNumber } from './censoring';
 import { EngineError } from './errors';
+import { log10 } from './math';
 import type { Reading, Signal, TwoWavelengthReading } from './types';
 
 export type { CensorReason };
@@ -68,7 +69,7 @@ function absorbanceOfOne(reading: number | string, signal: Signal, pointer?: str
   if (signal === 'absorbance') return { value: number };
   const fraction = signal === 'transmittance' ? number : number / 100;
   if (fraction <= 0) return { value: null, censored: { reason: 'noLight', text: String(reading) } };
-  return { value: -Math.log10(fraction) };
+  return { value: -log10(fraction) };
 }
 
 /** T = 10^-A. */

@@ -1,4 +1,5 @@
 import type { Absorbance } from './absorbance';
+import { log10 } from './math';
 import type { Signal } from './types';
 
 export type CensorReason = 'aboveRange' | 'belowRange' | 'noLight' | 'empty' | 'unreadable';
@@ -25,7 +26,7 @@ export function plainNumber(text: string): number | null {
 function toAbsorbance(value: number, signal: Signal): number | undefined {
   if (signal === 'absorbance') return value;
   const fraction = signal === 'transmittance' ? value : value / 100;
-  return fraction > 0 ? -Math.log10(fraction) : undefined;
+  return fraction > 0 ? -log10(fraction) : undefined;
 }
 
 /** A bound such as ">3.5", or "<0.03" in transmittance, which bounds the absorbance from the other side. */

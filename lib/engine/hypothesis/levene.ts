@@ -1,5 +1,5 @@
 import type { FittedCurve } from '../fit-curve';
-import { median } from '../math';
+import { mean, median } from '../math';
 import type { TestAnswer } from '../types';
 import { fTestAnswer } from './f-test';
 import { type Level, noScatter } from './levels';
@@ -29,13 +29,13 @@ export function levene({ data }: FittedCurve, levels: readonly Level[]): TestAns
   if (groups.length < 2)
     return { reason: "Levene's test needs three readings or more at two levels at least." };
   const all = groups.flat();
-  const grand = meanOf(all);
+  const grand = mean(all);
   const df1 = groups.length - 1;
   const df2 = all.length - groups.length;
   let between = 0;
   let within = 0;
   for (const group of groups) {
-    const own = meanOf(group);
+    const own = mean(group);
     between += group.length * (own - grand) ** 2;
     for (const z of group) within += (z - own) ** 2;
   }
@@ -49,8 +49,4 @@ export function levene({ data }: FittedCurve, levels: readonly Level[]): TestAns
     stands: 'The levels scatter alike, judged about their medians',
     falls: 'The levels scatter differently, judged about their medians',
   });
-}
-
-function meanOf(values: readonly number[]): number {
-  return values.reduce((sum, value) => sum + value, 0) / values.length;
 }
