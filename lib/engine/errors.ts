@@ -62,3 +62,15 @@ export class EngineError extends Error {
     super(message);
   }
 }
+
+/** Refusals of one part of a request, told from the whole: their pointers start at the part. */
+export function below<T>(part: string, work: () => T): T {
+  try {
+    return work();
+  } catch (error) {
+    // Every refusal of a part names its place; anything else is a bug and passes as it is.
+    throw error instanceof EngineError
+      ? new EngineError(error.code, error.message, part + error.pointer)
+      : error;
+  }
+}

@@ -17,6 +17,8 @@ export type {
 } from './direct/types';
 export { ENGINE_ERRORS, EngineError, type EngineErrorCode } from './errors';
 export { FLAGS, type Flag, type FlagCode, type FlagLevel } from './flags';
+export { allLimits, type LimitNotMade, type LimitsAnswer, type LimitsRequest } from './limits/all-limits';
+export { type MdlStudy, type StudySample } from './limits/mdl';
 export { MONTE_CARLO_TRIALS, monteCarlo } from './monte-carlo/monte-carlo';
 export { type Propagation, propagate } from './monte-carlo/propagate';
 export { type Simulated } from './monte-carlo/simulate';

@@ -1,6 +1,5 @@
 import { calculateUnknown } from './calculate-unknown';
 import { type CriticalValue, criticalValue } from './calibration/critical-value';
-import { detectionLimits } from './calibration/detection-limits';
 import { molarAbsorptivity } from './calibration/molar-absorptivity';
 import { acceptRequest } from './checks/accept-request';
 import { levelAnswers, pointAnswers, relativeStandardErrorPercent } from './curve-points';
@@ -8,6 +7,7 @@ import { fitCurve, type FittedCurve } from './fit-curve';
 import { curveJudgements, curveTests } from './hypothesis/curve-tests';
 import { levelsOf } from './hypothesis/levels';
 import { judgeCurve } from './judge-curve';
+import { detectionLimits } from './limits/curve-limits';
 import { coefficientOf } from './regression/fit';
 import type { CurveAnswer, CurveRequest, CurveResult, MolarAbsorptivity } from './types';
 import { ENGINE_VERSION } from './version';

@@ -171,6 +171,12 @@ export interface LimitAnswer {
   /** In the measured solution. */
   readonly value: number;
   readonly basis: string;
+  /** In symbols; absent, as the error probabilities, in results of engines before 1.1. */
+  readonly formula?: string;
+  /** Probability of taking a blank for more, and of missing this much; null where the rule states none. */
+  readonly alpha?: number | null;
+  readonly beta?: number | null;
+  readonly source?: string;
 }
 
 export interface PointAnswer {

@@ -1,9 +1,8 @@
-import { checkRequest } from '../checks/check-request';
+import { acceptRequest } from '../checks/accept-request';
 import { requirePositive } from '../checks/require';
 import { EngineError } from '../errors';
 import { fitCurve } from '../fit-curve';
 import type { CurveRequest } from '../types';
-import { parseUnit } from '../units';
 import { makeBudget } from '../unknown/budget';
 import { convertReadings } from '../unknown/convert-readings';
 import { readBack } from '../unknown/read-back';
@@ -30,8 +29,7 @@ export function monteCarlo(
   index: number,
   options: MonteCarloOptions,
 ): MonteCarloAnswer | null {
-  const request = { ...asked, unit: parseUnit(asked.unit) ?? asked.unit };
-  checkRequest(request);
+  const request = acceptRequest(asked);
   checkOptions(options);
   const unknown = request.unknowns[index];
   if (!unknown) {

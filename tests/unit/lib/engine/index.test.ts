@@ -13,6 +13,7 @@ test('the engine exports these values and no others', () => {
     'LEAST_PHOTOMETRIC_ERROR_AT',
     'MONTE_CARLO_TRIALS',
     'absorbanceOf',
+    'allLimits',
     'calculateStandardCurve',
     'compareModels',
     'convertConcentration',
