@@ -5,6 +5,7 @@ import { EngineError } from '@/lib/engine';
 import { AppError, type ErrorDetail } from '@/lib/errors';
 import type { Actor } from '@/lib/policies/actor';
 import { ReaderError } from '@/lib/readers/types';
+import { issuesOf } from '@/lib/schemas/issues';
 import { apiActor } from './current-actor';
 import { log } from './log';
 
@@ -31,7 +32,7 @@ export function problemOf(error: unknown): Response {
     return problem(422, error.code, error.message, [{ pointer: error.pointer ?? '', detail: error.message }]);
   if (error instanceof ReaderError) return problem(422, error.code, error.message);
   if (error instanceof z.ZodError) {
-    const errors = error.issues.map((issue) => ({
+    const errors = issuesOf(error).map((issue) => ({
       pointer: '/' + issue.path.join('/'),
       detail: issue.message,
     }));

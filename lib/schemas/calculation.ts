@@ -12,9 +12,9 @@ const reading = z.union(
   [z.number(), z.string().max(60), z.strictObject({ main: z.number(), minus: z.number() })],
   'A reading is a number, text, or {main, minus} for two wavelengths',
 );
-const readings = z.array(reading).max(LIMITS.readingsPerStandard);
-const name = z.string().max(LIMITS.name).optional();
-const numbers = z.number().optional();
+export const readings = z.array(reading).max(LIMITS.readingsPerStandard);
+export const name = z.string().max(LIMITS.name).optional();
+export const numbers = z.number().optional();
 
 const ware = z
   .strictObject({
@@ -49,15 +49,15 @@ const massStep = z.strictObject({
     .optional(),
 });
 
-const dilution = z
+export const dilution = z
   .array(
     z.union([volumeStep, massStep], 'A dilution step is volumes (takenMl, toMl) or masses (takenG, toG)'),
   )
   .max(LIMITS.dilutionSteps)
   .optional();
 
-const recovery = z.strictObject({ value: z.number(), u: z.number() }).optional();
-const volumes = z.array(z.number()).max(LIMITS.glassware);
+export const recovery = z.strictObject({ value: z.number(), u: z.number() }).optional();
+export const volumes = z.array(z.number()).max(LIMITS.glassware);
 
 const standard = z.strictObject({
   name,

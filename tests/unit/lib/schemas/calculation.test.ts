@@ -1,5 +1,6 @@
 import { describe, expect, test } from 'vitest';
 import { standardCurveCalculation } from '@/lib/schemas/calculation';
+import { issuesOf } from '@/lib/schemas/issues';
 
 const REQUEST = {
   signal: 'absorbance',
@@ -11,7 +12,7 @@ const REQUEST = {
 
 const pointers = (body: unknown) => {
   const parsed = standardCurveCalculation.safeParse(body);
-  return parsed.success ? [] : parsed.error.issues.map(({ path }) => path.join('/'));
+  return parsed.success ? [] : issuesOf(parsed.error).map(({ path }) => path.join('/'));
 };
 
 describe('standardCurveCalculation', () => {
@@ -35,6 +36,11 @@ describe('standardCurveCalculation', () => {
     [{ ...REQUEST, standards: [{ concentration: '1', readings: [0.2] }] }, 'standards/0/concentration'],
     [{ ...REQUEST, standards: [{ concentration: 1, readings: [null] }] }, 'standards/0/readings/0'],
     [{ ...REQUEST, unknowns: [{ readings: [1], dilution: [{ takenMl: 1 }] }] }, 'unknowns/0/dilution/0/toMl'],
+    [
+      { ...REQUEST, unknowns: [{ readings: [1], dilution: [{ takenG: 1, toG: '2' }] }] },
+      'unknowns/0/dilution/0/toG',
+    ],
+    [{ ...REQUEST, unknowns: [{ readings: [1], dilution: [7] }] }, 'unknowns/0/dilution/0'],
   ])('points at the value that is wrong: %#', (body, pointer) => {
     expect(pointers(body)).toEqual([pointer]);
   });
