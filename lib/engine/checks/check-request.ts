@@ -40,8 +40,9 @@ function checkChoices(request: CurveRequest): void {
         '/varianceFunction',
       );
     }
-    requirePositive(given.s0, 'WEIGHT_NOT_POSITIVE', 's0', '/varianceFunction/s0');
+    requireNotNegative(given.s0, 's0', '/varianceFunction/s0');
     requireNotNegative(given.k, 'k', '/varianceFunction/k');
+    requirePositive(given.s0 + given.k, 'WEIGHT_NOT_POSITIVE', 's0 or k', '/varianceFunction/s0');
   }
 }
 

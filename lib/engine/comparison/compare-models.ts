@@ -41,12 +41,12 @@ export function compareModels(request: CurveRequest): readonly ModelUnder[] {
   );
 }
 
-/** The function that replicates teach, when they are enough and it leaves every reading a variance. */
+/** The function that replicates teach, when they are enough. */
 function learned(request: CurveRequest): CurveRequest['varianceFunction'] {
   const plain = orRefusal(() => answerUnder({ ...request, model: 'linear', weighting: 'none' }));
   if ('reason' in plain) return undefined;
   const found = learnVarianceFunction(replicateScatter(plain.curve.active));
-  return found && !found.adviceOnly && found.s0 > 0 ? { s0: found.s0, k: found.k } : undefined;
+  return found && !found.adviceOnly ? { s0: found.s0, k: found.k } : undefined;
 }
 
 function rowOf(changed: CurveRequest, request: CurveRequest, inUse: Answered | Refusal): ModelUnder {

@@ -26,15 +26,24 @@ export function fittedVariance(points: readonly CurvePoint[], first: Fit, power:
   };
 }
 
-/** v = s0² + (k ŷ)², ŷ per 10 mm, from the unweighted fit at the points and as measured at an unknown. */
+/**
+ * v = s0² + (k ŷ)², ŷ per 10 mm, from the unweighted fit at the points and as measured at an unknown. Without s0 it is
+ * the law of 1/y², and is refused where that is.
+ *
+ * @throws EngineError FITTED_NOT_POSITIVE
+ */
 export function varianceByFunction(
   points: readonly CurvePoint[],
-  fitted: (x: number) => number,
+  first: Fit,
   { s0, k }: { readonly s0: number; readonly k: number },
 ): VarianceRule {
+  if (s0 === 0) {
+    const law = fittedVariance(points, first, 2);
+    return { ofPoints: law.ofPoints.map((v) => k * k * v), at: (x, y) => k * k * law.at(x, y) };
+  }
   const variance = (y: number) => s0 ** 2 + (k * y) ** 2;
   return {
-    ofPoints: points.map((point) => variance(fitted(point.concentration))),
+    ofPoints: points.map((point) => variance(valueAt(first, point.concentration))),
     at: (_x, y) => variance(y),
   };
 }

@@ -1,5 +1,5 @@
 import type { CurvePoint } from '../prepare-points';
-import { type Fit, valueAt } from '../regression/fit';
+import type { Fit } from '../regression/fit';
 import type { CurveRequest } from '../types';
 import { fittedVariance, varianceByFunction } from './fitted-variance';
 import { interpolateLevels, levelVariances } from './level-variance';
@@ -33,7 +33,7 @@ export function varianceRule(
     case '1/y2':
       return fittedVariance(points, first(), 2);
     case 'varianceFunction':
-      return varianceByFunction(points, (x) => valueAt(first(), x), functionOf(request));
+      return varianceByFunction(points, first(), functionOf(request));
     case 'replicates':
     case 'given': {
       const levels = levelVariances(points, request.weighting);

@@ -111,6 +111,19 @@ describe('Miller and Miller, the weighted line', () => {
     expectDigits(unknowns[0]?.measured?.value ?? NaN, more.x0At100 ?? NaN, 6);
   });
 
+  // Printed beside it, typed from memory: the same data without weights.
+  test('without weights gives the line and both concentrations printed beside it', () => {
+    const plain = calculateStandardCurve(
+      request({
+        standards: standardsOf(weighted.x, weighted.y),
+        unknowns: [unknown([0.1]), unknown([0.6])],
+      }),
+    );
+    expect(plain.curve.slope.value.toFixed(4)).toBe('0.0725');
+    expect(plain.curve.intercept.value.toFixed(4)).toBe('0.0133');
+    expect(plain.unknowns.map((result) => result.measured?.value.toFixed(2))).toEqual(['1.20', '8.09']);
+  });
+
   test('scales the weights to n, as printed', () => {
     const printed = weighted.w_normalised_sum_n;
     curve.points.forEach((point, i) =>

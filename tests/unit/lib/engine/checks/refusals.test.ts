@@ -120,7 +120,7 @@ const REFUSALS: readonly [string, Partial<CurveRequest>, string | undefined][] =
   ['WEIGHT_NOT_POSITIVE', { standards: withFirst({ weight: 0 }) }, '/standards/0/weight'],
   [
     'WEIGHT_NOT_POSITIVE',
-    { weighting: 'varianceFunction', varianceFunction: { s0: 0, k: 1 } },
+    { weighting: 'varianceFunction', varianceFunction: { s0: 0, k: 0 } },
     '/varianceFunction/s0',
   ],
   [

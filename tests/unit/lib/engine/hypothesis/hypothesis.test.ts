@@ -1,5 +1,6 @@
 import { describe, expect, test } from 'vitest';
 import { calculateStandardCurve, type CurveRequest, type TestAnswer } from '@/lib/engine';
+import { fitQuadratic } from '@/lib/engine/regression/fit-quadratic';
 import { expectDigits } from '../../../../support/digits';
 import { reference, request, standardsOf } from '../requests';
 
@@ -55,6 +56,10 @@ describe('Mandel', () => {
     expect(answer).toMatchObject({ df1: 1, df2: 8, passed: false });
     expect(answer.statistic.toFixed(4)).toBe(fluorescein11?.mandelF.toFixed(4));
     expect(answer.critical.toFixed(2)).toBe('11.26');
+    // Both residual standard deviations, computed with numpy.
+    expect(curve.residualSd.toFixed(6)).toBe('1.484206');
+    const { x = [], y = [] } = fluorescein11 ?? {};
+    expect(fitQuadratic({ x, y, w: x.map(() => 1) }).residualSd.toFixed(6)).toBe('0.907026');
     expect(curve.flags.map((flag) => flag.code)).toContain('CURVATURE');
   });
 

@@ -119,3 +119,28 @@ describe('several path lengths in one fit', () => {
     );
   });
 });
+
+describe('a variance function without a constant part', () => {
+  const proportional: Partial<CurveRequest> = {
+    weighting: 'varianceFunction',
+    varianceFunction: { s0: 0, k: 0.01 },
+  };
+
+  // Identity: v = (k y)² is 1/y² but for a factor, which weights do not keep.
+  test('is the weighting 1/y²', () => {
+    const [law, power] = [curveOf(proportional), curveOf({ weighting: '1/y2' })];
+    expectDigits(law.curve.slope.value, power.curve.slope.value, 13);
+    expectDigits(law.curve.residualSd, power.curve.residualSd, 12);
+    expectDigits(law.unknowns[0]?.measured?.u ?? NaN, power.unknowns[0]?.measured?.u ?? NaN, 12);
+  });
+
+  test('is refused where a fitted absorbance is not above zero', () => {
+    const below = four.map(({ concentration, readings }) => ({
+      concentration,
+      readings: readings.map((y) => y - 0.2),
+    }));
+    expect(() => curveOf({ ...proportional, standards: below })).toThrow(
+      expect.objectContaining({ code: 'FITTED_NOT_POSITIVE', pointer: '/weighting' }),
+    );
+  });
+});
