@@ -1,18 +1,21 @@
 import { Card } from '@/components/ui/card';
 import { RowHead, Table, Td, Th } from '@/components/ui/table';
 import type { BudgetLine } from '@/lib/engine';
-import { formatPercent } from '@/lib/format/number';
+import { formatNumber, formatPercent } from '@/lib/format/number';
 import { significantText } from '@/lib/format/round';
 
 /** What makes up the uncertainty of a result: each line with its share of u², as a bar and in figures. */
 export function BudgetTable({ budget, unit }: { budget: readonly BudgetLine[]; unit: string }) {
   const shares = budget.filter((line) => line.sharesS).length;
+  const detailed = budget.some(({ sensitivity }) => sensitivity !== undefined);
   return (
     <Card flush title="Where the uncertainty comes from" aside="shares of u²">
       <Table label="Uncertainty budget">
         <thead>
           <tr>
             <Th>Source</Th>
+            {detailed && <Th numeric>u of the input</Th>}
+            {detailed && <Th numeric>sensitivity</Th>}
             <Th numeric>u, {unit}</Th>
             <Th>Share</Th>
             <Th numeric>
@@ -27,6 +30,16 @@ export function BudgetTable({ budget, unit }: { budget: readonly BudgetLine[]; u
                 {line.source}
                 {line.sharesS && shares > 1 && <sup className="ml-0.5 text-uv">s</sup>}
               </RowHead>
+              {detailed && (
+                <Td numeric>
+                  {line.inputU === undefined
+                    ? '–'
+                    : `${significantText(line.inputU, 2)} ${line.inputUnit ?? ''}`}
+                </Td>
+              )}
+              {detailed && (
+                <Td numeric>{line.sensitivity === undefined ? '–' : formatNumber(line.sensitivity, 3)}</Td>
+              )}
               <Td numeric>{significantText(line.u, 2)}</Td>
               <Td className="w-2/5 min-w-28">
                 <span aria-hidden="true" className="block h-2.5 rounded-full bg-raised">

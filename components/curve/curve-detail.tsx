@@ -4,13 +4,16 @@ import { Columns } from '@/components/ui/columns';
 import { RowHead, Table, Td, Th } from '@/components/ui/table';
 import { readingRuleWords } from '@/lib/curve/reading-rule-words';
 import { standardRows } from '@/lib/curve/standard-rows';
+import { compareModels } from '@/lib/engine';
 import { formatDateTime } from '@/lib/format/dates';
 import type { CurveVersionView, CurveView } from '@/lib/views/curve';
 import { CurveFacts } from './curve-facts';
 import { CurveJudgements } from './curve-judgements';
 import { CurvePlots } from './curve-plots';
 import { CurveStatusNotice, CurveStatusPill, HazardNote } from './curve-status';
+import { LimitsRuler } from './limits-ruler';
 import { MethodFacts } from './method-facts';
+import { ModelTable } from './model-table';
 import { StandardsTable } from './standards-table';
 
 /** How the readings came, for the line beside the title of the standards. */
@@ -95,6 +98,12 @@ export function CurveDetail({ curve, timeZone }: { curve: CurveView; timeZone: s
           <MethodFacts curve={curve} />
         </div>
       </Columns>
+      <Card flush title="Limits on one ruler" aside="in the measured solution">
+        <LimitsRuler limits={result.curve.limits} range={result.curve.range} unit={method.unit} />
+      </Card>
+      <Card flush title="Models side by side" aside="a batch shows them by its own results">
+        <ModelTable models={compareModels(curve.request)} unit={method.unit} />
+      </Card>
       <Versions curve={curve} timeZone={timeZone} />
     </div>
   );

@@ -1,44 +1,44 @@
 import { FlagList } from '@/components/flags/flag-list';
 import { Card } from '@/components/ui/card';
+import { Disclosure } from '@/components/ui/disclosure';
 import { ToneShape } from '@/components/ui/pill';
-import type { CurveResult, TestAnswer } from '@/lib/engine';
+import { judgementLines, unmadeTests, type UnmadeTest } from '@/lib/curve/judgement-lines';
+import type { CurveResult } from '@/lib/engine';
 
-const TEST_NAMES: Readonly<Record<keyof CurveResult['tests'], string>> = {
-  lackOfFit: 'Lack of fit',
-  mandel: 'Curvature (Mandel)',
-  intercept: 'Intercept against zero',
-  homogeneity: 'Equal variances',
-  cochran: 'No level wider than the others (Cochran)',
-  levene: 'Levels alike (Levene)',
-};
-
-function Test({ name, test }: { name: string; test: TestAnswer }) {
-  if (test.reason !== undefined) return null;
+function Unmade({ tests }: { tests: readonly UnmadeTest[] }) {
+  if (tests.length === 0) return null;
   return (
-    <li className="flex gap-2">
-      <ToneShape tone={test.passed ? 'order' : 'decide'} className="mt-1.5" />
-      <span className="min-w-0">
-        {name}: {test.verdict}
-      </span>
-    </li>
+    <Disclosure
+      summary={tests.length === 1 ? 'One test was not made' : `${tests.length} tests were not made`}
+    >
+      <ul className="grid gap-1.5 text-sm text-ink-2">
+        {tests.map(({ name, reason }) => (
+          <li key={name}>
+            <span className="text-ink">{name}:</span> {reason}
+          </li>
+        ))}
+      </ul>
+    </Disclosure>
   );
 }
 
-/** What speaks for and against a curve, in sentences; r² small and last, for it says the least. */
+/** What speaks for and against a curve, in sentences and in the order that matters; r² small and last, for it says the least. */
 export function CurveJudgements({ curve }: { curve: CurveResult }) {
-  const tests = Object.entries(curve.tests) as [keyof CurveResult['tests'], TestAnswer][];
-  const made = tests.filter(([, test]) => test.reason === undefined);
   return (
     <Card title="What it is worth">
       <div className="grid gap-3">
         <FlagList flags={curve.flags} inOrder="Nothing speaks against this curve." />
-        {made.length > 0 && (
-          <ul className="grid gap-2 border-t pt-3">
-            {made.map(([key, test]) => (
-              <Test key={key} name={TEST_NAMES[key]} test={test} />
-            ))}
-          </ul>
-        )}
+        <ul className="grid gap-2 border-t pt-3">
+          {judgementLines(curve).map(({ key, name, tone, sentence }) => (
+            <li key={key} className="flex gap-2">
+              <ToneShape tone={tone} className="mt-1.5" />
+              <span className="min-w-0">
+                <span className="font-medium">{name}.</span> {sentence}
+              </span>
+            </li>
+          ))}
+        </ul>
+        <Unmade tests={unmadeTests(curve)} />
         {curve.molarAbsorptivity && (
           <p className="border-t pt-3 text-sm text-ink-2">ε: {curve.molarAbsorptivity.covers}</p>
         )}

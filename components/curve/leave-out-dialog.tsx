@@ -35,12 +35,15 @@ function readingLabel(row: StandardRowView, at: number): string {
 export function LeaveOutDialog({
   row,
   reading,
+  effect,
   onAnswer,
   onClose,
 }: {
   row: StandardRowView;
   /** The reading that was picked; null when the standard was. */
   reading: number | null;
+  /** What leaving out the standard (null) or one of its readings would change, in words. */
+  effect: (reading: number | null) => string | null;
   onAnswer: (answer: LeaveOutAnswer) => void;
   onClose: () => void;
 }) {
@@ -49,6 +52,7 @@ export function LeaveOutDialog({
   const [asked, setAsked] = useState(false);
   const at = target === WHOLE ? null : Number(target);
   const already = at === null ? row.leftOutBecause : (row.readings[at]?.leftOutBecause ?? null);
+  const said = effect(at);
   const answer = (why: string | null) => onAnswer({ index: row.index, reading: at, reason: why });
   const choices = [
     { value: WHOLE, label: `The whole of ${row.name}, ${row.readings.length} readings` },
@@ -77,6 +81,11 @@ export function LeaveOutDialog({
           value={target}
           onChange={setTarget}
         />
+        {!already && said !== null && (
+          <p role="status" className="rounded-control bg-raised px-3 py-2 text-sm">
+            {said}
+          </p>
+        )}
         <Field
           name="leave-out-reason"
           label="Why"

@@ -4,6 +4,7 @@ import { useState } from 'react';
 import { Card } from '@/components/ui/card';
 import { ToneShape } from '@/components/ui/pill';
 import { cellKey } from '@/lib/curve/grid-standards';
+import { effectsOn, leftOutWords } from '@/lib/curve/left-out-words';
 import { pointId, standardRows } from '@/lib/curve/standard-rows';
 import { CurveFacts } from './curve-facts';
 import { CurveJudgements } from './curve-judgements';
@@ -43,6 +44,11 @@ export function LivePanel({ form }: { form: CurveFormState }) {
   const curve = live.answer?.curve ?? null;
   const rows = standardRows(live.standards, curve);
   const row = picked ? rows[picked.index] : undefined;
+  const effects = picked && live.request ? effectsOn(live.request, live.standards, picked.index) : [];
+  const effectWords = (reading: number | null) => {
+    const found = effects.find(({ replicate }) => replicate === (reading === null ? null : reading + 1));
+    return found && curve ? leftOutWords(found, curve) : null;
+  };
   return (
     <div className="grid gap-4.5">
       {!curve && (
@@ -78,6 +84,7 @@ export function LivePanel({ form }: { form: CurveFormState }) {
         <LeaveOutDialog
           row={row}
           reading={picked.reading}
+          effect={effectWords}
           onClose={() => setPicked(null)}
           onAnswer={(answer) => {
             withAnswer(form, answer);

@@ -1,5 +1,5 @@
 import type { z } from 'zod';
-import { calculateStandardCurve, EngineError, type CurveAnswer } from '@/lib/engine';
+import { calculateStandardCurve, EngineError, type CurveAnswer, type CurveRequest } from '@/lib/engine';
 import { standardDrafts, type StandardDraftInput } from '@/lib/schemas/curve';
 import { calculationFields } from '@/lib/schemas/method';
 import { spectrumRule, type RuleTexts } from '@/lib/schemas/spectrum-rule';
@@ -24,6 +24,8 @@ export interface LiveCurve {
   readonly standards: readonly StoredStandard[];
   readonly places: readonly number[];
   readonly answer: CurveAnswer | null;
+  /** What the answer was asked with; null without one. */
+  readonly request: CurveRequest | null;
   readonly sentence: string;
   /** The engine's refusal of these readings, as opposed to a form that is not complete. */
   readonly refused: boolean;
@@ -33,6 +35,7 @@ const nothing = (sentence: string): LiveCurve => ({
   standards: [],
   places: [],
   answer: null,
+  request: null,
   sentence,
   refused: false,
 });
@@ -59,11 +62,11 @@ export function liveCurve({ calculation, rule, standards, spectra }: LiveInput):
   if (read.refusals[0]) return nothing(read.refusals[0].message);
   const kept = { standards: read.standards, places };
   try {
-    const answer = calculateStandardCurve(curveRequest(fields.data, read.standards));
-    return { ...kept, answer, sentence: '', refused: false };
+    const request = curveRequest(fields.data, read.standards);
+    return { ...kept, answer: calculateStandardCurve(request), request, sentence: '', refused: false };
   } catch (error) {
     if (!(error instanceof EngineError)) throw error;
-    return { ...kept, answer: null, sentence: refusalWords(error), refused: true };
+    return { ...kept, answer: null, request: null, sentence: refusalWords(error), refused: true };
   }
 }
 

@@ -139,6 +139,22 @@ test('the table is copied with the decimal mark asked for and downloaded as CSV'
   await expect(page.getByText('exported').first()).toBeVisible();
 });
 
+test('models are compared by what they do to the results, and limits stand on one ruler', async ({
+  page,
+}) => {
+  await batchWithSamples(page, 'Models and limits of July');
+  await page.getByRole('link', { name: 'Models and limits' }).click();
+  await expect(page.getByRole('heading', { level: 1, name: 'Models and limits' })).toBeVisible();
+  const models = page.getByRole('table', { name: 'Models and weightings' });
+  await expect(models.getByRole('row').nth(1)).toContainText('line, unweighted');
+  await expect(models.getByRole('row').nth(1)).toContainText('in use');
+  await expect(models.getByRole('columnheader', { name: /^Weir 3/ })).toBeVisible();
+  const limits = page.getByRole('table', { name: 'Limits on one ruler' });
+  await expect(limits.getByRole('rowheader', { name: /^ISO 11843-2 critical value/ })).toBeVisible();
+  await expect(limits.getByRole('rowheader', { name: 'Results of this batch' })).toBeVisible();
+  expect(await seriousFindings(page)).toEqual([]);
+});
+
 test('a determination opens to its working; a reading is corrected with a reason and the old one stays', async ({
   page,
 }) => {
@@ -149,6 +165,8 @@ test('a determination opens to its working; a reading is corrected with a reason
   await expect(page.getByText('y0 = (0.4021 + 0.4013) / 2')).toBeVisible();
   await expect(page.getByText('F = (100 / 10)')).toBeVisible();
   await expect(page.getByRole('table', { name: 'Uncertainty budget' }).getByRole('row')).toHaveCount(3);
+  await page.getByRole('button', { name: 'Draw 100000 trials' }).click();
+  await expect(page.getByText(/^100000 trials\. /)).toBeVisible();
   expect(await seriousFindings(page)).toEqual([]);
 
   await page.getByRole('button', { name: 'Correct reading 1' }).click();

@@ -123,6 +123,9 @@ test('a pasted block, a standard and a reading left out with reasons, a new vers
 
   await page.getByRole('button', { name: 'Leave out S5, or a reading of it' }).click();
   const dialog = page.getByRole('dialog');
+  await expect(
+    dialog.getByText(/^Without it the slope is .* The curve would cover 0\.5 to 3 mg\/L only\.$/),
+  ).toBeVisible();
   await dialog.getByRole('button', { name: 'Leave it out' }).click();
   await expect(dialog.getByText('Say why it is left out')).toBeVisible();
   await dialog.getByLabel('Why').fill('flask overfilled');

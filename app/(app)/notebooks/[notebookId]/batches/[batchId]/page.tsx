@@ -34,7 +34,7 @@ export default async function BatchPage({ params }: PageProps<'/notebooks/[noteb
         title={batch.title}
         status={<BatchStatus batch={batch} />}
         lead={batch.note}
-        actions={works && <BatchActions batch={batch} here={here} />}
+        actions={<BatchActions batch={batch} here={here} works={works} />}
       />
       <StatusNotice batch={batch} base={base} />
       <HazardNotice note={batch.method.hazardNote} />
@@ -57,9 +57,14 @@ function BatchStatus({ batch }: { batch: BatchView }) {
   );
 }
 
-function BatchActions({ batch, here }: { batch: BatchView; here: string }) {
+function BatchActions({ batch, here, works }: { batch: BatchView; here: string; works: boolean }) {
+  const compare = batch.determinations.length > 0 && (
+    <LinkButton href={`${here}/compare`}>Models and limits</LinkButton>
+  );
+  if (!works) return compare;
   return (
     <>
+      {compare}
       <VoidBatch batchId={batch.id} title={batch.title} />
       {batch.determinations.length > 0 && (
         <LinkButton href={`${here}/version`}>Read on another curve</LinkButton>

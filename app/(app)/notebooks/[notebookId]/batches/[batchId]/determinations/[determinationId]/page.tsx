@@ -4,6 +4,7 @@ import { BudgetTable } from '@/components/batch/budget-table';
 import { ChangeHistory } from '@/components/batch/change-history';
 import { DeterminationFacts } from '@/components/batch/determination-facts';
 import { CurveNotice, DriftNotice, HazardNotice } from '@/components/batch/batch-notices';
+import { MonteCarloCard } from '@/components/batch/monte-carlo-card';
 import { ReadingsCard } from '@/components/batch/readings-card';
 import { PlaceOnCurve } from '@/components/charts/place-on-curve';
 import { FlagList } from '@/components/flags/flag-list';
@@ -19,6 +20,7 @@ import { loadBatchHead } from '@/db/queries/batches';
 import { loadCurve } from '@/db/queries/curves';
 import { loadDetermination } from '@/db/queries/determinations';
 import { meaningOf } from '@/lib/batch/meaning';
+import { requestWith } from '@/lib/batch/unknown-request';
 import { readingText, SIGNAL_SYMBOL } from '@/lib/batch/reading-text';
 import type { DeterminationView } from '@/lib/views/determination';
 import { requireActor } from '@/app/_server/current-actor';
@@ -121,6 +123,9 @@ export default async function DeterminationPage({
         />
         {result.concentration && <BudgetTable budget={result.budget} unit={method.unit} />}
       </Columns>
+      {result.concentration && (
+        <MonteCarloCard request={requestWith(curve.request, [determination])} unit={method.unit} />
+      )}
       <Card title="Show the working" aside={`engine ${determination.engineVersion}`}>
         <Disclosure summary="Every step from the readings to the report, with these numbers">
           <WorkingList steps={result.working} prefix="result" behind={curve.result.curve.working} />

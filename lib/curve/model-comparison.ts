@@ -1,0 +1,66 @@
+import type { Model, ModelUnder, UnknownUnder, Weighting } from '@/lib/engine';
+
+/** A model under a weighting as a row of the comparison. */
+export interface ComparedModel {
+  readonly words: string;
+  readonly inUse: boolean;
+  readonly residualSd: number;
+  readonly relativeStandardErrorPercent: number | null;
+  readonly unknowns: readonly UnknownUnder[];
+  /** The largest change it makes, in standard uncertainties of the result in use, and of which sample. */
+  readonly largestChangeInU: number | null;
+  readonly largestOf: string | null;
+}
+
+export interface ModelComparison {
+  readonly rows: readonly ComparedModel[];
+  readonly refused: readonly { readonly words: string; readonly reason: string }[];
+  /** Samples of the columns. */
+  readonly names: readonly string[];
+}
+
+const MODEL_WORDS: Readonly<Record<Model, string>> = {
+  linear: 'line',
+  proportional: 'line through zero',
+  quadratic: 'quadratic',
+};
+const WEIGHTING_WORDS: Readonly<Record<Weighting, string>> = {
+  none: 'unweighted',
+  '1/x': '1/x',
+  '1/x2': '1/x²',
+  '1/y': '1/y',
+  '1/y2': '1/y²',
+  varianceFunction: 'by its variance function',
+  replicates: 'by its replicates',
+  given: 'given weights',
+};
+
+export const modelWords = (model: Model, weighting: Weighting) =>
+  `${MODEL_WORDS[model]}, ${WEIGHTING_WORDS[weighting]}`;
+
+function largestChange(unknowns: readonly UnknownUnder[]) {
+  const changes = unknowns.flatMap(({ name, changeInU }) =>
+    changeInU === null ? [] : [{ name, changeInU }],
+  );
+  const [first, ...others] = changes;
+  if (!first) return { largestChangeInU: null, largestOf: null };
+  const worst = others.reduce((a, b) => (Math.abs(b.changeInU) > Math.abs(a.changeInU) ? b : a), first);
+  return { largestChangeInU: worst.changeInU, largestOf: worst.changeInU === 0 ? null : worst.name };
+}
+
+/** What was compared and what could not be, as the table shows it: the one in use first. */
+export function modelComparison(models: readonly ModelUnder[]): ModelComparison {
+  const rows: ComparedModel[] = [];
+  const refused: { words: string; reason: string }[] = [];
+  for (const one of models) {
+    const words = modelWords(one.model, one.weighting);
+    if (one.reason !== undefined) refused.push({ words, reason: one.reason });
+    else {
+      const { inUse, residualSd, relativeStandardErrorPercent, unknowns } = one;
+      const row = { words, inUse, residualSd, relativeStandardErrorPercent, unknowns };
+      rows.push({ ...row, ...largestChange(unknowns) });
+    }
+  }
+  rows.sort((a, b) => Number(b.inUse) - Number(a.inUse));
+  return { rows, refused, names: rows[0]?.unknowns.map(({ name }) => name) ?? [] };
+}
