@@ -5,12 +5,12 @@ import type { FitData } from '@/lib/engine/regression/fit';
 import { fitLine } from '@/lib/engine/regression/fit-line';
 import { fitQuadratic } from '@/lib/engine/regression/fit-quadratic';
 import { householder } from '@/lib/engine/regression/qr';
-import { type Measured, measure, report } from './measure';
+import { type Measured, measure, measureInTurn, report } from './measure';
 
 const LEVELS = [0, 0.1, 0.25, 0.5, 1, 2, 4];
 
 /** A curve of 14 points; `round` makes every one another, so that no quantile or text is met twice in its p. */
-export function curveRequest(unknowns: number, round = 0): CurveRequest {
+function curveRequest(unknowns: number, round = 0): CurveRequest {
   const at = (concentration: number) => 0.0043 + 0.198 * concentration + 1e-6 * (round % 997);
   return {
     signal: 'absorbance',
@@ -34,27 +34,27 @@ export function curveRequest(unknowns: number, round = 0): CurveRequest {
 }
 
 /** A line of n points with a little wave on it. */
-export function lineOf(n: number, shift = 0): FitData {
+function lineOf(n: number, shift = 0): FitData {
   const x = Array.from({ length: n }, (_, i) => (10 * i) / n);
   return { x, y: x.map((value, i) => 0.01 + 0.2 * value + 1e-3 * Math.sin(i + shift)), w: x.map(() => 1) };
 }
 
 /** The least a straight line can cost: means in one pass, sums about them in the next. */
-export function bareTwoPasses({ x, y }: FitData): number {
+function bareTwoPasses({ x, y }: FitData): number {
   const n = x.length;
   let sumX = 0;
   let sumY = 0;
   for (let i = 0; i < n; i += 1) {
-    sumX += x[i] ?? 0;
-    sumY += y[i] ?? 0;
+    sumX += x[i] as number;
+    sumY += y[i] as number;
   }
   const [meanX, meanY] = [sumX / n, sumY / n];
   let sxx = 0;
   let sxy = 0;
   for (let i = 0; i < n; i += 1) {
-    const dx = (x[i] ?? 0) - meanX;
+    const dx = (x[i] as number) - meanX;
     sxx += dx * dx;
-    sxy += dx * ((y[i] ?? 0) - meanY);
+    sxy += dx * ((y[i] as number) - meanY);
   }
   return sxy / sxx;
 }
@@ -75,11 +75,11 @@ export function benchEngine(reference: Measured): void {
     reference,
   );
   const long = lineOf(10_000);
-  const bare = measure('the bare two-pass loop over the same arrays', () => bareTwoPasses(long), many);
-  report(
-    measure('a straight line through 10,000 points', () => fitLine(long), many),
-    bare,
-  );
+  const [line, bare] = measureInTurn([
+    ['a straight line through 10,000 points', () => fitLine(long)],
+    ['the bare two-pass loop over the same arrays', () => bareTwoPasses(long)],
+  ]);
+  if (line && bare) report(line, bare);
   report(
     measure(
       'curve of 14 points with all its judgements',

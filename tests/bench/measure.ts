@@ -10,8 +10,28 @@ export function measure(name: string, work: () => unknown, { runs = 15, warmUp =
     const start = performance.now();
     work();
     return performance.now() - start;
-  }).sort((a, b) => a - b);
-  return { name, medianMs: times[Math.floor(times.length / 2)] ?? NaN };
+  });
+  return { name, medianMs: medianOf(times) };
+}
+
+/** Two works timed in turn, so that a busy machine slows both alike: for ratios of short ones. */
+export function measureInTurn(
+  works: readonly (readonly [string, () => unknown])[],
+  runs = 2000,
+): readonly Measured[] {
+  const times = works.map(() => [] as number[]);
+  for (let k = 0; k < runs; k += 1) {
+    works.forEach(([, work], i) => {
+      const start = performance.now();
+      work();
+      times[i]?.push(performance.now() - start);
+    });
+  }
+  return works.map(([name], i) => ({ name, medianMs: medianOf(times[i] ?? []) }));
+}
+
+function medianOf(times: readonly number[]): number {
+  return [...times].sort((a, b) => a - b)[Math.floor(times.length / 2)] ?? NaN;
 }
 
 /** Print a figure beside the reference loop of the same run: the ratio is what travels between machines. */
