@@ -25,6 +25,7 @@ export const ENGINE_ERRORS = {
   BRACKET_REVERSED: 'a bracket whose standards are not in ascending order',
   UNKNOWN_MISSING: 'a position that has no unknown',
   TRIALS_OUT_OF_RANGE: 'a number of trials that no run is made with',
+  SERIES_BROKEN: 'a solution of a series made from one that does not stand before it',
   VOLUME_U_TWICE: 'the uncertainty of a volume given both as a number and as ware',
   BLANK_LEVEL_THROUGH_ZERO: 'a blank level in a line through zero',
   BLANK_PATH_MISSING: 'a reading to be blanked without a blank reading of the same path length',

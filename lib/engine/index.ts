@@ -3,6 +3,16 @@ export { absorbanceOf, transmittanceOf, type Absorbance, type CensorReason } fro
 export { compareModels } from './comparison/compare-models';
 export { effectOfLeavingOut } from './comparison/leave-out';
 export { curveBand, type BandPoint } from './curve-band';
+export {
+  prepareSeries,
+  type PreparedSeries,
+  type PreparedStandard,
+  type SeriesRequest,
+  type SeriesSolution,
+  STOCK,
+} from './dilution/series';
+export { type Stock, type StockRequest, stockSolution } from './dilution/stock';
+export { WARE, type WareItem, type WareKind, wareLibrary, wareOf } from './dilution/ware';
 export { resultFromBracketing } from './direct/bracketing';
 export { resultFromKnownAbsorptivity } from './direct/known-absorptivity';
 export { resultFromSingleStandard } from './direct/single-standard';
@@ -39,6 +49,7 @@ export {
   type SpectrumPoints,
   type SpectrumReading,
 } from './spectrum/read-spectrum';
+export { estimateFromWing, type WingEstimate, type WingRequest } from './spectrum/wing-estimate';
 export { calculateStandardCurve } from './standard-curve';
 export {
   CONCENTRATION_UNIT_NAMES,

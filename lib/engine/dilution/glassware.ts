@@ -42,7 +42,7 @@ function distinct(ways: readonly Made[]): readonly Made[] {
   const sorted = [...ways].sort(
     (a, b) => compare(a.factor, b.factor) || a.by.length - b.by.length || smallest(b) - smallest(a),
   );
-  return sorted.filter((way, i) => i === 0 || compare(way.factor, sorted[i - 1]?.factor ?? 0) !== 0);
+  return sorted.filter((way, i) => i === 0 || compare(way.factor, (sorted[i - 1] as Made).factor) !== 0);
 }
 
 function compare(a: number, b: number): number {

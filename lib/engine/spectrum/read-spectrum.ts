@@ -70,7 +70,7 @@ function finish(main: PartReading, value: number | null, reason: string | undefi
   };
 }
 
-function checkSpectrum({ wavelengthNm, absorbance }: SpectrumPoints): void {
+export function checkSpectrum({ wavelengthNm, absorbance }: SpectrumPoints): void {
   if (wavelengthNm.length === 0) {
     throw new EngineError('SPECTRUM_EMPTY', 'readSpectrum needs at least one point, got 0');
   }

@@ -163,6 +163,7 @@ describe('a request that cannot be calculated', () => {
     'BRACKET_REVERSED',
     'UNKNOWN_MISSING',
     'TRIALS_OUT_OF_RANGE',
+    'SERIES_BROKEN',
   ];
   test('every error code of the catalogue has a case here, with the spectra or without a curve', () => {
     const met = new Set(REFUSALS.map(([code]) => code));
