@@ -5,7 +5,6 @@ import {
   meanDependencies,
   medianDependencies,
   stdDependencies,
-  varianceDependencies,
 } from 'mathjs/number';
 
 /*
@@ -21,11 +20,10 @@ import {
  * - Sums of weighted fits (regression/fit.ts): mathjs has no weighted sums, and its typed functions cost 3 to 8 µs a
  *   call, as much as a whole fit of 12 points.
  */
-export const { log10, mean, median, std, variance } = create({
+export const { log10, mean, median, std } = create({
   log10Dependencies,
   meanDependencies,
   medianDependencies,
   stdDependencies,
-  varianceDependencies,
   // The package types each member as perhaps missing, which create() then does not take.
 } as FactoryFunctionMap);
