@@ -1,4 +1,4 @@
-import type { ReactNode } from 'react';
+import type { ComponentProps, ReactNode } from 'react';
 import { DemoBanner } from '@/components/frame/demo-banner';
 import { PageFooter } from '@/components/frame/page-footer';
 import { PlainPage } from '@/components/frame/plain-page';
@@ -7,16 +7,16 @@ import { laboratory } from '@/db/entry/settings';
 /** A page that needs no account; in a demonstration it says so like every other. */
 export async function PublicPage({
   title,
-  wide,
+  width,
   children,
 }: {
   title: ReactNode;
-  wide?: boolean;
+  width?: ComponentProps<typeof PlainPage>['width'];
   children: ReactNode;
 }) {
   const lab = await laboratory();
   return (
-    <PlainPage title={title} wide={wide} banner={lab?.demo && <DemoBanner />} footer={<PageFooter />}>
+    <PlainPage title={title} width={width} banner={lab?.demo && <DemoBanner />} footer={<PageFooter />}>
       {children}
     </PlainPage>
   );

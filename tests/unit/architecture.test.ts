@@ -1,6 +1,11 @@
 import { readdirSync } from 'node:fs';
+import path from 'node:path';
 import { ESLint } from 'eslint';
 import { describe, expect, test } from 'vitest';
+import { CADMIUM, FLUORESCEIN, THERMOMETER, WEIGHTED } from '@/lib/checks/data/lines';
+import { NOINT1, NORRIS, PONTIUS } from '@/lib/checks/data/nist-strd';
+import { printedDigits } from '@/lib/checks/digits';
+import { publishedChecks } from '@/lib/checks/published-checks';
 import { projectRoot, sourceFiles, sourceText as source } from '../support/sources';
 
 /** Lines that export a value; types and interfaces may be exported anywhere. */
@@ -77,6 +82,9 @@ describe('import arrows', () => {
     ['lib/planted.ts', "import 'node:fs';"],
     ['lib/engine/planted.ts', "import { z } from 'zod'; export const x = z;"],
     ['lib/engine/planted.ts', "import '@/lib/errors';"],
+    ['lib/checks/planted.ts', "import '@/lib/schemas/decimal';"],
+    ['lib/checks/planted.ts', "import '@/lib/format/round';"],
+    ['lib/checks/sources/planted.ts', "import '../../format/round';"],
     ['components/planted.tsx', "import '@/db/queries/notebooks';"],
     ['components/planted.tsx', "import '@/app/_server/route';"],
     ['components/ui/planted.tsx', "import '@/lib/engine';"],
@@ -94,6 +102,32 @@ describe('import arrows', () => {
     ['lib/engine/planted.ts', 'export const f = () => new Date();'],
   ])('%s may not say %s', async (file, code) => {
     expect(await lint(file, code)).toContain('no-restricted-syntax');
+  });
+});
+
+describe('the engine knows no expected answer', () => {
+  const engine = sourceFiles(['lib/engine'], /\.ts$/);
+
+  test.each(engine)('%s imports only the engine, packages and the round-off', (file) => {
+    const imports = [...source(file).matchAll(/(?:from|import|import\()\s*'(\.[^']*)'/g)];
+    const outside = imports
+      .map(([, to = '']) => path.posix.join(path.posix.dirname(file), to))
+      .filter((to) => !to.startsWith('lib/engine/') && to !== 'lib/format/round');
+    expect(outside).toEqual([]);
+    expect(source(file)).not.toMatch(/'@\/|fixtures\/reference.*'|\.json'/);
+  });
+
+  test('holds neither the published values nor their data', () => {
+    const printed = publishedChecks()
+      .flatMap(({ checks }) => checks)
+      .map(({ published }) => published.replace(/^-|E.*$/g, ''))
+      .filter((text) => printedDigits(text) >= 5);
+    const data = [CADMIUM, FLUORESCEIN, THERMOMETER, WEIGHTED, NORRIS, PONTIUS, NOINT1].map(({ y }) =>
+      y.slice(2, 6).join(', '),
+    );
+    expect(printed.length).toBeGreaterThan(25);
+    const held = engine.filter((file) => [...printed, ...data].some((text) => source(file).includes(text)));
+    expect(held).toEqual([]);
   });
 });
 

@@ -15,7 +15,7 @@ export const metadata: Metadata = { title: 'Before you begin' };
 export default async function WelcomePage() {
   const { name, welcomed } = await orNotFound(account(await requireActor()));
   return (
-    <PublicPage title="Before you begin" wide>
+    <PublicPage title="Before you begin" width="text">
       <p>
         Welcome, {name}. Please read once what this notebook is not. It stands under Cautions at the foot of
         every page.

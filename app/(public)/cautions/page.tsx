@@ -8,7 +8,7 @@ export const metadata: Metadata = { title: 'Cautions' };
 
 export default function CautionsPage() {
   return (
-    <PublicPage title="Cautions" wide>
+    <PublicPage title="Cautions" width="text">
       <p className="text-ink-2">What Halflight is not, and what comes before it.</p>
       <CautionList cautions={CAUTIONS} />
       <div>
