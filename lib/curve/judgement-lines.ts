@@ -78,6 +78,15 @@ function ofTest(key: keyof CurveResult['tests'], test: TestAnswer | undefined): 
   return [{ key, name: TEST_NAMES[key], tone: test.passed ? 'order' : 'decide', sentence: test.verdict }];
 }
 
+/** A free intercept may differ from zero; a line through zero may not have one. */
+function intercept({ tests, model }: CurveResult): JudgementLine[] {
+  return ofTest('intercept', tests.intercept).map((line) =>
+    line.tone === 'order' || model === 'proportional'
+      ? line
+      : { ...line, tone: 'plain', sentence: `${line.sentence} A line through zero would not do here.` },
+  );
+}
+
 function interceptSize({ judgements }: CurveResult): JudgementLine[] {
   const size = judgements?.interceptSize;
   if (!size) return [];
@@ -139,7 +148,7 @@ export function judgementLines(curve: CurveResult): readonly JudgementLine[] {
     ...residuals(curve),
     ...ofTest('lackOfFit', tests.lackOfFit),
     ...ofTest('mandel', tests.mandel),
-    ...ofTest('intercept', tests.intercept),
+    ...intercept(curve),
     ...interceptSize(curve),
     range(curve),
     ...ofTest('homogeneity', tests.homogeneity),

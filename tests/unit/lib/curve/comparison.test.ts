@@ -77,3 +77,11 @@ describe('limitScale', () => {
     expect(limitScale([1e-6, 1e3]).ticks.every((tick) => Number.isInteger(Math.log10(tick)))).toBe(true);
   });
 });
+
+test('a reading above the absorbance limit makes no number in the comparison', () => {
+  const over = request({ unknowns: [unknown([0.5021]), unknown([2.6], { name: 'too strong' })] });
+  const { rows, names } = modelComparison(compareModels(over));
+  expect(names).toEqual(['unknown 1', 'too strong']);
+  expect(rows.map(({ unknowns }) => unknowns[1])).toEqual(rows.map(() => null));
+  expect(rows.some(({ largestOf }) => largestOf === 'too strong')).toBe(false);
+});
