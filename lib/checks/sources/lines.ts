@@ -1,5 +1,5 @@
 import { volumeUncertainty } from '@/lib/engine';
-import { CADMIUM, FLUORESCEIN, THERMOMETER, WEIGHTED } from '../data/lines';
+import { CADMIUM, FLUORESCEIN, THERMOMETER, WEIGHTED } from '../datasets/lines';
 import { lineOf, readBack } from '../line-of';
 import { type CheckRow, type CheckSource, sourceOf } from '../types';
 

@@ -1,5 +1,5 @@
 import type { CurveResult, Model } from '@/lib/engine';
-import { NOINT1, NOINT2, NORRIS, PONTIUS } from '../data/nist-strd';
+import { NOINT1, NOINT2, NORRIS, PONTIUS } from '../datasets/nist-strd';
 import { lineOf, type PublishedLine } from '../line-of';
 import { type CheckRow, type CheckSource, sourceOf } from '../types';
 

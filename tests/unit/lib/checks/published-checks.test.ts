@@ -1,6 +1,6 @@
 import { describe, expect, test, vi } from 'vitest';
-import * as lines from '@/lib/checks/data/lines';
-import * as strd from '@/lib/checks/data/nist-strd';
+import * as lines from '@/lib/checks/datasets/lines';
+import * as strd from '@/lib/checks/datasets/nist-strd';
 import { agreement, agrees, printedDigits } from '@/lib/checks/digits';
 import { publishedChecks } from '@/lib/checks/published-checks';
 import { runSource, tally, verdictOf } from '@/lib/checks/run-checks';
