@@ -91,7 +91,7 @@ export function calculateUnknown(
     ...(scaling.recovery ? { recovery: scaling.recovery } : {}),
     concentration: quantified ? concentrationOf(budget, curve.request.unit) : null,
     computed: budget?.value ?? null,
-    fieller: quantified && back ? fiellerOf(curve, readings.meanY ?? NaN, back, scaling) : null,
+    fieller: quantified && back ? fiellerOf(curve, readings.meanY as number, back, scaling) : null,
     criticalValue: critical.value,
     budget: budget?.lines ?? [],
     reportCase: kind,

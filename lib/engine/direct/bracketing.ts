@@ -1,9 +1,8 @@
 import { requireFinite, requireReadings } from '../checks/require';
 import { EngineError } from '../errors';
-import { parseUnit } from '../units';
 import { sharedByStandards } from '../unknown/budget';
 import { calculateDirect } from './calculate-direct';
-import { checkDirect } from './check-direct';
+import { acceptDirect } from './check-direct';
 import { directBlanks } from './direct-blanks';
 import type { DirectMethod, MethodError } from './method';
 import { judgeStandard } from './single-standard';
@@ -20,7 +19,7 @@ import type { BracketingRequest, DirectAnswer } from './types';
  * @throws EngineError BRACKET_REVERSED, STANDARD_WITHOUT_NUMBER, ZERO_SLOPE and those of any unknown
  */
 export function resultFromBracketing(asked: BracketingRequest): DirectAnswer {
-  const request = { ...asked, unit: parseUnit(asked.unit) ?? asked.unit };
+  const request = acceptDirect(asked);
   for (const end of ['low', 'high'] as const) {
     requireFinite(request[end].concentration, 'the concentration of a standard', `/${end}/concentration`);
     requireReadings(request[end].readings, 'a standard', `/${end}/readings`);
@@ -32,7 +31,6 @@ export function resultFromBracketing(asked: BracketingRequest): DirectAnswer {
       '/high/concentration',
     );
   }
-  checkDirect(request);
   return calculateDirect(bracketingMethod(request));
 }
 

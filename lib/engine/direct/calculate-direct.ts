@@ -13,7 +13,7 @@ import { recordDirect, recordMethod } from '../working/record-direct';
 import { blankMean, knownSd } from './direct-blanks';
 import { directBudget } from './direct-budget';
 import { judgeBlanks, judgeDirect } from './judge-direct';
-import { meanReading } from './mean-reading';
+import { type MeanReading, meanReading } from './mean-reading';
 import type { DirectMethod } from './method';
 import type { DirectAnswer, DirectRequest, DirectResult } from './types';
 
@@ -100,7 +100,7 @@ function criticalValueOf(method: DirectMethod, pathLengthMm: number, K: number):
   const blank = blankMean(request, measuring.blanks, pathLengthMm);
   const sd = request.readingSd ?? blank?.sd ?? null;
   if (sd === null) return null;
-  const nu = request.readingSd === undefined ? (blank?.degreesOfFreedom ?? Infinity) : Infinity;
+  const nu = request.readingSd === undefined ? (blank as MeanReading).degreesOfFreedom : Infinity;
   const count = measuring.blanks.countAt(pathLengthMm);
   const perMm = NORMAL_PATH_MM / pathLengthMm;
   const spread = sd * perMm * Math.sqrt(1 / K + (count === 0 ? 0 : 1 / count));

@@ -1,14 +1,24 @@
 import { checkRecovery, checkUnknown } from '../checks/check-unknown';
 import { checkConfidence, checkGlassware, checkShared } from '../checks/check-request';
 import { requireChoice, requireNotNegative, requirePositive, requireReadings } from '../checks/require';
-import { CONCENTRATION_UNIT_NAMES } from '../units';
+import { CONCENTRATION_UNIT_NAMES, parseUnit } from '../units';
 import type { DirectRequest } from './types';
 import type { CurveRequest } from '../types';
 
 type Common = DirectRequest & Pick<CurveRequest, 'standardsRelativeU' | 'standardsShared'>;
 
-/** Refuse what no method without a curve can be calculated with. */
-export function checkDirect(request: Common): void {
+/**
+ * The request with its unit as we write it, once it has passed the checks of every method without a curve.
+ *
+ * @throws EngineError as on a curve, with JSON pointers
+ */
+export function acceptDirect<R extends Common>(asked: R): R {
+  const request = { ...asked, unit: parseUnit(asked.unit) ?? asked.unit };
+  checkDirect(request);
+  return request;
+}
+
+function checkDirect(request: Common): void {
   requireChoice(
     request.signal,
     ['absorbance', 'transmittance', 'percentTransmittance'],

@@ -81,14 +81,13 @@ function ofTheBlanks({ method, readings, read, scaling }: DirectFacts): readonly
   const { request, measuring } = method;
   const paths = [...new Set(measuring.blanks.readings.map((blank) => blank.pathLengthMm))];
   return paths.map((pathLengthMm): BudgetTerm => {
-    const blank = blankMean(request, measuring.blanks, pathLengthMm);
+    const { u: inputU, degreesOfFreedom } = blankMean(request, measuring.blanks, pathLengthMm) as MeanReading;
     const moved = [
       { pathLengthMm: readings.pathLengthMm, sensitivity: read.perAbsorbance },
       ...read.errors,
     ].filter((item) => item.pathLengthMm === pathLengthMm);
     const sum = moved.reduce((total, item) => total + item.sensitivity, 0);
     const sensitivity = (-sum * NORMAL_PATH_MM * scaling.value) / pathLengthMm;
-    const inputU = blank?.u ?? 0;
     return {
       source: paths.length === 1 ? 'blank' : `blank at ${pathLengthMm} mm`,
       u: Math.abs(sensitivity) * inputU,
@@ -96,7 +95,7 @@ function ofTheBlanks({ method, readings, read, scaling }: DirectFacts): readonly
       inputUnit: '',
       sensitivity,
       sharesS: false,
-      degreesOfFreedom: blank?.degreesOfFreedom ?? Infinity,
+      degreesOfFreedom,
       working: {
         how: 'u of the mean blank through every reading of its path',
         inputs: [blankLineId(pathLengthMm), 'unknown.measured', 'unknown.factor'],
@@ -107,7 +106,7 @@ function ofTheBlanks({ method, readings, read, scaling }: DirectFacts): readonly
 
 /** The path divides a result by a known absorptivity; between standards and unknowns in one cell it cancels. */
 function ofThePath(facts: DirectFacts, result: Scale): readonly BudgetTerm[] {
-  const { method, unknown, readings, read, scaling } = facts;
+  const { method, unknown, readings, mean, read, scaling } = facts;
   const { request, pathCancels } = method;
   if (!pathCancels) {
     const path: Quantity = {
@@ -125,7 +124,7 @@ function ofThePath(facts: DirectFacts, result: Scale): readonly BudgetTerm[] {
   if (!isOtherCell({ request }, unknown)) return [];
   const scale: Scale = {
     of: 'reading',
-    value: readings.meanY === null ? 0 : readings.meanY * read.perAbsorbance * scaling.value,
+    value: mean.mean * read.perAbsorbance * scaling.value,
     expression: scaleText(`(y0 * ${read.perExpression})`, scaling),
     from: { ...read.from, ...scaling.from, y0: 'unknown.mean' },
   };

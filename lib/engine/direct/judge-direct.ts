@@ -34,19 +34,17 @@ function judgePlace({ method, readings, read, reportCase, critical, advice }: Di
   if (!read || reportCase === 'notQuantified') return [];
   const { unit } = method.request;
   const { range } = method.measuring;
+  const detail = `${advice}.`;
   const value = read.c;
   const own = method.judge(readings, value);
   switch (reportCase) {
     case 'aboveTopStandard':
-      return [
-        flag('OVER_TOP_STANDARD', { value, limit: range.max, unit, detail: `${advice ?? ''}.` }),
-        ...own,
-      ];
+      return [flag('OVER_TOP_STANDARD', { value, limit: range.max, unit, detail }), ...own];
     case 'belowLowestStandard':
       return [flag('UNDER_LOWEST_STANDARD', { value, limit: range.min, unit }), ...own];
     case 'belowCriticalValue':
       return critical === null
-        ? [flag('READING_NEGATIVE', { value: readings.meanY ?? NaN, limit: 0 })]
+        ? [flag('READING_NEGATIVE', { value: readings.meanY as number, limit: 0 })]
         : [flag('NOT_DETECTED', { value, limit: critical, unit })];
     case 'value':
       return own;
@@ -72,8 +70,8 @@ export function judgeApart({ apart }: MeanReading, of = ''): readonly Flag[] {
 export function judgeBlanks({ request, measuring }: DirectMethod): readonly Flag[] {
   const paths = new Set(measuring.blanks.readings.map((blank) => blank.pathLengthMm));
   return [...paths].flatMap((pathLengthMm) => {
-    const blank = blankMean(request, measuring.blanks, pathLengthMm);
-    return blank ? judgeApart(blank, `These are the blanks at ${pathLengthMm} mm. `) : [];
+    const blank = blankMean(request, measuring.blanks, pathLengthMm) as MeanReading;
+    return judgeApart(blank, `These are the blanks at ${pathLengthMm} mm. `);
   });
 }
 

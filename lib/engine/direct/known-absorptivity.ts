@@ -1,9 +1,9 @@
 import { EngineError } from '../errors';
 import { type Flag, flag } from '../flags';
 import { requireChoice, requireNotNegative, requirePositive } from '../checks/require';
-import { CONCENTRATION_UNITS, isMolar, parseUnit } from '../units';
+import { CONCENTRATION_UNITS, isMolar } from '../units';
 import { calculateDirect } from './calculate-direct';
-import { checkDirect } from './check-direct';
+import { acceptDirect } from './check-direct';
 import { directBlanks } from './direct-blanks';
 import type { DirectMethod } from './method';
 import type { AbsorptivityKind, DirectAnswer, KnownAbsorptivityRequest } from './types';
@@ -26,9 +26,8 @@ const KINDS = {
  * @source Beer-Lambert law; E(1 %, 1 cm) as in Ph. Eur. 2.2.25
  */
 export function resultFromKnownAbsorptivity(asked: KnownAbsorptivityRequest): DirectAnswer {
-  const request = { ...asked, unit: parseUnit(asked.unit) ?? asked.unit };
+  const request = acceptDirect(asked);
   checkAbsorptivity(request);
-  checkDirect(request);
   return calculateDirect(absorptivityMethod(request));
 }
 

@@ -1,11 +1,10 @@
 import { requireNotNegative, requirePositive, requireReadings } from '../checks/require';
 import { EngineError } from '../errors';
 import { type Flag, flag } from '../flags';
-import { parseUnit } from '../units';
 import { sharedByStandards } from '../unknown/budget';
 import { mean } from '../unknown/convert-readings';
 import { calculateDirect } from './calculate-direct';
-import { checkDirect } from './check-direct';
+import { acceptDirect } from './check-direct';
 import { directBlanks } from './direct-blanks';
 import { judgeApart } from './judge-direct';
 import type { DirectMethod } from './method';
@@ -26,7 +25,7 @@ const FAR = 2;
  * @throws EngineError STANDARD_WITHOUT_NUMBER, ZERO_SLOPE and those of any unknown
  */
 export function resultFromSingleStandard(asked: SingleStandardRequest): DirectAnswer {
-  const request = { ...asked, unit: parseUnit(asked.unit) ?? asked.unit };
+  const request = acceptDirect(asked);
   const { concentration, readings } = request.standard;
   requirePositive(
     concentration,
@@ -36,7 +35,6 @@ export function resultFromSingleStandard(asked: SingleStandardRequest): DirectAn
   );
   requireReadings(readings, 'the standard', '/standard/readings');
   requireNotNegative(request.driftLimit, 'the limit of drift', '/driftLimit');
-  checkDirect(request);
   return calculateDirect(singleStandardMethod(request));
 }
 
@@ -91,7 +89,7 @@ function singleStandardMethod(request: SingleStandardRequest): DirectMethod {
       all.record(ledger, 'method.standard', 'the standard', 'y_s');
     },
     judge: (readings) => {
-      const ratio = (readings.meanY ?? 0) / all.mean;
+      const ratio = (readings.meanY as number) / all.mean;
       return ratio > FAR || ratio < 1 / FAR ? [flag('FAR_FROM_STANDARD', { value: ratio, limit: FAR })] : [];
     },
   };

@@ -31,8 +31,8 @@ export function agreementOf(
   const tolerance = u > 0 ? 10 ** -decimalsFor(u, 1) / 2 : 0;
   const differences = [Math.abs(value - U - run.interval[0]), Math.abs(value + U - run.interval[1])] as const;
   const margins = run.intervalError.map((error) => SURE * error);
-  const far = differences.some((difference, i) => difference - (margins[i] ?? 0) > tolerance);
-  const near = differences.every((difference, i) => difference + (margins[i] ?? 0) <= tolerance);
+  const far = differences.some((difference, i) => difference - (margins[i] as number) > tolerance);
+  const near = differences.every((difference, i) => difference + (margins[i] as number) <= tolerance);
   const verdict = far ? 'differ' : near ? 'agree' : 'undecided';
   const largest = significantText(Math.max(...differences), 2);
   const allowed = significantText(tolerance, 2);

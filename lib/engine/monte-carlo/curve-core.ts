@@ -17,13 +17,9 @@ export type Core = (random: Random, readingFactor: number) => number;
 export function curveCore(curve: FittedCurve, readings: ConvertedReadings, back: ReadBack): Core {
   const { fit } = curve;
   const nu = fit.degreesOfFreedom;
-  const beta = fit.beta;
-  const factor = cholesky(fit.betaCovariance);
-  const [b0 = 0, b1 = 0, b2 = 0] = beta;
-  const [l00 = 0] = factor[0] ?? [];
-  const [l10 = 0, l11 = 0] = factor[1] ?? [];
-  const [l20 = 0, l21 = 0, l22 = 0] = factor[2] ?? [];
-  const y0 = readings.meanY ?? NaN;
+  const [b0, b1, b2 = 0] = fit.beta as readonly [number, number, number?];
+  const [[l00], [l10, l11], [l20, l21, l22] = [0, 0, 0]] = cholesky(fit.betaCovariance) as Triangle;
+  const y0 = readings.meanY as number;
   const uY0 = Math.sqrt(back.varianceY0);
   const ownNu = back.replicates.own ? readings.y.length - 1 : null;
   const blanks = blankErrors(curve, readings, back);
@@ -49,16 +45,19 @@ export function curveCore(curve: FittedCurve, readings: ConvertedReadings, back:
   };
 }
 
+/** Rows of the triangular factor of two or three coefficients. */
+type Triangle = readonly [readonly [number], readonly [number, number], (readonly [number, number, number])?];
+
 /** Lower triangular L with L Lᵀ = V; a direction without variance has a column of zeros. */
 export function cholesky(v: readonly (readonly number[])[]): readonly (readonly number[])[] {
   const l: number[][] = [];
   for (const [i, row] of v.entries()) {
     const made: number[] = [];
     for (let j = 0; j <= i; j += 1) {
-      const above = l[j] ?? made;
-      let rest = row[j] ?? 0;
-      for (let k = 0; k < j; k += 1) rest -= (made[k] ?? 0) * (above[k] ?? 0);
-      const pivot = above[j] ?? 0;
+      const above = i === j ? made : (l[j] as number[]);
+      let rest = row[j] as number;
+      for (let k = 0; k < j; k += 1) rest -= (made[k] as number) * (above[k] as number);
+      const pivot = above[j] as number;
       made.push(i === j ? Math.sqrt(Math.max(0, rest)) : pivot === 0 ? 0 : rest / pivot);
     }
     l.push(made);

@@ -70,15 +70,15 @@ function spanOf(count: number, confidence: number): number {
 function symmetricInterval(sorted: Float64Array, confidence: number): [number, number] {
   const span = spanOf(sorted.length, confidence);
   const low = Math.floor((sorted.length - span) / 2);
-  return [sorted.at(low) ?? NaN, sorted.at(low + span) ?? NaN];
+  return [sorted[low] as number, sorted[low + span] as number];
 }
 
 function shortestInterval(sorted: Float64Array, confidence: number): [number, number] {
   const span = spanOf(sorted.length, confidence);
   let best: [number, number] = symmetricInterval(sorted, confidence);
   for (let low = 0; low + span < sorted.length; low += 1) {
-    const from = sorted.at(low) ?? NaN;
-    const to = sorted.at(low + span) ?? NaN;
+    const from = sorted[low] as number;
+    const to = sorted[low + span] as number;
     if (to - from < best[1] - best[0]) best = [from, to];
   }
   return best;
@@ -95,6 +95,6 @@ function errorsOfEnds(sorted: Float64Array, confidence: number): [number, number
   const errorAt = (place: number) =>
     place < places || place + places >= sorted.length
       ? Infinity
-      : ((sorted.at(place + places) ?? NaN) - (sorted.at(place - places) ?? NaN)) / 4;
+      : ((sorted[place + places] as number) - (sorted[place - places] as number)) / 4;
   return [errorAt(low), errorAt(low + spanOf(sorted.length, confidence))];
 }

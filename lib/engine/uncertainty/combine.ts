@@ -43,9 +43,9 @@ export function combine(
 
 function components(terms: readonly BudgetTerm[]): readonly Component[] {
   const sharing = terms.filter((term) => term.sharesS);
-  const nu = sharing[0]?.degreesOfFreedom ?? Infinity;
-  return [
-    { u: Math.hypot(0, ...sharing.map((term) => term.u)), degreesOfFreedom: nu },
-    ...terms.filter((term) => !term.sharesS),
-  ];
+  const [first] = sharing;
+  const apart = terms.filter((term) => !term.sharesS);
+  if (!first) return apart;
+  const u = Math.hypot(...sharing.map((term) => term.u));
+  return [{ u, degreesOfFreedom: first.degreesOfFreedom }, ...apart];
 }

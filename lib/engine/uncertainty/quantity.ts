@@ -41,23 +41,20 @@ export function productOf(quantities: readonly Quantity[]): number {
  */
 export function errorSources(quantities: readonly Quantity[]): readonly ErrorSource[] {
   const own = quantities.map((quantity) => sourceOf(quantity.label, quantity.spreads, [quantity]));
-  const pieces = new Map<string, Quantity[]>();
-  for (const quantity of quantities) {
-    if (!quantity.shared) continue;
-    pieces.set(quantity.shared.piece, [...(pieces.get(quantity.shared.piece) ?? []), quantity]);
-  }
-  const common = [...pieces].map(([piece, moves]) =>
-    sourceOf(
-      `${piece}, ${moves.length === 1 ? 'used once' : `used ${moves.length} times`}`,
-      moves[0]?.shared?.spreads ?? [],
-      moves,
-    ),
+  const pieces = new Map(
+    quantities.flatMap(({ shared }) => (shared ? [[shared.piece, shared.spreads]] : [])),
   );
+  const common = [...pieces].map(([piece, spreads]) => {
+    const moves = quantities.filter(({ shared }) => shared?.piece === piece);
+    const times = moves.length === 1 ? 'used once' : `used ${moves.length} times`;
+    return sourceOf(`${piece}, ${times}`, spreads, moves);
+  });
   return [...own, ...common].filter((source) => source.u > 0);
 }
 
 function sourceOf(label: string, spreads: readonly Spread[], moves: readonly Quantity[]): ErrorSource {
-  return { label, unit: moves[0]?.unit ?? '', spreads, u: Math.hypot(0, ...spreads.map(spreadU)), moves };
+  const [{ unit }] = moves as [Quantity];
+  return { label, unit, spreads, u: Math.hypot(0, ...spreads.map(spreadU)), moves };
 }
 
 /** Relative sensitivity of the product to a source, per unit of its error: Σ power/x, with signs. */

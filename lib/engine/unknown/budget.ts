@@ -113,14 +113,14 @@ export function blankErrors(
   back: ReadBack,
 ): readonly BlankError[] {
   const { fit, blanks, data, active } = curve;
-  const [, slope = NaN] = fit.beta;
+  const slope = fit.beta[1] as number;
   if (fit.model !== 'proportional' || blanks.use !== 'subtract') return [];
-  const squares = data.x.reduce((sum, x, i) => sum + (data.w[i] ?? 0) * x * x, 0);
+  const wx = data.x.map((x, i) => x * (data.w[i] as number));
+  const squares = data.x.reduce((sum, x, i) => sum + x * (wx[i] as number), 0);
   const paths = [...new Set(blanks.readings.map((blank) => blank.pathLengthMm))];
   return paths.map((pathLengthMm) => {
     const lever = active.reduce(
-      (sum, point, i) =>
-        point.pathLengthMm === pathLengthMm ? sum + (data.w[i] ?? 0) * (data.x[i] ?? 0) : sum,
+      (sum, point, i) => (point.pathLengthMm === pathLengthMm ? sum + (wx[i] as number) : sum),
       0,
     );
     const direct = readings.pathLengthMm === pathLengthMm ? 1 : 0;
@@ -171,7 +171,7 @@ function ofThePaths(
   const slope = curve.fit.model === 'quadratic' ? 'unknown.slope' : 'curve.slope';
   const scale: Scale = {
     of: 'reading',
-    value: ((readings.meanY ?? 0) / back.slope) * scaling.value,
+    value: ((readings.meanY as number) / back.slope) * scaling.value,
     expression: scaleText('(y0 / b)', scaling),
     from: { y0: 'unknown.mean', b: slope, ...scaling.from },
   };

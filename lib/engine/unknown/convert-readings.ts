@@ -42,12 +42,13 @@ export function convertReadings(
   const pathLengthMm = unknown.pathLengthMm ?? request.pathLengthMm;
   const blank = blanks.meanAt(pathLengthMm, pointer);
   const used = asRead.flatMap((item, i) => (item.value === null ? [] : [i]));
-  const numbers = used.map((i) => asRead[i]?.value ?? NaN);
+  const withNumber = used.map((i) => asRead[i] as Absorbance);
+  const numbers = withNumber.map((item) => item.value as number);
   const above = asRead.some((item) => item.censored && isAboveRange(item.censored.reason));
   const state = above ? 'aboveRange' : used.length === 0 ? 'nothing' : 'numbers';
   const y = numbers.map((value) => normalise(value, blank, pathLengthMm));
-  const shown = used.map((i) => absorbanceAsRead(asRead[i] ?? { value: NaN }) ?? NaN);
-  const takenOff = used.map((i) => asRead[i]?.two?.minus ?? 0);
+  const shown = withNumber.map((item) => absorbanceAsRead(item) as number);
+  const takenOff = withNumber.map((item) => item.two?.minus ?? 0);
   return {
     asRead,
     used,

@@ -55,7 +55,7 @@ function judgePlace(facts: UnknownFacts): Flag[] {
   const { range } = curve;
   const { unit } = curve.request;
   if (readings.meanY !== null && !back) {
-    return [flag('CURVE_GIVES_NO_ROOT', { value: readings.meanY, detail: `${advice ?? ''}.` })];
+    return [flag('CURVE_GIVES_NO_ROOT', { value: readings.meanY, detail: `${advice}.` })];
   }
   const value = back?.c ?? NaN;
   switch (facts.reportCase) {
@@ -63,7 +63,7 @@ function judgePlace(facts: UnknownFacts): Flag[] {
     case 'notQuantified':
       return [];
     case 'aboveTopStandard':
-      return [flag('OVER_TOP_STANDARD', { value, limit: range.max, unit, detail: `${advice ?? ''}.` })];
+      return [flag('OVER_TOP_STANDARD', { value, limit: range.max, unit, detail: `${advice}.` })];
     case 'value':
       return value < critical ? [flag('VALUE_UNDER_CRITICAL', { value, limit: critical, unit })] : [];
     case 'belowLowestStandard':

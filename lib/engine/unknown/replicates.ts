@@ -1,4 +1,4 @@
-import { highestAsRead } from '../absorbance';
+import { type Absorbance, highestAsRead } from '../absorbance';
 import type { FittedCurve } from '../fit-curve';
 import { studentizedRangeQuantile } from '../stats/studentized-range';
 import { type ConvertedReadings, mean } from './convert-readings';
@@ -31,7 +31,7 @@ export function judgeReplicates(
 ): ReplicateJudgement {
   const { y, used, asRead } = readings;
   const p = y.length;
-  const numbers = used.map((i) => asRead[i]?.value ?? NaN);
+  const numbers = used.map((i) => (asRead[i] as Absorbance).value as number);
   const overLimit = asRead.some((item) => highestAsRead(item) > curve.request.absorbanceLimit);
   const agree = { sd: curveSd, own: false, disagree: false, range: 0, limit: 0 };
   if (p < 2 || overLimit) return agree;

@@ -40,12 +40,12 @@ export interface ReportFacts {
 export function reportText({ request, range }: Measuring, facts: ReportFacts): string {
   const { unit } = request;
   const bound = (c: number) => `${significantText(c * facts.factor, BOUND_DIGITS)} ${unit}`;
-  const measured = () => `${plusMinusText(facts.value ?? NaN, facts.expanded ?? NaN)} ${unit}`;
+  const measured = () => `${plusMinusText(facts.value as number, facts.expanded as number)} ${unit}`;
   switch (facts.reportCase) {
     case 'notQuantified':
       return facts.advice === null ? 'not quantified: read again' : `not quantified: dilute ${facts.advice}`;
     case 'aboveTopStandard':
-      return `> ${bound(range.max)}; dilute ${facts.advice ?? ''}`;
+      return `> ${bound(range.max)}; dilute ${facts.advice}`;
     case 'value':
       return measured();
     case 'belowLowestStandard':

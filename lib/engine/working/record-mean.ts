@@ -1,3 +1,4 @@
+import type { Absorbance } from '../absorbance';
 import type { UnknownRequest } from '../types';
 import { isOtherCell } from '../unknown/budget';
 import type { ConvertedReadings } from '../unknown/convert-readings';
@@ -60,11 +61,11 @@ function recordReadings(
       id: `unknown.reading.${i + 1}`,
       label: `Reading ${i + 1}`,
       reading,
-      asRead: readings.asRead[i] ?? { value: null },
+      asRead: readings.asRead[i] as Absorbance,
       pathLengthMm: readings.pathLengthMm,
       pathId: 'unknown.path',
       y: readings.y[readings.used.indexOf(i)] ?? null,
     }),
   );
-  return readings.used.map((i) => last[i] ?? '');
+  return readings.used.map((i) => last[i] as string);
 }

@@ -183,6 +183,10 @@ describe('flags of a known absorptivity', () => {
     expect(codes(result ?? { flags: [] })).toEqual(['READING_WITHOUT_U', 'PATH_WITHOUT_U']);
     expect(result?.concentration?.u).toBe(0);
     expect(result?.working.find((step) => step.id === 'unknown.u')?.value).toBe(0);
+    const { pathLengthUMm: _, ...unsaid } = ask();
+    expect(codes(resultFromKnownAbsorptivity(unsaid).unknowns[0] ?? { flags: [] })).toEqual([
+      'PATH_WITHOUT_U',
+    ]);
     // Another cell has another uncertainty, and none was given for it.
     expect(codes(read({ unknowns: [{ readings: [0.9, 0.91], pathLengthMm: 20 }] }))).toContain(
       'PATH_WITHOUT_U',

@@ -69,6 +69,13 @@ describe('a single standard', () => {
     ]);
   });
 
+  test('advises a dilution where a reading is too high', () => {
+    const { unknowns } = resultFromSingleStandard(single({ unknowns: [{ readings: [2.2] }] }));
+    expect(unknowns[0]?.report).toBe(
+      'not quantified: dilute at least 1 in 4 (1 part made up to 4), then read again',
+    );
+  });
+
   test('flags a single reading and an unknown far away', () => {
     const answer = resultFromSingleStandard(
       single({

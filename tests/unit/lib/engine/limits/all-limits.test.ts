@@ -1,5 +1,6 @@
 import { describe, expect, test } from 'vitest';
 import { allLimits, type LimitsRequest } from '@/lib/engine';
+import { below } from '@/lib/engine/errors';
 import { currieLevels } from '@/lib/engine/limits/currie';
 import { methodDetectionLimit, type MdlStudy } from '@/lib/engine/limits/mdl';
 import { expectDigits } from '../../../../support/digits';
@@ -214,6 +215,15 @@ describe('40 CFR 136', () => {
     expect(flags.map((flag) => flag.code)).toEqual(codes);
     if (codes.length > 0) expect(flags[0]?.message).not.toMatch(/undefined|NaN/);
   });
+});
+
+test('a bug below a part of the request passes as it is', () => {
+  const bug = new TypeError('a bug');
+  expect(() =>
+    below('/curve', () => {
+      throw bug;
+    }),
+  ).toThrow(bug);
 });
 
 test.each<[string, string, Partial<LimitsRequest>]>([
