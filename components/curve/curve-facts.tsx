@@ -3,15 +3,27 @@ import type { CurveResult } from '@/lib/engine';
 import { formatNumber } from '@/lib/format/number';
 import { ShortQuantity } from './short-quantity';
 
-function lineFact({ model, slope, intercept }: CurveResult): Fact {
+const LINE_LABEL = {
+  linear: 'Line, A per 10 mm',
+  proportional: 'Line through zero, A per 10 mm',
+  quadratic: 'Quadratic, A per 10 mm',
+} as const;
+
+function lineFact({ model, slope, intercept, quadratic }: CurveResult): Fact {
   const below = intercept.value < 0;
   return {
-    label: model === 'proportional' ? 'Line through zero, A per 10 mm' : 'Line, A per 10 mm',
+    label: LINE_LABEL[model],
     value: (
       <span className="inline-flex flex-wrap gap-x-2">
         <span className="whitespace-nowrap">
           <ShortQuantity {...slope} inSum /> c
         </span>
+        {quadratic && (
+          <span className="whitespace-nowrap">
+            {quadratic.value < 0 ? '\u2212' : '+'}{' '}
+            <ShortQuantity value={Math.abs(quadratic.value)} u={quadratic.u} inSum /> c<sup>2</sup>
+          </span>
+        )}
         {model !== 'proportional' && (
           <span className="whitespace-nowrap">
             {below ? '\u2212' : '+'} <ShortQuantity value={Math.abs(intercept.value)} u={intercept.u} inSum />

@@ -1,6 +1,7 @@
 import type { ReactNode } from 'react';
 import { Card } from '@/components/ui/card';
 import { unitWithBasis } from '@/lib/batch/unit-text';
+import { WEIGHTING_WORDS } from '@/lib/curve/model-words';
 import { readingRuleWords } from '@/lib/curve/reading-rule-words';
 import type { StoredMethod } from '@/lib/curve/stored-curve';
 import type { CurveView } from '@/lib/views/curve';
@@ -33,6 +34,11 @@ function readWords({ standards, method }: CurveView): string {
     : readingRuleWords(method.readingRule);
 }
 
+function weightWords({ weighting, varianceFunction }: StoredMethod): string {
+  if (!varianceFunction) return WEIGHTING_WORDS[weighting];
+  return `s² = ${varianceFunction.s0}² + (${varianceFunction.k} A)²`;
+}
+
 /** The method behind a curve, as it stood when this version was saved. */
 export function MethodFacts({ curve }: { curve: CurveView }) {
   const { method } = curve;
@@ -44,7 +50,7 @@ export function MethodFacts({ curve }: { curve: CurveView }) {
     ['Path length', pathWords(method)],
     ['Blank', BLANK[method.blankRule]],
     ['Line', MODEL[method.model]],
-    ['Weights', method.weighting === '1/x2' ? '1/x²' : method.weighting],
+    ['Weights', weightWords(method)],
     ['Absorbance limit', String(method.absorbanceLimit)],
     ['Level of confidence', `${Number((100 * method.confidence).toPrecision(3))} %`],
     ...(method.standardsRelativeU === null

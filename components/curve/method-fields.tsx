@@ -23,11 +23,16 @@ const SIGNALS = [
 const MODELS = [
   { value: 'linear', label: 'straight line with an intercept' },
   { value: 'proportional', label: 'straight line through zero' },
+  { value: 'quadratic', label: 'quadratic: six levels or more' },
 ];
 const WEIGHTINGS = [
   { value: 'none', label: 'none: even scatter' },
   { value: '1/x', label: '1/x: grows with √c' },
   { value: '1/x2', label: '1/x²: grows with c' },
+  { value: '1/y', label: '1/y: grows with √A of the fit' },
+  { value: '1/y2', label: '1/y²: grows with A of the fit' },
+  { value: 'varianceFunction', label: 'variance function: s² = s0² + (kA)²' },
+  { value: 'replicates', label: 'replicates: four or more at every level' },
 ];
 const BLANK_RULES = [
   { value: 'none', label: 'none: zeroed in the instrument' },
@@ -124,6 +129,22 @@ export function FitFields({ calculation, onCalculation, issues }: FitProps) {
           {...number('absorbanceLimit')}
         />
       </div>
+      {calculation.weighting === 'varianceFunction' && (
+        <div className={PAIR}>
+          <Field
+            label="Constant part s0"
+            inputMode="decimal"
+            hint="Standard deviation of one reading near zero, A per 10 mm"
+            {...number('varianceS0')}
+          />
+          <Field
+            label="Proportional part k"
+            inputMode="decimal"
+            hint="What is added for each unit of absorbance"
+            {...number('varianceK')}
+          />
+        </div>
+      )}
       <Disclosure summary="Uncertainty of what all standards share, and of the path">
         <div className={PAIR}>
           <Field

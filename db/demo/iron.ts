@@ -92,6 +92,8 @@ async function makeCurve(actor: Actor, notebookId: string): Promise<string> {
       blankRule: 'none',
       model: 'linear',
       weighting: 'none',
+      varianceS0: '',
+      varianceK: '',
       confidence: '0.95',
       absorbanceLimit: '2',
       standardsRelativeUPercent: '',

@@ -4,6 +4,7 @@ import {
   flag,
   id,
   json,
+  optionalJson,
   moment,
   optionalReal,
   optionalReference,
@@ -41,6 +42,8 @@ export interface MethodRow extends Row<MethodRow> {
   blankRule: 'none' | 'level' | 'subtract';
   model: 'linear' | 'proportional' | 'quadratic';
   weighting: string;
+  /** Of weights by a variance function, s² = s0² + (k A)²; null for others. */
+  varianceFunction: CreationOptional<{ s0: number; k: number } | null>;
   confidence: number;
   absorbanceLimit: number;
   limits: Record<string, number>;
@@ -71,6 +74,7 @@ export const defineMethod = (sequelize: Sequelize) =>
       blankRule: text,
       model: text,
       weighting: text,
+      varianceFunction: optionalJson,
       confidence: real,
       absorbanceLimit: real,
       limits: json,

@@ -10,7 +10,7 @@ import type {
 import type { ReadingRow } from '../models/batches';
 import type { CurveRow, MethodRow, StandardRow } from '../models/curves';
 
-type Names = ReadonlyMap<string, string>;
+export type Names = ReadonlyMap<string, string>;
 
 function unitOf(row: MethodRow): StoredMethod['unit'] {
   const unit = parseUnit(row.unit);
@@ -36,6 +36,7 @@ export function methodView(row: MethodRow): MethodView {
     blankRule: row.blankRule,
     model: row.model,
     weighting: row.weighting as Weighting, // written by the schema of the form only
+    varianceFunction: row.varianceFunction ?? null,
     confidence: row.confidence,
     absorbanceLimit: row.absorbanceLimit,
     hazardNote: row.hazardNote,
@@ -74,7 +75,23 @@ export function standardView(row: StandardRow, readings: readonly StandardReadin
 
 export type LightCurve = Omit<CurveRow, 'result'>;
 
-export function curveVersionView(row: LightCurve, names: Names): CurveVersionView {
+type VersionRow = Pick<
+  CurveRow,
+  'id' | 'version' | 'status' | 'createdAt' | 'createdById' | 'reason' | 'voidReason'
+>;
+
+/** The newest version that is not void, when it is later than this one. */
+export function newerVersion(
+  row: Pick<CurveRow, 'version'>,
+  versions: readonly Pick<CurveRow, 'id' | 'version' | 'status'>[],
+): CurveSummary['newer'] {
+  const newer = versions
+    .filter((other) => other.version > row.version && other.status !== 'void')
+    .sort((a, b) => b.version - a.version)[0];
+  return newer ? { id: newer.id, version: newer.version } : null;
+}
+
+export function curveVersionView(row: VersionRow, names: Names): CurveVersionView {
   return {
     id: row.id,
     version: row.version,
@@ -92,9 +109,6 @@ export function curveSummary(
   versions: readonly LightCurve[],
   names: Names,
 ): CurveSummary {
-  const newer = versions
-    .filter((other) => other.version > row.version && other.status !== 'void')
-    .sort((a, b) => b.version - a.version)[0];
   const { slope, residualSd, n, range } = row.result.curve;
   return {
     ...curveVersionView(row, names),
@@ -109,6 +123,6 @@ export function curveSummary(
     residualSd,
     n,
     range: { min: range.min, max: range.max },
-    newer: newer ? { id: newer.id, version: newer.version } : null,
+    newer: newerVersion(row, versions),
   };
 }

@@ -46,6 +46,7 @@ export function curveRequest(method: CalculatedMethod, standards: readonly Store
     ...(method.formulaMass === null ? {} : { formulaMass: method.formulaMass }),
     model: method.model,
     weighting: method.weighting,
+    ...(method.varianceFunction === null ? {} : { varianceFunction: method.varianceFunction }),
     confidence: method.confidence,
     absorbanceLimit: method.absorbanceLimit,
     ...(blank ? { blank } : {}),

@@ -1,4 +1,5 @@
-import type { Model, ModelUnder, UnknownUnder, Weighting } from '@/lib/engine';
+import type { ModelUnder, UnknownUnder } from '@/lib/engine';
+import { modelWords } from './model-words';
 
 /** A model under a weighting as a row of the comparison. */
 export interface ComparedModel {
@@ -19,25 +20,6 @@ export interface ModelComparison {
   /** Samples of the columns. */
   readonly names: readonly string[];
 }
-
-const MODEL_WORDS: Readonly<Record<Model, string>> = {
-  linear: 'line',
-  proportional: 'line through zero',
-  quadratic: 'quadratic',
-};
-const WEIGHTING_WORDS: Readonly<Record<Weighting, string>> = {
-  none: 'unweighted',
-  '1/x': '1/x',
-  '1/x2': '1/x²',
-  '1/y': '1/y',
-  '1/y2': '1/y²',
-  varianceFunction: 'by its variance function',
-  replicates: 'by its replicates',
-  given: 'given weights',
-};
-
-export const modelWords = (model: Model, weighting: Weighting) =>
-  `${MODEL_WORDS[model]}, ${WEIGHTING_WORDS[weighting]}`;
 
 /** Only results that leave with a number are compared: none is made of a reading above the limit. */
 const quantified = ({ concentration }: UnknownUnder) => concentration !== null;

@@ -26,6 +26,8 @@ export interface StoredMethod {
   readonly blankRule: BlankRule;
   readonly model: Model;
   readonly weighting: Weighting;
+  /** s² = s0² + (k A)², for weights by a variance function; null for others. */
+  readonly varianceFunction: { readonly s0: number; readonly k: number } | null;
   readonly confidence: number;
   readonly absorbanceLimit: number;
   readonly hazardNote: string;

@@ -6,14 +6,22 @@ import { decimal, optionalDecimal } from './decimal';
 /* The fields of a method as a form holds them: texts in, numbers out. */
 
 export const BLANK_RULES = ['none', 'level', 'subtract'] as const;
-export const FORM_MODELS = ['linear', 'proportional'] as const;
-export const FORM_WEIGHTINGS = ['none', '1/x', '1/x2'] as const;
+export const FORM_MODELS = ['linear', 'proportional', 'quadratic'] as const;
+export const FORM_WEIGHTINGS = [
+  'none',
+  '1/x',
+  '1/x2',
+  '1/y',
+  '1/y2',
+  'varianceFunction',
+  'replicates',
+] as const;
 export const SIGNALS = ['absorbance', 'transmittance', 'percentTransmittance'] as const;
 
-const positive = (what: string) => decimal.pipe(z.number().positive(`${what} must be above zero`));
-const optionalPositive = (what: string) =>
+export const positive = (what: string) => decimal.pipe(z.number().positive(`${what} must be above zero`));
+export const optionalPositive = (what: string) =>
   optionalDecimal.pipe(z.number().positive(`${what} must be above zero, or stay empty`).nullable());
-const optionalNotNegative = (what: string) =>
+export const optionalNotNegative = (what: string) =>
   optionalDecimal.pipe(z.number().min(0, `${what} cannot be below zero`).nullable());
 
 /** A concentration unit with either micro sign. */
@@ -43,6 +51,8 @@ export const calculationFields = z
     blankRule: z.enum(BLANK_RULES, 'Choose what is done with the blank'),
     model: z.enum(FORM_MODELS, 'Choose a line'),
     weighting: z.enum(FORM_WEIGHTINGS, 'Choose a weighting'),
+    varianceS0: optionalNotNegative('The constant part'),
+    varianceK: optionalNotNegative('The proportional part'),
     confidence: z.enum(['0.9', '0.95', '0.99'], 'Choose a level of confidence').transform(Number),
     absorbanceLimit: positive('The absorbance limit'),
     standardsRelativeUPercent: optionalNotNegative('The uncertainty'),
@@ -54,6 +64,15 @@ export const calculationFields = z
         path: ['formulaMass'],
         message: `${fields.unit} counts particles: enter the formula mass of what is counted`,
       });
+    if (
+      fields.weighting === 'varianceFunction' &&
+      !((fields.varianceS0 ?? 0) > 0 || (fields.varianceK ?? 0) > 0)
+    )
+      context.addIssue({
+        code: 'custom',
+        path: ['varianceS0'],
+        message: 'Enter the constant part, the proportional part, or both',
+      });
     if (fields.blankRule === 'level' && fields.model === 'proportional')
       context.addIssue({
         code: 'custom',
@@ -61,7 +80,9 @@ export const calculationFields = z
         message: 'A line through zero takes no blank level. Subtract the blank, or leave the intercept free',
       });
   })
-  .transform(({ standardsRelativeUPercent: percent, ...fields }) => ({
+  .transform(({ standardsRelativeUPercent: percent, varianceS0, varianceK, ...fields }) => ({
     ...fields,
+    varianceFunction:
+      fields.weighting === 'varianceFunction' ? { s0: varianceS0 ?? 0, k: varianceK ?? 0 } : null,
     standardsRelativeU: percent === null ? null : percent / 100,
   }));

@@ -25,6 +25,8 @@ export function curveDraftInput(standards: readonly Typed[] = STANDARDS): CurveD
       blankRule: 'none',
       model: 'linear',
       weighting: 'none',
+      varianceS0: '',
+      varianceK: '',
       confidence: '0.95',
       absorbanceLimit: '2',
       standardsRelativeUPercent: '',

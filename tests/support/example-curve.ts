@@ -40,6 +40,8 @@ function draftOf({
       blankRule: 'none',
       model: 'linear',
       weighting: 'none',
+      varianceS0: '',
+      varianceK: '',
       confidence: '0.95',
       absorbanceLimit: '2',
       standardsRelativeUPercent: '',

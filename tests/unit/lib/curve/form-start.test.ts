@@ -60,6 +60,20 @@ test('the form of a new version holds exactly what the version before was saved 
   expect(curveDraft.parse(formDraft(savedFrom(draft)))).toEqual(curveDraft.parse(draft));
 });
 
+test('a quadratic weighted by a variance function keeps both', () => {
+  const draft = curveDraftInput([['S1', '1', '0.2']]);
+  const changed = {
+    model: 'quadratic',
+    weighting: 'varianceFunction',
+    varianceS0: '0.0006',
+    varianceK: '0,004',
+  };
+  Object.assign(draft.calculation, changed);
+  const { method } = savedFrom(draft);
+  expect(method).toMatchObject({ model: 'quadratic', varianceFunction: { s0: 0.0006, k: 0.004 } });
+  expect(curveDraft.parse(formDraft(savedFrom(draft)))).toEqual(curveDraft.parse(draft));
+});
+
 test('the same for standards read off spectra, in their order', () => {
   const ids = [crypto.randomUUID(), crypto.randomUUID(), crypto.randomUUID()];
   const spectra = new Map(

@@ -31,6 +31,7 @@ describe('curveDraft', () => {
     [withCalculation({ pathLengthMm: '1,234' }), 'calculation.pathLengthMm', /1\.234 or 1234/],
     [withCalculation({ unit: 'mmol/L', formulaMass: '' }), 'calculation.formulaMass', /formula mass/],
     [withCalculation({ formulaMass: '-1' }), 'calculation.formulaMass', /above zero/],
+    [withCalculation({ weighting: 'varianceFunction' }), 'calculation.varianceS0', /Enter the constant part/],
     [withCalculation({ blankRule: 'level', model: 'proportional' }), 'calculation.blankRule', /through zero/],
     [{ ...curveDraftInput(), rule: { ...curveDraftInput().rule, at: '' } }, 'rule.at', /number/],
     [
