@@ -22,6 +22,6 @@ export function drawSpread(spread: Spread, random: Random): number {
 /** The sum of independent errors. */
 export function drawAll(spreads: readonly Spread[], random: Random): number {
   let sum = 0;
-  for (const spread of spreads) sum += drawSpread(spread, random);
+  for (let i = 0; i < spreads.length; i += 1) sum += drawSpread(spreads[i] as Spread, random);
   return sum;
 }

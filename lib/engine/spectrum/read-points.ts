@@ -28,12 +28,12 @@ function gapSentence(gap: SpectrumPoint): string {
 
 /** The mean of points, or why there is none. */
 export function meanOf(points: readonly SpectrumPoint[]): PartReading {
-  const first = points[0]?.wavelengthNm ?? NaN;
-  const last = points.at(-1)?.wavelengthNm ?? NaN;
+  const first = (points[0] as SpectrumPoint).wavelengthNm;
+  const last = (points.at(-1) as SpectrumPoint).wavelengthNm;
   const atNm = (first + last) / 2;
   const gap = points.find((point) => point.absorbance === null);
   if (gap) return { value: null, reason: gapSentence(gap), atNm, points };
-  const value = points.reduce((sum, point) => sum + (point.absorbance ?? 0), 0) / points.length;
+  const value = points.reduce((sum, point) => sum + (point.absorbance as number), 0) / points.length;
   return { value, atNm, points };
 }
 
@@ -41,8 +41,8 @@ export function meanOf(points: readonly SpectrumPoint[]): PartReading {
 export function interpolateAt(spectrum: Points, nm: number): PartReading {
   const { wavelengthNm, absorbance, gapReasons } = spectrum;
   const at = (i: number): SpectrumPoint => ({
-    wavelengthNm: wavelengthNm[i] ?? NaN,
-    absorbance: absorbance[i] ?? null,
+    wavelengthNm: wavelengthNm[i] as number,
+    absorbance: absorbance[i] as number | null,
     ...(gapReasons?.[i] === undefined ? {} : { reason: gapReasons[i] }),
   });
   const next = wavelengthNm.findIndex((x) => x >= nm - 1e-6);

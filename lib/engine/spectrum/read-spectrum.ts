@@ -54,7 +54,11 @@ export function readSpectrum(spectrum: SpectrumPoints, rule: ReadingRule): Spect
   const minus = interpolateAt(spectrum, inside(spectrum, rule.minusNm));
   const both = main.value !== null && minus.value !== null;
   return {
-    ...finish(main, both ? (main.value ?? 0) - (minus.value ?? 0) : null, main.reason ?? minus.reason),
+    ...finish(
+      main,
+      both ? (main.value as number) - (minus.value as number) : null,
+      main.reason ?? minus.reason,
+    ),
     minusValue: minus.value,
     points: [...main.points, ...minus.points],
   };
@@ -81,7 +85,7 @@ export function checkSpectrum({ wavelengthNm, absorbance }: SpectrumPoints): voi
     );
   }
   for (let i = 1; i < wavelengthNm.length; i += 1) {
-    if (!((wavelengthNm[i] ?? NaN) > (wavelengthNm[i - 1] ?? NaN))) {
+    if (!((wavelengthNm[i] as number) > (wavelengthNm[i - 1] as number))) {
       throw new EngineError(
         'SPECTRUM_NOT_ASCENDING',
         `readSpectrum needs ascending wavelengths, got ${wavelengthNm[i]} after ${wavelengthNm[i - 1]}`,
@@ -92,8 +96,8 @@ export function checkSpectrum({ wavelengthNm, absorbance }: SpectrumPoints): voi
 
 /** The wavelength, held inside the spectrum. */
 function inside({ wavelengthNm }: SpectrumPoints, nm: number): number {
-  const first = wavelengthNm[0] ?? NaN;
-  const last = wavelengthNm.at(-1) ?? NaN;
+  const first = wavelengthNm[0] as number;
+  const last = wavelengthNm.at(-1) as number;
   if (!(nm >= first - SAME_NM && nm <= last + SAME_NM)) {
     throw new EngineError(
       'WAVELENGTH_OUTSIDE',
@@ -135,8 +139,8 @@ function readMain(spectrum: SpectrumPoints, rule: ReadingRule): PartReading {
 function pointAt({ wavelengthNm, absorbance, gapReasons }: SpectrumPoints, i: number): SpectrumPoint {
   const reason = gapReasons?.[i];
   return {
-    wavelengthNm: wavelengthNm[i] ?? NaN,
-    absorbance: absorbance[i] ?? null,
+    wavelengthNm: wavelengthNm[i] as number,
+    absorbance: absorbance[i] as number | null,
     ...(reason === undefined ? {} : { reason }),
   };
 }
@@ -144,10 +148,10 @@ function pointAt({ wavelengthNm, absorbance, gapReasons }: SpectrumPoints, i: nu
 function nearestPoint(spectrum: SpectrumPoints, nm: number): PartReading {
   const { wavelengthNm } = spectrum;
   const nearest = wavelengthNm.reduce(
-    (best, x, i) => (Math.abs(x - nm) < Math.abs((wavelengthNm[best] ?? NaN) - nm) - SAME_NM ? i : best),
+    (best, x, i) => (Math.abs(x - nm) < Math.abs((wavelengthNm[best] as number) - nm) - SAME_NM ? i : best),
     0,
   );
-  const here = wavelengthNm[nearest] ?? NaN;
+  const here = wavelengthNm[nearest] as number;
   const steps = [
     here - (wavelengthNm[nearest - 1] ?? -Infinity),
     (wavelengthNm[nearest + 1] ?? Infinity) - here,
@@ -183,7 +187,7 @@ function highest(points: readonly SpectrumPoint[]): PartReading {
   const mean = meanOf(points);
   if (mean.value === null) return mean;
   const top = points.reduce((best, point) =>
-    (point.absorbance ?? 0) > (best.absorbance ?? 0) ? point : best,
+    (point.absorbance as number) > (best.absorbance as number) ? point : best,
   );
   return { value: top.absorbance, atNm: top.wavelengthNm, points: [top] };
 }

@@ -1,4 +1,5 @@
 import type { FittedCurve } from '../fit-curve';
+import { coefficientOf } from '../regression/fit';
 import type { From, Ledger } from './ledger';
 import type { PointIds } from './record-curve';
 
@@ -23,7 +24,11 @@ export function recordCoefficients(
   ids: readonly PointIds[],
   weightIds: readonly string[] | null,
 ): void {
-  const terms = ids.map(({ x, y }, i): From => ({ x, y, ...(weightIds ? { w: weightIds[i] ?? '' } : {}) }));
+  const terms = ids.map(({ x, y }, i): From => ({
+    x,
+    y,
+    ...(weightIds ? { w: weightIds[i] as string } : {}),
+  }));
   const sums = { ledger, curve, unit: curve.request.unit, w: weightIds ? 'w * ' : '', terms };
   if (curve.fit.model === 'linear') recordLine(sums);
   else if (curve.fit.model === 'proportional') recordProportional(sums);
@@ -66,7 +71,7 @@ function recordLine(sums: Sums): void {
     terms.map((t) => ({ ...only(t, 'x', 'w'), xbar: means.xbar })),
     fit.sxx,
   );
-  const [offset = NaN, b = NaN] = fit.beta;
+  const [offset, b] = fit.beta as readonly [number, number];
   ledger.sum(
     text('sxy', 'Spread shared with the absorbances', 'Sxy'),
     `${w}(x - xbar) * (y - ybar)`,
@@ -92,33 +97,33 @@ function recordLine(sums: Sums): void {
     u('u.slope', 'Standard uncertainty of the slope', 'u(b)'),
     's / sqrt(Sxx)',
     { s: from.s, Sxx: from.Sxx },
-    Math.sqrt(fit.covariance[1]?.[1] ?? NaN),
+    coefficientOf(fit, 1).u,
   );
   ledger.line(
     u('v.intercept', 'Variance of the intercept', 'V_aa'),
     's^2 * (1 / n + xbar^2 / Sxx)',
     from,
-    fit.covariance[0]?.[0] ?? NaN,
+    coefficientOf(fit, 0).u ** 2,
   );
   ledger.line(
     u('u.intercept', 'Standard uncertainty of the intercept', 'u(a)'),
     'sqrt(V_aa)',
     { V_aa: 'curve.v.intercept' },
-    Math.sqrt(fit.covariance[0]?.[0] ?? NaN),
+    coefficientOf(fit, 0).u,
   );
   ledger.line(
     u('v.both', 'Covariance of intercept and slope', 'V_ab'),
     '-xbar * s^2 / Sxx',
     { s: from.s, xbar: from.xbar, Sxx: from.Sxx },
-    fit.covariance[0]?.[1] ?? NaN,
+    (fit.covariance[0] as readonly number[])[1] as number,
   );
 }
 
 function recordProportional(sums: Sums): void {
   const { ledger, curve, unit, w, terms } = sums;
   const { fit, data } = curve;
-  const squares = data.x.reduce((sum, x, i) => sum + (data.w[i] ?? 0) * x * x, 0);
-  const [, b = NaN] = fit.beta;
+  const squares = data.x.reduce((sum, x, i) => sum + (data.w[i] as number) * x * x, 0);
+  const b = fit.beta[1] as number;
   const text = (id: string, label: string, symbol: string, of = '') => ({
     id: `curve.${id}`,
     label,
@@ -145,7 +150,7 @@ function recordProportional(sums: Sums): void {
     { ...text('u.slope', 'Standard uncertainty of the slope', 'u(b)'), source: CG4 },
     's / sqrt(Sx2)',
     { s: 'curve.s', Sx2: 'curve.sx2' },
-    Math.sqrt(fit.covariance[1]?.[1] ?? NaN),
+    coefficientOf(fit, 1).u,
   );
   ledger.given(
     { ...text('v.intercept', 'Variance of the intercept', 'V_aa'), source: 'line through zero' },
@@ -164,10 +169,15 @@ function recordQuadratic(sums: Sums): void {
       name
     ];
     ledger.solved(
-      { id: `curve.${name}`, label: `${label}, per 10 mm`, symbol: symbols[i] ?? '', source: 'ISO 8466-2' },
+      {
+        id: `curve.${name}`,
+        label: `${label}, per 10 mm`,
+        symbol: symbols[i] as string,
+        source: 'ISO 8466-2',
+      },
       'least squares of y = a + b*x + d*x^2',
       inputs,
-      fit.coefficients[i] ?? NaN,
+      fit.coefficients[i] as number,
     );
   });
   recordResidualSd(sums, 'a + b * x + d * x^2');
@@ -181,7 +191,7 @@ function recordQuadratic(sums: Sums): void {
       },
       's^2 (X^T W X)^-1',
       ['curve.s', ...inputs],
-      fit.covariance[i]?.[i] ?? NaN,
+      (fit.covariance[i] as readonly number[])[i] as number,
     );
   });
 }

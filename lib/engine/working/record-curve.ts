@@ -64,7 +64,7 @@ export function recordBlanks(
       },
       'A',
       ids.map((id) => ({ A: id })),
-      blanks.meanAt(pathLengthMm, '') ?? 0,
+      blanks.meanAt(pathLengthMm, '') as number,
       { p_b: countId },
     );
   }

@@ -17,7 +17,7 @@ export function recordEpsilon(
       label: 'From the slope to per mole and litre',
       symbol: 'f',
       unit: 'L/(mol cm) for a slope of 1',
-      source: `unit ${request.unit}${request.formulaMass === undefined ? '' : `, formula mass ${request.formulaMass} g/mol`}`,
+      source: `unit ${request.unit}, formula mass ${request.formulaMass} g/mol`,
     },
     'formula mass / (unit in g/L), or 1 / (unit in mol/L)',
     [],

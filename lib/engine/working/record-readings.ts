@@ -122,7 +122,7 @@ function recordNormalised(
       ...(withBlank ? { A_blank: blankLineId(item.pathLengthMm) } : {}),
       ...(withPath ? { l: item.pathId } : {}),
     },
-    item.y ?? NaN,
+    item.y as number,
   );
   return `${item.id}.y`;
 }

@@ -25,19 +25,19 @@ export function recordWeights(
       symbol: 'v',
       source: `weighting ${request.weighting}`,
     };
-    const value = rule.ofPoints[i] ?? NaN;
+    const value = rule.ofPoints[i] as number;
     if (constant) ledger.given(text, value);
     else if (byFormula) {
       const formula = VARIANCE_FORMULA[request.weighting as keyof typeof VARIANCE_FORMULA];
-      ledger.line(text, formula, { x: ids[i]?.x ?? '' }, value);
+      ledger.line(text, formula, { x: (ids[i] as PointIds).x }, value);
     } else if (request.weighting === 'given') ledger.solved(text, '1 / w as given', [], value);
     else {
       const inputs =
         request.weighting === 'replicates' ? [...new Set(ofLevel(point.concentration))] : everything;
-      ledger.solved(text, VARIANCE_WORDS[request.weighting] ?? '', inputs, value);
+      ledger.solved(text, VARIANCE_WORDS[request.weighting] as string, inputs, value);
     }
   });
-  const terms = active.map((point, i) => ({ l: ids[i]?.l ?? '', v: `${point.id}.variance` }));
+  const terms = active.map((point, i) => ({ l: (ids[i] as PointIds).l, v: `${point.id}.variance` }));
   ledger.solved(
     { id: 'curve.weightScale', label: 'Factor of the weights', symbol: 'kappa', source: MODEL },
     'n / sum((l / 10)^2 / v)',
@@ -49,8 +49,8 @@ export function recordWeights(
     ledger.line(
       { id, label: `${point.name}, reading ${point.replicate}: weight`, symbol: 'w', source: MODEL },
       'kappa * (l / 10)^2 / v',
-      { kappa: 'curve.weightScale', l: ids[i]?.l ?? '', v: `${point.id}.variance` },
-      data.w[i] ?? NaN,
+      { kappa: 'curve.weightScale', l: (ids[i] as PointIds).l, v: `${point.id}.variance` },
+      data.w[i] as number,
     );
     return id;
   });

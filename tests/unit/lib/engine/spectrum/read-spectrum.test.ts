@@ -15,6 +15,13 @@ describe('readSpectrum', () => {
     expect(read({ kind: 'point', wavelengthNm: 501.00000001 })).toMatchObject({ value: 0.2, atNm: 501 });
   });
 
+  test('reads at either end, and a spectrum of one point', () => {
+    expect(read({ kind: 'point', wavelengthNm: 500 }).value).toBe(0.1);
+    expect(read({ kind: 'point', wavelengthNm: 508 }).value).toBe(0.2);
+    const single = { wavelengthNm: [510], absorbance: [0.3] };
+    expect(readSpectrum(single, { kind: 'point', wavelengthNm: 510 }).value).toBe(0.3);
+  });
+
   test('refuses the point in a hole of the spectrum and says what to use', () => {
     expect(() => read({ kind: 'point', wavelengthNm: 503.4 })).toThrow(/interpolated/);
   });
@@ -36,6 +43,7 @@ describe('readSpectrum', () => {
   });
 
   test('takes the highest point of a window', () => {
+    expect(read({ kind: 'windowMaximum', fromNm: 507, toNm: 508 })).toMatchObject({ value: 0.6, atNm: 507 });
     expect(read({ kind: 'windowMaximum', fromNm: 500, toNm: 505 })).toMatchObject({ value: 0.7, atNm: 505 });
   });
 
