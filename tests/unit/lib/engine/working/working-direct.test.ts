@@ -6,6 +6,7 @@ import {
   resultFromKnownAbsorptivity,
   resultFromSingleStandard,
 } from '@/lib/engine';
+import { expectOrdered } from './expect-ordered';
 
 const COMMON = { signal: 'transmittance', unit: 'mg/L', confidence: 0.95, absorbanceLimit: 2 } as const;
 const UNKNOWNS = [
@@ -59,12 +60,7 @@ describe.each(Object.entries(ANSWERS))('the working of %s', (_name, answer) => {
   const steps = [...answer.working, ...(answer.unknowns[0]?.working ?? [])];
 
   test('names only lines that stand before, each once, and ends with the report', () => {
-    const seen = new Set<string>();
-    for (const step of steps) {
-      expect(seen.has(step.id), `${step.id} stands twice`).toBe(false);
-      expect(step.inputs.filter((id) => !seen.has(id))).toEqual([]);
-      seen.add(step.id);
-    }
+    expectOrdered(steps);
     expect(steps.at(-1)?.value).toBe(answer.unknowns[0]?.report);
   });
 

@@ -2,6 +2,7 @@ import { evaluate } from 'mathjs';
 import { describe, expect, test } from 'vitest';
 import { calculateStandardCurve, type CurveRequest } from '@/lib/engine';
 import { request, unknown } from '../requests';
+import { expectOrdered } from './expect-ordered';
 
 const UNKNOWNS = [unknown([0.351, 0.3523], { weight: 2 })];
 const bent = [0.5, 1, 2, 4, 6, 8].map((c, i) => ({
@@ -65,12 +66,7 @@ describe.each(Object.entries(CONFIGURATIONS))('the working of %s', (_name, asked
   const steps = [...curve.working, ...(unknowns[0]?.working ?? [])];
 
   test('names only lines that stand before, each once', () => {
-    const seen = new Set<string>();
-    for (const step of steps) {
-      expect(seen.has(step.id), `${step.id} stands twice`).toBe(false);
-      expect(step.inputs.filter((id) => !seen.has(id))).toEqual([]);
-      seen.add(step.id);
-    }
+    expectOrdered(steps);
   });
 
   test('works out line by line', () => {

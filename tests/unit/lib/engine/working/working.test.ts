@@ -2,6 +2,7 @@ import { evaluate } from 'mathjs';
 import { describe, expect, test } from 'vitest';
 import { calculateStandardCurve, type CurveRequest, type Reading, type WorkingStep } from '@/lib/engine';
 import { request, unknown } from '../requests';
+import { expectOrdered } from './expect-ordered';
 
 const BLANK = {
   readings: [0.991, 0.988],
@@ -77,12 +78,7 @@ describe.each(Object.entries(CONFIGURATIONS))('the working of %s', (_name, asked
   const steps = workingOf(asked);
 
   test('names only lines that stand before, each once', () => {
-    const seen = new Set<string>();
-    for (const step of steps) {
-      expect(seen.has(step.id), `${step.id} stands twice`).toBe(false);
-      expect(step.inputs.filter((id) => !seen.has(id))).toEqual([]);
-      seen.add(step.id);
-    }
+    expectOrdered(steps);
     expect(steps.length).toBeGreaterThan(40);
   });
 
