@@ -1,12 +1,6 @@
-import { requestWith, type UnknownSample } from '@/lib/batch/unknown-request';
-import {
-  calculateStandardCurve,
-  type CurveRequest,
-  type DilutionStep,
-  type ReadingRule,
-  type Signal,
-  type UnknownResult,
-} from '@/lib/engine';
+import type { UnknownSample } from '@/lib/batch/unknown-request';
+import { calculateSamples, type SampleResult, type Yardstick } from '@/lib/batch/yardstick';
+import type { DilutionStep, ReadingRule, Signal } from '@/lib/engine';
 import { AppError } from '@/lib/errors';
 import type { KeptReading } from '@/lib/batch/typed-reading';
 import type { Actor } from '@/lib/policies/actor';
@@ -33,13 +27,13 @@ export interface NewSample {
 }
 
 export interface Calculated {
-  readonly result: UnknownResult;
+  readonly result: SampleResult;
   readonly engineVersion: string;
 }
 
 /** What the engine says of some samples, from their readings and nothing else. */
-export function calculate(curve: CurveRequest, samples: readonly UnknownSample[]): Calculated[] {
-  const { engine, unknowns } = calculateStandardCurve(requestWith(curve, samples));
+export function calculate(yardstick: Yardstick, samples: readonly UnknownSample[]): Calculated[] {
+  const { engine, unknowns } = calculateSamples(yardstick, samples);
   return unknowns.map((result) => ({ result, engineVersion: engine }));
 }
 
@@ -72,7 +66,7 @@ export function makerOf(actor: Actor, otherwise: string): string {
 
 interface Place {
   readonly batch: BatchRow;
-  readonly curve: CurveRequest;
+  readonly yardstick: Yardstick;
   readonly firstPosition: number;
   readonly idAt: (index: number) => string;
 }
@@ -80,11 +74,11 @@ interface Place {
 /** Save samples with their readings and what the engine makes of them. Inside the caller's transaction. */
 export async function saveSamples(
   actor: Actor,
-  { batch, curve, firstPosition, idAt }: Place,
+  { batch, yardstick, firstPosition, idAt }: Place,
   samples: readonly NewSample[],
   why?: string,
 ): Promise<DeterminationRow[]> {
-  const calculated = calculate(curve, samples);
+  const calculated = calculate(yardstick, samples);
   const createdById = makerOf(actor, batch.createdById);
   const rows: DeterminationRow[] = [];
   for (const [index, sample] of samples.entries()) {

@@ -2,6 +2,7 @@ import type { Model, ModelStatic, WhereOptions } from 'sequelize';
 import { Op } from 'sequelize';
 import type { Actor } from '@/lib/policies/actor';
 import type { Kind, NotebookFacts, PersonFacts } from '@/lib/policies/rules';
+import type { AbsorptivityRow } from './models/absorptivities';
 import type { BatchRow, DeterminationRow, ReadingRow } from './models/batches';
 import type { CurveRow, MethodRow, StandardRow } from './models/curves';
 import type { MembershipRow, NotebookRow, ShareLinkRow, ShareSessionRow } from './models/notebooks';
@@ -27,6 +28,7 @@ export interface Rows {
   method: MethodRow;
   curve: CurveRow;
   standard: StandardRow;
+  absorptivity: AbsorptivityRow;
   batch: BatchRow;
   determination: DeterminationRow;
   reading: ReadingRow;
@@ -131,6 +133,7 @@ export const KINDS: Readonly<Record<Kind, KindOf>> = {
       madeWithAnother: always,
     },
   },
+  absorptivity: content('Absorptivity', 'known absorptivity', 'title'),
   batch: content('Batch', 'batch', 'title'),
   determination: content('Determination', 'determination', 'sample', ['result']),
   reading: {

@@ -4,16 +4,10 @@ import type { Actor } from '@/lib/policies/actor';
 import type { AddSpectrumSamples } from '@/lib/schemas/determination';
 import { keptReading } from '@/lib/spectrum/kept-reading';
 import type { SpectrumReadingView } from '@/lib/views/spectrum';
-import { loadFor } from './access';
+import { readingRuleOf } from './batch-method';
 import type { NewReading, NewSample } from './determination-rows';
 import type { BatchRow } from './models/batches';
 import { readingsFromSpectra } from './queries/spectra';
-
-/** The method of a batch's curve. */
-export async function methodOfCurve(actor: Actor, curveId: string) {
-  const { methodId } = await loadFor(actor, 'curve', 'read', curveId);
-  return loadFor(actor, 'method', 'read', methodId);
-}
 
 /** What was read off a spectrum by a rule, as a reading to keep. */
 export function readingOf(read: SpectrumReadingView, rule: ReadingRule): NewReading {
@@ -21,17 +15,17 @@ export function readingOf(read: SpectrumReadingView, rule: ReadingRule): NewRead
   return { ...keptReading(read), ...from };
 }
 
-/** Read the chosen spectra by the rule of the batch's method. @throws AppError INVALID_INPUT naming the spectrum */
+/** Read the chosen spectra by the rule of the batch. @throws AppError INVALID_INPUT naming the spectrum */
 export async function samplesFromSpectra(
   actor: Actor,
   batch: BatchRow,
   samples: AddSpectrumSamples['samples'],
 ): Promise<NewSample[]> {
-  const method = await methodOfCurve(actor, batch.curveId);
+  const rule = await readingRuleOf(actor, batch);
   const ids = samples.flatMap((sample) => sample.spectrumIds);
   if (new Set(ids).size < ids.length)
     throw new AppError('INVALID_INPUT', 'A spectrum stands in two samples. Leave it in one of them');
-  const read = await readingsFromSpectra(actor, batch.notebookId, ids, method.readingRule);
+  const read = await readingsFromSpectra(actor, batch.notebookId, ids, rule);
   const byId = new Map(read.map((one) => [one.spectrumId, one]));
   return samples.map(({ spectrumIds, ...sample }, index) => ({
     ...sample,
@@ -41,7 +35,7 @@ export async function samplesFromSpectra(
         const detail = `${one?.name ?? 'A spectrum'} cannot be read: ${one?.error ?? 'it is not there'}`;
         throw new AppError('INVALID_INPUT', detail, [{ pointer: `/samples.${index}.spectrumIds`, detail }]);
       }
-      return readingOf(one, method.readingRule);
+      return readingOf(one, rule);
     }),
   }));
 }

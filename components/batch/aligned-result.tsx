@@ -1,4 +1,4 @@
-import type { UnknownResult } from '@/lib/engine';
+import type { SampleResult } from '@/lib/batch/yardstick';
 import { PowerOfTen } from '@/components/flags/quantity';
 import { alignAtPoint } from '@/lib/format/number';
 import { formatPlusMinus } from '@/lib/format/quantity';
@@ -13,7 +13,7 @@ export interface AlignedResult {
 }
 
 /** The results of a column together; null where a result has no number. */
-export function alignResults(results: readonly UnknownResult[]): readonly (AlignedResult | null)[] {
+export function alignResults(results: readonly SampleResult[]): readonly (AlignedResult | null)[] {
   const shown = results.map(({ concentration }) =>
     concentration ? formatPlusMinus(concentration.value, concentration.U) : null,
   );
@@ -30,7 +30,7 @@ export function alignResults(results: readonly UnknownResult[]): readonly (Align
 }
 
 /** A result in a table's cell: value ± U, or the words that stand for it. A stop shows no number. */
-export function ResultCell({ result, aligned }: { result: UnknownResult; aligned: AlignedResult | null }) {
+export function ResultCell({ result, aligned }: { result: SampleResult; aligned: AlignedResult | null }) {
   if (!aligned) return <WithoutNumber result={result} />;
   return (
     <span className="font-medium whitespace-pre">
@@ -45,7 +45,7 @@ export function ResultCell({ result, aligned }: { result: UnknownResult; aligned
   );
 }
 
-function WithoutNumber({ result }: { result: UnknownResult }) {
+function WithoutNumber({ result }: { result: SampleResult }) {
   if (result.reportCase === 'belowCriticalValue') return <span className="font-medium">{result.report}</span>;
   return <span className="font-sans text-ink-2">no result</span>;
 }

@@ -1,29 +1,64 @@
 import Link from 'next/link';
-import { Facts } from '@/components/ui/facts';
+import { Facts, type Fact } from '@/components/ui/facts';
 import { unitWithBasis } from '@/lib/batch/unit-text';
 import { readingRuleWords } from '@/lib/curve/reading-rule-words';
+import { ABSORPTIVITY_WORDS } from '@/lib/absorptivity/absorptivity-words';
+import { readOn, readOnHref } from '@/lib/batch/read-on';
+import { formatShort } from '@/lib/format/quantity';
 import { significantText } from '@/lib/format/round';
-import type { BatchHead } from '@/lib/views/batch';
+import type { BatchHead, BatchMethodView } from '@/lib/views/batch';
+
+/** What the results lie between, or the absorptivity they rest on when no standards were measured. */
+function footingFact({ range, unit, knownAbsorptivity }: BatchMethodView): Fact[] {
+  if (range)
+    return [
+      {
+        label: 'Standards from, to',
+        value: (
+          <>
+            {significantText(range.min, 4)} – {significantText(range.max, 4)} <small>{unit}</small>
+          </>
+        ),
+        note: 'in the measured solution',
+      },
+    ];
+  if (!knownAbsorptivity) return [];
+  const { kind, value, u, source } = knownAbsorptivity;
+  const words = ABSORPTIVITY_WORDS[kind];
+  return [
+    {
+      label: words.symbol,
+      value: (
+        <>
+          {formatShort(value, u ?? 0).text} <small>{words.unit}</small>
+        </>
+      ),
+      note: source,
+    },
+  ];
+}
 
 /** What the samples of a batch are read on and how. */
 export function BatchFacts({ batch, base }: { batch: BatchHead; base: string }) {
-  const { method, curve } = batch;
+  const { method } = batch;
+  const on = readOn(batch);
+  const onCurve = on.kind === 'curve';
   const unit = unitWithBasis(method.unit, method.basis);
   return (
     <Facts
       label="How the samples are read"
       facts={[
         {
-          label: 'Standard curve',
+          label: onCurve ? 'Standard curve' : 'Known absorptivity',
           value: (
             <Link
-              href={`${base}/curves/${curve.id}`}
+              href={readOnHref(on, base)}
               className="font-sans text-base underline decoration-rule-strong underline-offset-2 hover:text-uv"
             >
-              {curve.title}
+              {on.title}
             </Link>
           ),
-          note: `version ${curve.version}`,
+          note: `version ${on.version}`,
         },
         {
           label: 'Analyte',
@@ -39,18 +74,9 @@ export function BatchFacts({ batch, base }: { batch: BatchHead; base: string }) 
           ),
           note: readingRuleWords(method.readingRule),
         },
+        ...footingFact(method),
         {
-          label: 'Standards from, to',
-          value: (
-            <>
-              {significantText(method.range.min, 4)} – {significantText(method.range.max, 4)}{' '}
-              <small>{method.unit}</small>
-            </>
-          ),
-          note: 'in the measured solution',
-        },
-        {
-          label: 'Path length of the curve',
+          label: onCurve ? 'Path length of the curve' : 'Path length',
           value: (
             <>
               {significantText(method.pathLengthMm, 5)} <small>mm</small>

@@ -14,7 +14,8 @@ function intervalText([low, high]: readonly [number, number], expanded: number):
   return `${digits(low)} to ${digits(high)}`;
 }
 
-function resultFacts({ result }: DeterminationView, { unit, confidence }: BatchMethodView): Fact[] {
+function resultFacts({ result }: DeterminationView, method: BatchMethodView): Fact[] {
+  const { unit, confidence, range } = method;
   const { concentration, fieller } = result;
   if (!concentration) return [];
   const { U, u, k, degreesOfFreedom, interval } = concentration;
@@ -44,9 +45,19 @@ function resultFacts({ result }: DeterminationView, { unit, confidence }: BatchM
           {intervalText(interval, U)} <small>{unit}</small>
         </>
       ),
-      note: fieller ? `Fieller: ${intervalText(fieller, U)} ${unit}` : 'Fieller: not bounded',
+      // Fieller's interval belongs to a slope that was fitted
+      note: fieller
+        ? `Fieller: ${intervalText(fieller, U)} ${unit}`
+        : range
+          ? 'Fieller: not bounded'
+          : undefined,
     },
   ];
+}
+
+function pathNote(pathLengthMm: number, { range, pathLengthMm: usual }: BatchMethodView): string {
+  if (pathLengthMm === usual) return range ? 'as the curve' : 'as stated with the absorptivity';
+  return range ? `the curve has ${usual} mm` : `stated with the absorptivity: ${usual} mm`;
 }
 
 /** The figures beside a result: its uncertainty, what was measured, and how the sample was diluted. */
@@ -84,8 +95,7 @@ export function DeterminationFacts({
               {significantText(pathLengthMm, 5)} <small>mm</small>
             </>
           ),
-          note:
-            pathLengthMm === method.pathLengthMm ? 'as the curve' : `the curve has ${method.pathLengthMm} mm`,
+          note: pathNote(pathLengthMm, method),
         },
       ]}
     />

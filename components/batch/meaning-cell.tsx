@@ -1,7 +1,8 @@
 import { FLAG_TONE } from '@/components/flags/flag-tone';
 import { Pill } from '@/components/ui/pill';
 import { meaningOf } from '@/lib/batch/meaning';
-import type { UnknownResult } from '@/lib/engine';
+import type { SampleResult } from '@/lib/batch/yardstick';
+import type { StandardsRange } from '@/lib/views/batch';
 
 /** The first sentence of a flag; the whole of it stands on the page of the determination. */
 const firstSentence = (message: string) =>
@@ -13,8 +14,8 @@ export function MeaningCell({
   range,
   unit,
 }: {
-  result: UnknownResult;
-  range: { readonly min: number; readonly max: number };
+  result: SampleResult;
+  range: StandardsRange | null;
   unit: string;
 }) {
   const { tone, sentence, code, others } = meaningOf(result, range, unit);

@@ -5,7 +5,8 @@ import { dilutionSentence, dilutionText } from '@/lib/batch/dilution-text';
 import { meaningOf } from '@/lib/batch/meaning';
 import { SIGNAL_SYMBOL, type ShownReading } from '@/lib/batch/reading-text';
 import { unitWithBasis } from '@/lib/batch/unit-text';
-import type { DilutionStep, UnknownResult } from '@/lib/engine';
+import type { SampleResult } from '@/lib/batch/yardstick';
+import type { DilutionStep } from '@/lib/engine';
 import { significantText } from '@/lib/format/round';
 import type { BatchMethodView } from '@/lib/views/batch';
 import { alignResults, ResultCell, type AlignedResult } from './aligned-result';
@@ -21,7 +22,7 @@ export interface ResultRow {
   readonly readings: readonly (ShownReading & { readonly origin: 'typed' | 'spectrum' })[];
   readonly pathLengthMm: number;
   readonly dilution: readonly DilutionStep[];
-  readonly result: UnknownResult;
+  readonly result: SampleResult;
 }
 
 type TableMethod = Pick<
@@ -41,7 +42,7 @@ function Dilution({ row }: { row: ResultRow }) {
 }
 
 /** What is not quantified has no place, whatever number lies behind it. */
-const placeOf = ({ reportCase, measured }: UnknownResult) =>
+const placeOf = ({ reportCase, measured }: SampleResult) =>
   reportCase === 'notQuantified' ? null : (measured?.value ?? null);
 
 /** On a narrow screen the result stands under the name of its sample, where it is seen without scrolling. */
@@ -109,9 +110,11 @@ function Row({
         <ResultCell result={result} aligned={aligned} />
       </Td>
       <Td numeric>{k === undefined ? '' : significantText(k, 3)}</Td>
-      <Td>
-        <PlaceOnCurve value={placeOf(result)} {...method.range} tone={tone} />
-      </Td>
+      {method.range && (
+        <Td>
+          <PlaceOnCurve value={placeOf(result)} {...method.range} tone={tone} />
+        </Td>
+      )}
       <Td>
         <MeaningCell result={result} range={method.range} unit={method.unit} />
       </Td>
@@ -120,8 +123,8 @@ function Row({
 }
 
 /**
- * Samples and what came out: readings with their light discs, dilution, value ± U, the place on the curve, and
- * what it means. The unit and its basis stand in the head of the column; ± is the expanded uncertainty.
+ * Samples and what came out: readings with their light discs, dilution, value ± U, the place on the curve where
+ * there is one, and what it means. The unit and its basis stand in the head of the column; ± is the expanded uncertainty.
  */
 export function ResultsTable({
   rows,
@@ -144,7 +147,7 @@ export function ResultsTable({
             c in the sample ± U, {unitWithBasis(method.unit, method.basis)}
           </Th>
           <Th numeric>k</Th>
-          <Th>Place on the curve</Th>
+          {method.range && <Th>Place on the curve</Th>}
           <Th>What it means</Th>
         </tr>
       </thead>

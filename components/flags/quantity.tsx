@@ -1,6 +1,7 @@
 import { classNames } from '@/components/ui/class-names';
 import { unitWithBasis } from '@/lib/batch/unit-text';
-import type { ReportCase, UnknownResult } from '@/lib/engine';
+import type { SampleResult } from '@/lib/batch/yardstick';
+import type { ReportCase } from '@/lib/engine';
 import { formatPlusMinus } from '@/lib/format/quantity';
 import { significantText } from '@/lib/format/round';
 
@@ -20,7 +21,7 @@ const WITHOUT_NUMBER: Readonly<Partial<Record<ReportCase, string>>> = {
 };
 
 /** The words that stand where a result has no number, with the advice of a stop. */
-function WithoutNumber({ result, size }: { result: UnknownResult; size: string }) {
+function WithoutNumber({ result, size }: { result: SampleResult; size: string }) {
   const { reportCase, report, advice } = result;
   const words = WITHOUT_NUMBER[reportCase];
   return (
@@ -42,7 +43,7 @@ export function Quantity({
   confidence,
   large = false,
 }: {
-  result: UnknownResult;
+  result: SampleResult;
   unit: string;
   basis: string;
   confidence: number;

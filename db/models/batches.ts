@@ -1,5 +1,6 @@
 import type { CreationOptional, InferAttributes, InferCreationAttributes, Model, Sequelize } from 'sequelize';
-import type { DilutionStep, ReadingRule, Signal, UnknownResult } from '@/lib/engine';
+import type { SampleResult } from '@/lib/batch/yardstick';
+import type { DilutionStep, ReadingRule, Signal } from '@/lib/engine';
 import {
   id,
   json,
@@ -21,7 +22,9 @@ type Row<T extends Model> = Model<InferAttributes<T>, InferCreationAttributes<T>
 export interface BatchRow extends Row<BatchRow> {
   id: CreationOptional<string>;
   notebookId: string;
-  curveId: string;
+  /** A batch is read on a curve or on a known absorptivity; the table holds to exactly one. */
+  curveId: string | null;
+  absorptivityId: string | null;
   lineageId: string;
   version: number;
   supersedesId: string | null;
@@ -38,7 +41,8 @@ export const defineBatch = (sequelize: Sequelize) =>
     columns({
       id,
       notebookId: reference,
-      curveId: reference,
+      curveId: optionalReference,
+      absorptivityId: optionalReference,
       lineageId: reference,
       version: whole,
       supersedesId: optionalReference,
@@ -63,7 +67,7 @@ export interface DeterminationRow extends Row<DeterminationRow> {
   pathLengthUMm: number | null;
   dilution: DilutionStep[];
   /** What the engine answered on the server from the stored readings. */
-  result: UnknownResult;
+  result: SampleResult;
   engineVersion: string;
   version: CreationOptional<number>;
   voidedAt: CreationOptional<Date | null>;

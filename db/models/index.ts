@@ -3,6 +3,7 @@ import { defineLaboratory, definePerson, defineSession, definePasswordLink, defi
 import { defineNotebook, defineMembership, defineShareLink, defineShareSession } from './notebooks';
 import { defineSourceFile, defineSpectrum } from './spectra';
 import { defineMethod, defineCurve, defineStandard } from './curves';
+import { defineAbsorptivity } from './absorptivities';
 import { defineBatch, defineDetermination, defineReading } from './batches';
 import { defineRecordEntry } from './record-entry';
 
@@ -23,6 +24,7 @@ export function defineModels(sequelize: Sequelize) {
     Method: defineMethod(sequelize),
     Curve: defineCurve(sequelize),
     Standard: defineStandard(sequelize),
+    Absorptivity: defineAbsorptivity(sequelize),
     Batch: defineBatch(sequelize),
     Determination: defineDetermination(sequelize),
     Reading: defineReading(sequelize),

@@ -2,7 +2,8 @@ import { AppError } from '@/lib/errors';
 import type { Actor } from '@/lib/policies/actor';
 import type { NewBatchVersion } from '@/lib/schemas/batch';
 import { changeFor, createFor, listFor, loadFor } from '../access';
-import { usableCurve } from '../batch-curves';
+import { methodOfCurve } from '../batch-method';
+import { usableCurve, yardstickOf } from '../batch-yardsticks';
 import {
   makerOf,
   readingsOf,
@@ -13,10 +14,9 @@ import {
 } from '../determination-rows';
 import type { BatchRow, DeterminationRow, ReadingRow } from '../models/batches';
 import type { CurveRow, MethodRow } from '../models/curves';
-import { methodOfCurve, readingOf } from '../spectrum-samples';
+import { readingOf } from '../spectrum-samples';
 import { inTransaction } from '../sequelize';
 import { idOfSubmission, keyOfContent } from '../submission';
-import { curveRequestOf } from './curves';
 import { readingsFromSpectra } from './spectra';
 
 const sameRule = (a: MethodRow, b: MethodRow) =>
@@ -33,6 +33,14 @@ function refuseOtherMethod(from: MethodRow, to: MethodRow, readings: readonly Re
     throw refuse(
       `This curve is read at ${to.wavelengthNm} nm by its own rule, while readings of this batch were typed for ${from.wavelengthNm} nm. Make a new batch and type its readings there`,
     );
+}
+
+/** Readings taken for an absorptivity have no standards beside them: they start afresh on a curve. */
+function curveIdOf({ curveId }: BatchRow): string {
+  if (curveId !== null) return curveId;
+  const detail =
+    'This batch is read on a known absorptivity. Make a new batch on the curve and enter its readings there';
+  throw new AppError('INVALID_INPUT', detail, [{ pointer: '/curveId', detail }]);
 }
 
 interface Moving {
@@ -80,6 +88,7 @@ async function newVersion(actor: Actor, old: BatchRow, curve: CurveRow, id: stri
     id,
     notebookId: old.notebookId,
     curveId: curve.id,
+    absorptivityId: null,
     lineageId: old.lineageId,
     version: old.version + 1,
     supersedesId: old.id,
@@ -112,7 +121,7 @@ export function createBatchVersion(
     const moving = {
       actor,
       batch: old,
-      from: await methodOfCurve(actor, old.curveId),
+      from: await methodOfCurve(actor, curveIdOf(old)),
       to: await methodOfCurve(actor, target.id),
     };
     const rows = await listFor(actor, 'determination', notebookId, {
@@ -121,10 +130,10 @@ export function createBatchVersion(
     });
     const samples = await movedSamples(moving, rows);
     const batch = await newVersion(actor, old, target, id);
-    const curve = await curveRequestOf(actor, target.id);
+    const yardstick = await yardstickOf(actor, batch);
     const idAt = (index: number) => idOfSubmission(actor, key, index + 1);
     if (samples.length > 0)
-      await saveSamples(actor, { batch, curve, firstPosition: 1, idAt }, samples, input.reason);
+      await saveSamples(actor, { batch, yardstick, firstPosition: 1, idAt }, samples, input.reason);
     await changeFor(actor, old, { status: 'superseded' }, input.reason);
     return { id, notebookId };
   });

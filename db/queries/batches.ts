@@ -2,9 +2,11 @@ import { AppError } from '@/lib/errors';
 import type { Actor } from '@/lib/policies/actor';
 import type { NewBatch, VoidBatch } from '@/lib/schemas/batch';
 import type { Page, PageQuery } from '@/lib/schemas/page-query';
-import type { BatchHead, BatchMethodView, BatchSummary, BatchView } from '@/lib/views/batch';
+import type { Yardstick } from '@/lib/batch/yardstick';
+import type { BatchHead, BatchSummary, BatchView } from '@/lib/views/batch';
 import { changeFor, createFor, listFor, loadFor, may } from '../access';
-import { curvesOfBatches, usableCurve } from '../batch-curves';
+import { batchMethod } from '../batch-method';
+import { absorptivitiesOfBatches, curvesOfBatches, refuseUnusable, yardstickOf } from '../batch-yardsticks';
 import { makerOf, readingsOf } from '../determination-rows';
 import type { BatchRow, ReadingRow } from '../models/batches';
 import { pageOf } from '../page';
@@ -13,7 +15,6 @@ import { inTransaction } from '../sequelize';
 import { idOfSubmission, keyOfContent } from '../submission';
 import { batchSummary } from '../views/batch';
 import { determinationView, readingView } from '../views/determination';
-import { curveRequestOf } from './curves';
 
 /** How many samples that are not void stand in each of some batches. */
 async function sampleCounts(actor: Actor, notebookId: string, batchId: readonly string[]) {
@@ -36,14 +37,20 @@ async function summaries(
     notebookId,
     rows.map((row) => row.curveId),
   );
+  const absorptivities = await absorptivitiesOfBatches(
+    actor,
+    notebookId,
+    rows.map((row) => row.absorptivityId),
+  );
   const counts = await sampleCounts(
     actor,
     notebookId,
     rows.map((row) => row.id),
   );
-  return rows.flatMap((row) => {
-    const curve = curves.get(row.curveId);
-    return curve ? [batchSummary(row, curve, counts.get(row.id) ?? 0)] : [];
+  return rows.map((row) => {
+    const curve = curves.get(row.curveId ?? '') ?? null;
+    const absorptivity = absorptivities.get(row.absorptivityId ?? '') ?? null;
+    return batchSummary(row, { curve, absorptivity }, counts.get(row.id) ?? 0);
   });
 }
 
@@ -59,25 +66,6 @@ export async function listBatches(
     (row) => row,
   );
   return { items: await summaries(actor, notebookId, page.items), nextCursor: page.nextCursor };
-}
-
-async function methodOf(actor: Actor, curveId: string): Promise<BatchMethodView> {
-  const curve = await loadFor(actor, 'curve', 'read', curveId);
-  const method = await loadFor(actor, 'method', 'read', curve.methodId);
-  const request = await curveRequestOf(actor, curveId);
-  return {
-    analyte: method.analyte,
-    basis: method.basis,
-    unit: request.unit,
-    wavelengthNm: method.wavelengthNm,
-    readingRule: method.readingRule,
-    pathLengthMm: method.pathLengthMm,
-    confidence: method.confidence,
-    absorbanceLimit: method.absorbanceLimit,
-    signal: request.signal,
-    hazardNote: method.hazardNote,
-    range: curve.result.curve.range,
-  };
 }
 
 async function determinationsOf(actor: Actor, batch: BatchRow) {
@@ -98,7 +86,7 @@ async function determinationsOf(actor: Actor, batch: BatchRow) {
 async function headOf(actor: Actor, row: BatchRow): Promise<BatchHead> {
   const [[summary], method, versions] = await Promise.all([
     summaries(actor, row.notebookId, [row]),
-    methodOf(actor, row.curveId),
+    batchMethod(actor, row),
     listFor(actor, 'batch', row.notebookId, {
       where: { lineageId: row.lineageId },
       attributes: ['id', 'version', 'supersedesId'],
@@ -121,6 +109,11 @@ export async function loadBatchHead(actor: Actor, id: string): Promise<BatchHead
   return headOf(actor, await loadFor(actor, 'batch', 'read', id));
 }
 
+/** What the engine is asked for a batch, for pages that calculate while a person types. @throws AppError NOT_FOUND */
+export async function yardstickOfBatch(actor: Actor, id: string): Promise<Yardstick> {
+  return yardstickOf(actor, await loadFor(actor, 'batch', 'read', id));
+}
+
 /** A batch with its samples and what came out. @throws AppError NOT_FOUND */
 export async function loadBatch(actor: Actor, id: string): Promise<BatchView> {
   const row = await loadFor(actor, 'batch', 'read', id);
@@ -128,17 +121,19 @@ export async function loadBatch(actor: Actor, id: string): Promise<BatchView> {
   return { ...head, determinations };
 }
 
-/** A batch on a curve of the same notebook; the same form sent twice makes one. @throws AppError */
+/** A batch on a curve or a known absorptivity of the same notebook; the same form sent twice makes one. @throws AppError */
 export function createBatch(actor: Actor, input: NewBatch): Promise<{ id: string }> {
   return inTransaction(async () => {
-    const { notebookId, curveId, title, note } = input;
-    const id = idOfSubmission(actor, keyOfContent(input.submissionKey, [notebookId, curveId, title, note]));
+    const { notebookId, title, note } = input;
+    const on = { curveId: input.curveId ?? null, absorptivityId: input.absorptivityId ?? null };
+    const content = [notebookId, on.curveId ?? on.absorptivityId, title, note];
+    const id = idOfSubmission(actor, keyOfContent(input.submissionKey, content));
     const notebook = await loadFor(actor, 'notebook', 'edit', notebookId);
     const [sent] = await listFor(actor, 'batch', notebookId, { where: { id } });
     if (sent) return { id };
-    await usableCurve(actor, notebookId, curveId);
+    await refuseUnusable(actor, notebookId, on);
     const createdById = makerOf(actor, notebook.ownerId);
-    const values = { id, notebookId, curveId, lineageId: id, version: 1, supersedesId: null, title, note };
+    const values = { id, notebookId, ...on, lineageId: id, version: 1, supersedesId: null, title, note };
     await createFor(actor, 'batch', { ...values, status: 'open', createdById });
     return { id };
   });

@@ -10,7 +10,7 @@ import type { CurveDraft, SaveCurve } from '@/lib/schemas/curve';
 import { changeFor, listFor, loadFor } from '../access';
 import { saveCurveRows } from '../curve-rows';
 import type { CurveRow } from '../models/curves';
-import { namesOf } from '../names';
+import { refuseUnlessNewest } from '../newest-version';
 import { inTransaction } from '../sequelize';
 import { idOfSubmission } from '../submission';
 import { readingsFromSpectra } from './spectra';
@@ -49,17 +49,8 @@ async function newestVersion(actor: Actor, notebookId: string, baseId: string): 
     attributes: { exclude: ['result'] },
     limit: 1,
   });
-  if (!newest || newest.id === base.id) return base;
-  const who = (await namesOf([newest.createdById])).get(newest.createdById) ?? 'Somebody';
-  const when = newest.createdAt.toISOString().slice(0, 16).replace('T', ' ');
-  throw new AppError(
-    'CHANGED_MEANWHILE',
-    `${who} saved version ${newest.version} on ${when} UTC, after you opened this form. Nothing of yours is lost: it stands below`,
-    [
-      { pointer: '/newerId', detail: newest.id },
-      { pointer: '/newerVersion', detail: String(newest.version) },
-    ],
-  );
+  await refuseUnlessNewest(base, newest);
+  return base;
 }
 
 /** The same form sent twice has the same id; another content under the same key is another curve. */

@@ -1,13 +1,15 @@
 import { AppError } from '@/lib/errors';
 import type { Actor } from '@/lib/policies/actor';
 import type { ChangeConditions, CorrectReading, VoidDetermination } from '@/lib/schemas/determination';
+import { dilutionText } from '@/lib/batch/dilution-text';
 import type { UnknownSample } from '@/lib/batch/unknown-request';
+import { signalOf } from '@/lib/batch/yardstick';
 import { changeFor, createFor, loadFor } from '../access';
+import { yardstickOf, type OnWhat } from '../batch-yardsticks';
 import { changesSince } from '../determination-history';
 import { calculate, makerOf, newReading, readingsOf, refuseUnlessOpen } from '../determination-rows';
 import type { DeterminationRow, ReadingRow } from '../models/batches';
 import { inTransaction } from '../sequelize';
-import { curveRequestOf } from './curves';
 
 /** Where a changed determination stands, so that the caller knows which pages show it. */
 export interface Changed {
@@ -17,7 +19,7 @@ export interface Changed {
 
 interface Opened {
   readonly row: DeterminationRow;
-  readonly curveId: string;
+  readonly on: OnWhat;
   /** All of them, the superseded too. */
   readonly readings: readonly ReadingRow[];
   readonly current: readonly ReadingRow[];
@@ -34,15 +36,15 @@ async function open(actor: Actor, id: string, seenVersion: number): Promise<Open
     throw new AppError('CHANGED_MEANWHILE', `This determination is void: ${row.voidReason ?? ''}`);
   refuseUnlessOpen(batch);
   const current = readings.filter((reading) => !reading.supersededAt);
-  return { row, curveId: batch.curveId, readings, current };
+  return { row, on: batch, readings, current };
 }
 
 type Conditions = Pick<UnknownSample, 'sample' | 'pathLengthMm' | 'dilution' | 'readings'>;
 
 /** The result again, from stored readings with the one change in them. */
-async function again(actor: Actor, { row, curveId }: Opened, change: Conditions) {
-  const curve = await curveRequestOf(actor, curveId);
-  const [outcome] = calculate(curve, [{ ...change, pathLengthUMm: row.pathLengthUMm }]);
+async function again(actor: Actor, { row, on }: Opened, change: Conditions) {
+  const yardstick = await yardstickOf(actor, on);
+  const [outcome] = calculate(yardstick, [{ ...change, pathLengthUMm: row.pathLengthUMm }]);
   if (!outcome) throw new AppError('CALCULATION_REFUSED');
   return { ...outcome, version: row.version + 1 };
 }
@@ -61,7 +63,7 @@ export function correctReading(actor: Actor, input: CorrectReading): Promise<Cha
     const typed = (old.minusValue ?? null) === null;
     if (typed && old.value === input.reading.value && old.gapText === input.reading.gapText)
       throw sameAsBefore('/reading', 'This is the reading as it stands. Enter another one, or leave it');
-    const { signal } = await curveRequestOf(actor, opened.curveId);
+    const signal = signalOf(await yardstickOf(actor, opened.on));
     const corrected = { ...input.reading, signal, origin: 'typed', spectrumId: null, rule: null } as const;
     const readings = current.map((reading) => (reading.id === old.id ? corrected : reading));
     await changeFor(actor, row, await again(actor, opened, { ...conditionsOf(row), readings }), input.reason);
@@ -111,9 +113,9 @@ const conditionsOf = ({ sample, pathLengthMm, dilution }: DeterminationRow) => (
   dilution,
 });
 
+/** Volumes and what is known of the vessels; by their text, in which both stand. */
 const sameSteps = (a: ChangeConditions['dilution'], b: ChangeConditions['dilution']) =>
-  a.length === b.length &&
-  a.every((step, index) => step.takenMl === b[index]?.takenMl && step.toMl === b[index]?.toMl);
+  dilutionText(a) === dilutionText(b);
 
 function sameAsBefore(pointer: string, detail: string): AppError {
   return new AppError('INVALID_INPUT', detail, [{ pointer, detail }]);

@@ -1,21 +1,21 @@
 import { AppError } from '@/lib/errors';
-import type { CurveRequest } from '@/lib/engine';
+import { signalOf, type Yardstick } from '@/lib/batch/yardstick';
 import { LIMITS } from '@/lib/limits';
 import type { Actor } from '@/lib/policies/actor';
 import type { AddSpectrumSamples, AddTypedSamples } from '@/lib/schemas/determination';
 import type { Page, PageQuery } from '@/lib/schemas/page-query';
 import type { DeterminationDetail, DeterminationView, SpectrumPreview } from '@/lib/views/determination';
 import { countFor, listFor, loadFor } from '../access';
-import { usableCurve } from '../batch-curves';
+import { readingRuleOf } from '../batch-method';
+import { refuseUnusable, yardstickOf } from '../batch-yardsticks';
 import { historyOf } from '../determination-history';
 import { readingsOf, refuseUnlessOpen, saveSamples, type NewSample } from '../determination-rows';
 import type { BatchRow } from '../models/batches';
 import { pageOf } from '../page';
 import { inTransaction } from '../sequelize';
-import { methodOfCurve, readingOf, samplesFromSpectra } from '../spectrum-samples';
+import { readingOf, samplesFromSpectra } from '../spectrum-samples';
 import { idOfSubmission, keyOfContent } from '../submission';
 import { determinationView, readingView } from '../views/determination';
-import { curveRequestOf } from './curves';
 import { readingsFromSpectra } from './spectra';
 
 /** The determinations of a batch, newest first, void ones included. @throws AppError NOT_FOUND */
@@ -73,7 +73,7 @@ export interface Added {
 function add(
   actor: Actor,
   { batchId, submissionKey, samples: sent }: Adding,
-  samplesOn: (batch: BatchRow, curve: CurveRequest) => Promise<readonly NewSample[]> | readonly NewSample[],
+  samplesOn: (batch: BatchRow, yardstick: Yardstick) => Promise<readonly NewSample[]> | readonly NewSample[],
 ): Promise<Added> {
   return inTransaction(async () => {
     const batch = await loadFor(actor, 'batch', 'edit', batchId);
@@ -86,28 +86,28 @@ function add(
     });
     if (saved.length > 0) return { notebookId, count: 0 };
     refuseUnlessOpen(batch);
-    await usableCurve(actor, notebookId, batch.curveId);
-    const curve = await curveRequestOf(actor, batch.curveId);
-    const samples = await samplesOn(batch, curve);
+    await refuseUnusable(actor, notebookId, batch);
+    const yardstick = await yardstickOf(actor, batch);
+    const samples = await samplesOn(batch, yardstick);
     const present = await countFor(actor, 'determination', notebookId, { batchId });
     if (present + samples.length > LIMITS.determinations)
       throw new AppError(
         'INVALID_INPUT',
         `A batch takes ${LIMITS.determinations} samples. Make a second batch`,
       );
-    await saveSamples(actor, { batch, curve, firstPosition: present + 1, idAt }, samples);
+    await saveSamples(actor, { batch, yardstick, firstPosition: present + 1, idAt }, samples);
     return { notebookId, count: samples.length };
   });
 }
 
-/** Add samples whose readings were typed or pasted, in the signal of the curve. @throws AppError, EngineError */
+/** Add samples whose readings were typed or pasted, in the signal the batch is read in. @throws AppError, EngineError */
 export function addTypedSamples(actor: Actor, input: AddTypedSamples): Promise<Added> {
-  return add(actor, input, (_batch, curve) =>
+  return add(actor, input, (_batch, yardstick) =>
     input.samples.map((sample) => ({
       ...sample,
       readings: sample.readings.map((reading) => ({
         ...reading,
-        signal: curve.signal,
+        signal: signalOf(yardstick),
         origin: 'typed' as const,
         spectrumId: null,
         rule: null,
@@ -116,22 +116,22 @@ export function addTypedSamples(actor: Actor, input: AddTypedSamples): Promise<A
   );
 }
 
-/** Add samples read off spectra of the notebook by the rule of the curve's method. @throws AppError, EngineError */
+/** Add samples read off spectra of the notebook by the rule of the batch. @throws AppError, EngineError */
 export function addSpectrumSamples(actor: Actor, input: AddSpectrumSamples): Promise<Added> {
   return add(actor, input, (batch) => samplesFromSpectra(actor, batch, input.samples));
 }
 
-/** What spectra read by the rule of a batch's method, as they would be kept. @throws AppError NOT_FOUND */
+/** What spectra read by the rule of a batch, as they would be kept. @throws AppError NOT_FOUND */
 export async function readSpectraForBatch(
   actor: Actor,
   batchId: string,
   spectrumIds: readonly string[],
 ): Promise<SpectrumPreview[]> {
   const batch = await loadFor(actor, 'batch', 'read', batchId);
-  const method = await methodOfCurve(actor, batch.curveId);
-  const read = await readingsFromSpectra(actor, batch.notebookId, spectrumIds, method.readingRule);
+  const rule = await readingRuleOf(actor, batch);
+  const read = await readingsFromSpectra(actor, batch.notebookId, spectrumIds, rule);
   return read.map((one) => {
-    const { value, minusValue = null, gapText } = readingOf(one, method.readingRule);
+    const { value, minusValue = null, gapText } = readingOf(one, rule);
     return {
       spectrumId: one.spectrumId,
       value,

@@ -1,6 +1,8 @@
-import type { Flag, FlagCode, ReportCase, UnknownResult } from '@/lib/engine';
+import type { Flag, FlagCode, ReportCase } from '@/lib/engine';
 import { lightThroughText } from '@/lib/format/optical';
 import { significantText } from '@/lib/format/round';
+import type { StandardsRange } from '@/lib/views/batch';
+import type { SampleResult } from './yardstick';
 
 export type MeaningTone = 'order' | 'decide' | 'stop';
 
@@ -36,34 +38,37 @@ const TOLD: Readonly<Record<ReportCase, readonly FlagCode[]>> = {
   ],
 };
 
-const dilute = ({ advice }: UnknownResult) => (advice ? `. Dilute ${advice}` : '. Read it again');
+const dilute = ({ advice }: SampleResult) => (advice ? `. Dilute ${advice}` : '. Read it again');
 
-function light({ absorbanceAsRead }: UnknownResult): string {
+function light({ absorbanceAsRead }: SampleResult): string {
   if (absorbanceAsRead === null) return 'The instrument gave no number';
   return `${lightThroughText(absorbanceAsRead)} of the light gets through`;
 }
 
-function sentenceOf(result: UnknownResult, range: { min: number; max: number }, unit: string): string {
+/** Without standards there is nothing to lie within; what a result rests on is said instead. */
+function placeSentence(result: SampleResult, range: StandardsRange | null, unit: string): string {
+  if (result.reportCase === 'value' || range === null)
+    return range === null ? 'By the known absorptivity' : 'Within the standards';
+  return result.reportCase === 'belowLowestStandard'
+    ? `Detected, below the lowest standard (${significantText(range.min, 4)} ${unit})`
+    : `Above the top standard (${significantText(range.max, 4)} ${unit})${dilute(result)}`;
+}
+
+function sentenceOf(result: SampleResult, range: StandardsRange | null, unit: string): string {
   switch (result.reportCase) {
     case 'value':
-      return 'Within the standards';
     case 'belowLowestStandard':
-      return `Detected, below the lowest standard (${significantText(range.min, 4)} ${unit})`;
+    case 'aboveTopStandard':
+      return placeSentence(result, range, unit);
     case 'belowCriticalValue':
       return 'Not told from a blank';
-    case 'aboveTopStandard':
-      return `Above the top standard (${significantText(range.max, 4)} ${unit})${dilute(result)}`;
     case 'notQuantified':
       return light(result) + dilute(result);
   }
 }
 
 /** What a result means for the person who measured it. A stop says what to do and holds no concentration. */
-export function meaningOf(
-  result: UnknownResult,
-  range: { readonly min: number; readonly max: number },
-  unit: string,
-): Meaning {
+export function meaningOf(result: SampleResult, range: StandardsRange | null, unit: string): Meaning {
   const told = TOLD[result.reportCase];
   const code = result.flags.find((flag) => told.includes(flag.code))?.code;
   const others = result.flags.filter((flag) => !told.includes(flag.code));

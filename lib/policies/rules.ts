@@ -49,6 +49,7 @@ export const RULES = {
   method: CONTENT,
   curve: CONTENT,
   standard: CONTENT,
+  absorptivity: CONTENT,
   batch: CONTENT,
   determination: CONTENT,
   reading: CONTENT,

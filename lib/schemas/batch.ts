@@ -18,13 +18,27 @@ export const spectrumReadingsQuery = z.object({
     .pipe(z.array(z.uuid()).min(1).max(LIMITS.pageSize)),
 });
 
-export const newBatch = z.object({
-  notebookId: z.uuid(),
-  submissionKey,
-  curveId: z.uuid('Choose the standard curve that the samples are read on'),
-  title: z.string().trim().min(1, 'Give the batch a title').max(LIMITS.title),
-  note: z.string().trim().max(LIMITS.note).default(''),
-});
+/** A field that may be missing or empty. */
+const optionalId = (sentence: string) =>
+  z
+    .union([z.literal(''), z.uuid(sentence)], sentence)
+    .transform((id) => id || undefined)
+    .optional();
+
+/** A batch is read on a standard curve or on a known absorptivity: exactly one of the two. */
+export const newBatch = z
+  .object({
+    notebookId: z.uuid(),
+    submissionKey,
+    curveId: optionalId('Choose the standard curve that the samples are read on'),
+    absorptivityId: optionalId('Choose the known absorptivity that the samples are read on'),
+    title: z.string().trim().min(1, 'Give the batch a title').max(LIMITS.title),
+    note: z.string().trim().max(LIMITS.note).default(''),
+  })
+  .refine(({ curveId, absorptivityId }) => (curveId === undefined) !== (absorptivityId === undefined), {
+    path: ['curveId'],
+    error: 'Choose the standard curve or the known absorptivity that the samples are read on',
+  });
 export type NewBatch = z.infer<typeof newBatch>;
 
 export const voidBatch = z.object({ batchId: z.uuid(), reason });

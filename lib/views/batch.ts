@@ -1,15 +1,20 @@
 import type { DeterminationView } from './determination';
-import type { ConcentrationUnit, ReadingRule, Signal } from '@/lib/engine';
+import type { AbsorptivityKind, ConcentrationUnit, Flag, ReadingRule, Signal } from '@/lib/engine';
 
-/** The version of a standard curve that a batch is read on, and where it stands among its versions. */
-export interface BatchCurveView {
+/** The version of a curve or of a known absorptivity that a batch is read on, and where it stands among the others. */
+export interface YardstickView {
   readonly id: string;
   readonly title: string;
   readonly version: number;
   readonly status: 'saved' | 'superseded' | 'void';
   readonly voidReason: string | null;
-  /** The newest saved version of the same curve, when it is another one. */
+  /** The newest saved version of the same, when it is another one. */
   readonly newer: { readonly id: string; readonly version: number } | null;
+}
+
+export interface StandardsRange {
+  readonly min: number;
+  readonly max: number;
 }
 
 export interface BatchSummary {
@@ -20,13 +25,27 @@ export interface BatchSummary {
   readonly version: number;
   readonly status: 'open' | 'superseded' | 'void';
   readonly voidReason: string | null;
-  readonly curve: BatchCurveView;
+  /** What it is read on: exactly one of the two is there. */
+  readonly curve: YardstickView | null;
+  readonly absorptivity: YardstickView | null;
   /** Samples that are not void. */
   readonly sampleCount: number;
   readonly createdAt: string;
 }
 
-/** What a batch needs to know of its curve's method. */
+/** The known absorptivity behind the results of a batch. */
+export interface BatchAbsorptivityView {
+  readonly kind: AbsorptivityKind;
+  readonly value: number;
+  /** Standard uncertainty; null when none was stated. */
+  readonly u: number | null;
+  readonly source: string;
+  readonly conditions: string;
+  /** What the engine says of it, whatever the samples. */
+  readonly flags: readonly Flag[];
+}
+
+/** What a batch needs to know of how its samples are read. */
 export interface BatchMethodView {
   readonly analyte: string;
   readonly basis: string;
@@ -38,8 +57,10 @@ export interface BatchMethodView {
   readonly absorbanceLimit: number;
   readonly signal: Signal;
   readonly hazardNote: string;
-  /** Lowest non-zero and highest standard, in the measured solution. */
-  readonly range: { readonly min: number; readonly max: number };
+  /** Lowest non-zero and highest standard, in the measured solution; null where no standards were measured. */
+  readonly range: StandardsRange | null;
+  /** Null on a curve. */
+  readonly knownAbsorptivity: BatchAbsorptivityView | null;
 }
 
 /** A batch without its samples. */

@@ -1,4 +1,5 @@
-import type { DilutionStep, ReadingRule, Signal, UnknownResult } from '@/lib/engine';
+import type { SampleResult } from '@/lib/batch/yardstick';
+import type { DilutionStep, ReadingRule, Signal } from '@/lib/engine';
 
 /** One reading of an unknown as it is kept, with where it came from. */
 export interface DeterminationReadingView {
@@ -34,7 +35,7 @@ export interface DeterminationView {
   readonly dilution: readonly DilutionStep[];
   /** Readings in use; those that a correction replaced are in `DeterminationDetail.superseded`. */
   readonly readings: readonly DeterminationReadingView[];
-  readonly result: UnknownResult;
+  readonly result: SampleResult;
   readonly engineVersion: string;
   /** Rises with every change; a change must name the one it was made from. */
   readonly version: number;

@@ -72,6 +72,7 @@ export function exampleBatch(samples: readonly UnknownSample[], title = 'Weir sa
     status: 'open',
     voidReason: null,
     curve: { id: 'curve', title: 'Iron, 510 nm', version: 2, status: 'saved', voidReason: null, newer: null },
+    absorptivity: null,
     sampleCount: samples.length,
     createdAt: '2026-12-01T09:00:00.000Z',
     method: {
@@ -86,6 +87,7 @@ export function exampleBatch(samples: readonly UnknownSample[], title = 'Weir sa
       signal: 'absorbance',
       hazardNote: '',
       range: { min: 0.5, max: 4 },
+      knownAbsorptivity: null,
     },
     determinations: samples.map(determination),
     mayEdit: true,

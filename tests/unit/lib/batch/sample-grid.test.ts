@@ -67,7 +67,10 @@ describe('a row of the grid', () => {
 describe('results while typing', () => {
   test('a sample that the engine refuses leaves the others standing', () => {
     const refused = { ...typedSample('bad', [0.3]), pathLengthMm: 0 };
-    const live = liveResults(EXAMPLE_CURVE, [typedSample('good', [0.4]), refused]);
+    const live = liveResults({ kind: 'curve', request: EXAMPLE_CURVE }, [
+      typedSample('good', [0.4]),
+      refused,
+    ]);
     expect(live.map(({ ok, sample }) => [sample.sample, ok])).toEqual([
       ['good', true],
       ['bad', false],
@@ -76,7 +79,7 @@ describe('results while typing', () => {
     expect(told && !told.ok && told.message).toMatch(/path length/i);
   });
   test('no samples, no calculation', () => {
-    expect(liveResults(EXAMPLE_CURVE, [])).toEqual([]);
+    expect(liveResults({ kind: 'curve', request: EXAMPLE_CURVE }, [])).toEqual([]);
   });
 });
 

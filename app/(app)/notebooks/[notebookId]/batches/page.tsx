@@ -11,6 +11,7 @@ import { RowHead, Table, Td, Th } from '@/components/ui/table';
 import { laboratory } from '@/db/entry/settings';
 import { listBatches } from '@/db/queries/batches';
 import { readNotebook } from '@/db/queries/notebooks';
+import { readOn, YARDSTICK_NOUN } from '@/lib/batch/read-on';
 import { formatDate } from '@/lib/format/dates';
 import { pageQuery } from '@/lib/schemas/page-query';
 import type { BatchSummary } from '@/lib/views/batch';
@@ -41,7 +42,7 @@ export default async function BatchesPage({
     <>
       <PageHeader
         title="Batches"
-        lead="Samples read on a standard curve, each with its uncertainty."
+        lead="Samples read on a standard curve or by a known absorptivity, each with its uncertainty."
         actions={notebook.mayEdit && create}
       />
       <Card flush title="Newest first">
@@ -49,7 +50,7 @@ export default async function BatchesPage({
           <BatchTable batches={page.items} base={base} timeZone={timeZone} />
         ) : (
           <EmptyState title="No batches yet" action={notebook.mayEdit && create}>
-            A batch holds the samples that are read on one standard curve.
+            A batch holds the samples that are read on one standard curve, or by one known absorptivity.
           </EmptyState>
         )}
         <Pagination
@@ -76,7 +77,7 @@ function BatchTable({
         <tr>
           <Th>Title</Th>
           <Th numeric>Version</Th>
-          <Th>Standard curve</Th>
+          <Th>Read on</Th>
           <Th numeric>Samples</Th>
           <Th>Made</Th>
           <Th>State</Th>
@@ -92,7 +93,7 @@ function BatchTable({
             </RowHead>
             <Td numeric>{batch.version}</Td>
             <Td className="whitespace-nowrap">
-              {batch.curve.title} <span className="text-ink-2">version {batch.curve.version}</span>
+              {readOn(batch).title} <span className="text-ink-2">version {readOn(batch).version}</span>
             </Td>
             <Td numeric>{batch.sampleCount}</Td>
             <Td className="whitespace-nowrap text-ink-2">{formatDate(batch.createdAt, timeZone)}</Td>
@@ -109,10 +110,12 @@ function BatchTable({
 function BatchState({ batch }: { batch: BatchSummary }) {
   if (batch.status === 'void') return <Pill tone="stop">void</Pill>;
   if (batch.status === 'superseded') return <Pill tone="plain">superseded</Pill>;
-  if (batch.curve.status === 'void') return <Pill tone="stop">curve void</Pill>;
-  const words = curveWords(batch.curve);
+  const on = readOn(batch);
+  const noun = YARDSTICK_NOUN[on.kind];
+  if (on.status === 'void') return <Pill tone="stop">{noun} void</Pill>;
+  const words = curveWords(on, on.kind);
   return words ? (
-    <Pill tone="decide">newer curve</Pill>
+    <Pill tone="decide">newer {noun}</Pill>
   ) : (
     <Pill tone="order" quiet>
       in use

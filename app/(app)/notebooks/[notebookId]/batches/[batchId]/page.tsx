@@ -41,7 +41,7 @@ export default async function BatchPage({ params }: PageProps<'/notebooks/[noteb
       <CurveNotice batch={batch} base={base} />
       <BatchFacts batch={batch} base={base} />
       <Results batch={batch} here={here} works={works} />
-      <DriftNotice />
+      <DriftNotice batch={batch} />
     </>
   );
 }
@@ -58,7 +58,8 @@ function BatchStatus({ batch }: { batch: BatchView }) {
 }
 
 function BatchActions({ batch, here, works }: { batch: BatchView; here: string; works: boolean }) {
-  const compare = batch.determinations.length > 0 && (
+  const onCurve = batch.curve !== null;
+  const compare = onCurve && batch.determinations.length > 0 && (
     <LinkButton href={`${here}/compare`}>Models and limits</LinkButton>
   );
   if (!works) return compare;
@@ -66,7 +67,7 @@ function BatchActions({ batch, here, works }: { batch: BatchView; here: string; 
     <>
       {compare}
       <VoidBatch batchId={batch.id} title={batch.title} />
-      {batch.determinations.length > 0 && (
+      {onCurve && batch.determinations.length > 0 && (
         <LinkButton href={`${here}/version`}>Read on another curve</LinkButton>
       )}
       <LinkButton href={`${here}/add`} variant="primary">

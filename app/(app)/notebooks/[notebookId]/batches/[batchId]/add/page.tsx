@@ -6,9 +6,9 @@ import { PageHeader } from '@/components/frame/page-header';
 import { LinkButton } from '@/components/ui/button';
 import { EmptyState } from '@/components/ui/empty-state';
 import { Tabs } from '@/components/ui/tabs';
-import { loadBatchHead } from '@/db/queries/batches';
-import { curveRequestOf } from '@/db/queries/curves';
+import { loadBatchHead, yardstickOfBatch } from '@/db/queries/batches';
 import { listSpectra } from '@/db/queries/spectra';
+import { readOn, readOnText } from '@/lib/batch/read-on';
 import { unitWithBasis } from '@/lib/batch/unit-text';
 import { requireActor } from '@/app/_server/current-actor';
 import { orNotFound } from '@/app/_server/page-data';
@@ -26,11 +26,11 @@ export default async function AddSamplesPage({
   const batch = await orNotFound(loadBatchHead(actor, batchId));
   if (!batch.mayEdit || batch.status !== 'open') notFound();
   const fromSpectra = (await searchParams).from === 'spectra';
-  const curve = await curveRequestOf(actor, batch.curve.id);
+  const yardstick = await yardstickOfBatch(actor, batchId);
   const spectra = fromSpectra ? await listSpectra(actor, notebookId) : [];
   const base = `/notebooks/${notebookId}/batches`;
   const here = `${base}/${batchId}`;
-  const form = { batchId, method: batch.method, curve, submissionKey: randomUUID() };
+  const form = { batchId, method: batch.method, yardstick, submissionKey: randomUUID() };
   return (
     <>
       <PageHeader
@@ -40,7 +40,7 @@ export default async function AddSamplesPage({
           { label: 'Add samples' },
         ]}
         title="Add samples"
-        lead={`Read on “${batch.curve.title}” version ${batch.curve.version}, in ${unitWithBasis(batch.method.unit, batch.method.basis)}.`}
+        lead={`Read on ${readOnText(readOn(batch))}, in ${unitWithBasis(batch.method.unit, batch.method.basis)}.`}
       />
       <HazardNotice note={batch.method.hazardNote} />
       <Tabs

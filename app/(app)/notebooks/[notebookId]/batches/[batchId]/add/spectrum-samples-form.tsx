@@ -8,7 +8,7 @@ import { SubmitButton } from '@/components/ui/submit-button';
 import { liveResults } from '@/lib/batch/live-results';
 import { chosenSamples, liveSample, NOTHING_CHOSEN, sentSamples } from '@/lib/batch/spectrum-choice';
 import { readingRuleWords } from '@/lib/curve/reading-rule-words';
-import type { CurveRequest } from '@/lib/engine';
+import type { Yardstick } from '@/lib/batch/yardstick';
 import type { BatchMethodView } from '@/lib/views/batch';
 import type { SpectrumView } from '@/lib/views/spectrum';
 import { addFromSpectra } from './actions';
@@ -20,13 +20,13 @@ export function SpectrumSamplesForm({
   batchId,
   submissionKey,
   method,
-  curve,
+  yardstick,
   spectra,
 }: {
   batchId: string;
   submissionKey: string;
   method: BatchMethodView;
-  curve: CurveRequest;
+  yardstick: Yardstick;
   spectra: readonly SpectrumView[];
 }) {
   const [state, submit] = useActionState(addFromSpectra, { status: 'idle' });
@@ -40,10 +40,10 @@ export function SpectrumSamplesForm({
   const live = useMemo(
     () =>
       liveResults(
-        curve,
+        yardstick,
         samples.flatMap((sample) => liveSample(sample, read) ?? []),
       ),
-    [curve, samples, read],
+    [yardstick, samples, read],
   );
   const failed = state.status === 'failed' ? state : undefined;
   return (
@@ -53,7 +53,8 @@ export function SpectrumSamplesForm({
       <input type="hidden" name="submissionKey" value={submissionKey} />
       <input type="hidden" name="samples" value={JSON.stringify(sentSamples(samples))} />
       <p className="text-ink-2">
-        Every spectrum is read {readingRuleWords(method.readingRule)}, the rule of the curve.
+        Every spectrum is read {readingRuleWords(method.readingRule)}, the rule of{' '}
+        {yardstick.kind === 'curve' ? 'the curve' : 'the absorptivity'}.
       </p>
       <SpectrumPicker
         spectra={spectra}

@@ -20,7 +20,8 @@ import {
   textsOf,
   withReadingCount,
 } from '@/lib/batch/sample-grid';
-import type { CurveRequest, Signal } from '@/lib/engine';
+import type { Yardstick } from '@/lib/batch/yardstick';
+import type { Signal } from '@/lib/engine';
 import { cellContent, type GridColumn } from '@/lib/grid/grid-cell';
 import type { GridRow } from '@/lib/grid/grid-state';
 import type { BatchMethodView } from '@/lib/views/batch';
@@ -32,7 +33,7 @@ interface TypedSamplesProps {
   batchId: string;
   submissionKey: string;
   method: BatchMethodView;
-  curve: CurveRequest;
+  yardstick: Yardstick;
 }
 
 function disc(signal: Signal) {
@@ -46,7 +47,11 @@ function disc(signal: Signal) {
 }
 
 /** The rows of the grid with what is wrong in them and what the engine makes of the rest. */
-function useSamples(rows: readonly GridRow[], readingCount: number, { method, curve }: TypedSamplesProps) {
+function useSamples(
+  rows: readonly GridRow[],
+  readingCount: number,
+  { method, yardstick }: TypedSamplesProps,
+) {
   const { signal, pathLengthMm } = method;
   const checked = useMemo(
     () => new Map(rows.map((row) => [row.id, checkRow(textsOf(row, readingCount), signal, pathLengthMm)])),
@@ -56,10 +61,10 @@ function useSamples(rows: readonly GridRow[], readingCount: number, { method, cu
   const live = useMemo(
     () =>
       liveResults(
-        curve,
+        yardstick,
         [...settled.values()].flatMap((row) => row.sample ?? []),
       ),
-    [curve, settled],
+    [yardstick, settled],
   );
   return { checked, live };
 }

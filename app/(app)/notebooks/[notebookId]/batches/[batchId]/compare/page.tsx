@@ -50,7 +50,9 @@ export default async function ComparePage({
         <ModelTable models={models} unit={method.unit} />
       </Card>
       <Card flush title="Limits on one ruler" aside="in the measured solution">
-        <LimitsRuler limits={limits} range={method.range} unit={method.unit} results={ruled(batch)} />
+        {method.range && (
+          <LimitsRuler limits={limits} range={method.range} unit={method.unit} results={ruled(batch)} />
+        )}
       </Card>
     </>
   );

@@ -1,9 +1,11 @@
 import type { Metadata } from 'next';
 import { randomUUID } from 'node:crypto';
+import { notFound } from 'next/navigation';
 import { PageHeader } from '@/components/frame/page-header';
 import { Card } from '@/components/ui/card';
 import { loadBatchHead } from '@/db/queries/batches';
 import { listCurves } from '@/db/queries/curves';
+import { readOnText } from '@/lib/batch/read-on';
 import { requireActor } from '@/app/_server/current-actor';
 import { orNotFound } from '@/app/_server/page-data';
 import { VersionForm } from './version-form';
@@ -18,8 +20,10 @@ export default async function VersionPage({
   const [batch, curves] = await orNotFound(
     Promise.all([loadBatchHead(actor, batchId), listCurves(actor, notebookId)]),
   );
+  const own = batch.curve;
+  if (!own) notFound();
   const base = `/notebooks/${notebookId}/batches`;
-  const others = curves.filter((curve) => curve.id !== batch.curve.id && curve.status !== 'void');
+  const others = curves.filter((curve) => curve.id !== own.id && curve.status !== 'void');
   return (
     <>
       <PageHeader
@@ -29,7 +33,7 @@ export default async function VersionPage({
           { label: 'Another curve' },
         ]}
         title="Read on another curve"
-        lead={`The ${batch.sampleCount} samples and their readings go into version ${batch.version + 1} and are calculated again. Version ${batch.version}, on “${batch.curve.title}” version ${batch.curve.version}, stays as it is.`}
+        lead={`The ${batch.sampleCount} samples and their readings go into version ${batch.version + 1} and are calculated again. Version ${batch.version}, on ${readOnText(own)}, stays as it is.`}
       />
       <Card>
         {others.length > 0 ? (
@@ -37,7 +41,7 @@ export default async function VersionPage({
             batchId={batchId}
             submissionKey={randomUUID()}
             curves={others}
-            newerId={batch.curve.newer?.id}
+            newerId={own.newer?.id}
           />
         ) : (
           <p>There is no other curve in this notebook. Make one under Standard curves, then come back.</p>

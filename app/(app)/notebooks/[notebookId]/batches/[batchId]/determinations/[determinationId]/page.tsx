@@ -16,10 +16,12 @@ import { Disclosure } from '@/components/ui/disclosure';
 import { Notice } from '@/components/ui/notice';
 import { WorkingList } from '@/components/working/working-list';
 import { laboratory } from '@/db/entry/settings';
+import { loadAbsorptivity } from '@/db/queries/absorptivities';
 import { loadBatchHead } from '@/db/queries/batches';
 import { loadCurve } from '@/db/queries/curves';
 import { loadDetermination } from '@/db/queries/determinations';
 import { meaningOf } from '@/lib/batch/meaning';
+import { readOn, readOnText } from '@/lib/batch/read-on';
 import { requestWith } from '@/lib/batch/unknown-request';
 import { readingText, SIGNAL_SYMBOL } from '@/lib/batch/reading-text';
 import type { DeterminationView } from '@/lib/views/determination';
@@ -42,7 +44,9 @@ export default async function DeterminationPage({
   const determination = await orNotFound(loadDetermination(actor, determinationId));
   if (determination.batchId !== batchId) notFound();
   const batch = await orNotFound(loadBatchHead(actor, batchId));
-  const curve = await orNotFound(loadCurve(actor, batch.curve.id));
+  const curve = batch.curve && (await orNotFound(loadCurve(actor, batch.curve.id)));
+  const known = batch.absorptivity && (await orNotFound(loadAbsorptivity(actor, batch.absorptivity.id)));
+  const behind = curve?.result.curve.working ?? known?.working ?? [];
   const timeZone = (await laboratory())?.timeZone ?? 'UTC';
   const base = `/notebooks/${notebookId}`;
   const { method } = batch;
@@ -57,7 +61,7 @@ export default async function DeterminationPage({
           { label: determination.sample },
         ]}
         title={determination.sample}
-        lead={`${method.analyte}, read on “${batch.curve.title}” version ${batch.curve.version}`}
+        lead={`${method.analyte}, read on ${readOnText(readOn(batch))}`}
         actions={
           works && (
             <>
@@ -89,17 +93,26 @@ export default async function DeterminationPage({
               large
             />
             <p className="flex flex-wrap items-center gap-3 text-sm text-ink-2">
-              <PlaceOnCurve
-                value={result.reportCase === 'notQuantified' ? null : (result.measured?.value ?? null)}
-                {...method.range}
-                tone={meaningOf(result, method.range, method.unit).tone}
-              />
+              {method.range && (
+                <PlaceOnCurve
+                  value={result.reportCase === 'notQuantified' ? null : (result.measured?.value ?? null)}
+                  {...method.range}
+                  tone={meaningOf(result, method.range, method.unit).tone}
+                />
+              )}
               {result.advice === undefined && meaningOf(result, method.range, method.unit).sentence}
             </p>
           </div>
         </Card>
         <Card title="What to know about it">
-          <FlagList flags={result.flags} inOrder="Within the standards, and nothing speaks against it." />
+          <FlagList
+            flags={[...result.flags, ...(method.knownAbsorptivity?.flags ?? [])]}
+            inOrder={
+              method.range
+                ? 'Within the standards, and nothing speaks against it.'
+                : 'Nothing speaks against it.'
+            }
+          />
         </Card>
       </Columns>
       <DeterminationFacts determination={determination} method={method} />
@@ -123,23 +136,25 @@ export default async function DeterminationPage({
         />
         {result.concentration && <BudgetTable budget={result.budget} unit={method.unit} />}
       </Columns>
-      {result.concentration && (
+      {curve && result.concentration && (
         <MonteCarloCard request={requestWith(curve.request, [determination])} unit={method.unit} />
       )}
       <Card title="Show the working" aside={`engine ${determination.engineVersion}`}>
         <Disclosure summary="Every step from the readings to the report, with these numbers">
-          <WorkingList steps={result.working} prefix="result" behind={curve.result.curve.working} />
+          <WorkingList steps={result.working} prefix="result" behind={behind} />
         </Disclosure>
         <div className="mt-3">
-          <Disclosure summary="The steps of the standard curve behind it">
-            <WorkingList steps={curve.result.curve.working} prefix="result" />
+          <Disclosure
+            summary={curve ? 'The steps of the standard curve behind it' : 'The known absorptivity behind it'}
+          >
+            <WorkingList steps={behind} prefix="result" />
           </Disclosure>
         </div>
       </Card>
       <Card title="History">
         <ChangeHistory history={determination.history} timeZone={timeZone} />
       </Card>
-      <DriftNotice />
+      <DriftNotice batch={batch} />
     </>
   );
 }
