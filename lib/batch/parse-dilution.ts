@@ -1,7 +1,8 @@
-import type { DilutionStep } from '@/lib/engine';
+import type { DilutionStep, Ware } from '@/lib/engine';
 import { LIMITS } from '@/lib/limits';
 import { parseDecimal } from '@/lib/schemas/decimal';
 import { dilutionSentence, type SpokenStep } from './dilution-text';
+import { pieceFor, wareOfPiece, type WareClass } from './ware-text';
 
 export type ParsedDilution =
   | { readonly ok: true; readonly steps: readonly DilutionStep[]; readonly sentence: string }
@@ -11,8 +12,16 @@ class DilutionText extends Error {}
 
 const IN_ML: Readonly<Record<string, number>> = { '\u00b5l': 1e-3, ul: 1e-3, ml: 1, l: 1e3 };
 const NUMBER = '[+-]?[\\d.,]+(?:e[+-]?\\d+)?';
-const VOLUME = `(${NUMBER})\\s*(\u00b5l|ul|ml|l)?`;
-const MADE_UP = new RegExp(`^${VOLUME}\\s*(?:in|to|made up to|/|->|\u2192)\\s*${VOLUME}$`);
+const UNIT = '(\u00b5l|ul|ml|l)?';
+const VOLUME = `(${NUMBER})\\s*${UNIT}`;
+/** A volume with what is known of its vessel: "10 mL ±0.02 r0.003", tolerance and repeatability in the volume's unit. */
+const MEASURED = (use: 'taken' | 'to') =>
+  `(?<${use}>${NUMBER})\\s*(?<${use}Unit>\u00b5l|ul|ml|l)?` +
+  `(?:\\s*(?:\u00b1|\\+-)\\s*(?<${use}Tolerance>${NUMBER})(?:\\s*r\\s*(?<${use}Repeats>${NUMBER}))?)?`;
+const CLASS = '(?:\\s+(?:(?<family>iso|astm)\\s+)?(?:class\\s*)?(?<letter>[ab]))?';
+const MADE_UP = new RegExp(
+  `^${MEASURED('taken')}\\s*(?:in|to|made up to|/|->|\u2192)\\s*${MEASURED('to')}${CLASS}$`,
+);
 const PARTS = new RegExp(`^${VOLUME}\\s*\\+\\s*${VOLUME}$`);
 const TIMES = new RegExp(`^(?:[x\u00d7]\\s*(${NUMBER})|(${NUMBER})\\s*(?:[x\u00d7]|-?\\s*fold))$`);
 const RATIO = new RegExp(`^${VOLUME}\\s*:\\s*${VOLUME}$`);
@@ -25,15 +34,62 @@ function numberIn(text: string): number {
   return parsed.value;
 }
 
+/** 100 × 1e-3 is 0.1, but 3 × 1e-3 is not 0.003 in binary; dividing by 1000 is exact to the last digit. */
+function inMl(text: string, unit: string | undefined): number {
+  const factor = IN_ML[unit ?? 'ml'] ?? 1;
+  return factor < 1 ? numberIn(text) / 1000 : numberIn(text) * factor;
+}
+
 /** Two volumes in mL. A unit written once counts for both. */
 function volumes(match: RegExpExecArray): [number, number, string] {
   const [, first = '', firstUnit, second = '', secondUnit] = match;
-  const left = IN_ML[firstUnit ?? secondUnit ?? 'ml'] ?? 1;
-  const right = IN_ML[secondUnit ?? firstUnit ?? 'ml'] ?? 1;
-  // 100 × 1e-3 is 0.1, but 3 × 1e-3 is not 0.003 in binary; dividing by 1000 is exact to the last digit
-  const inMl = (value: number, factor: number) => (factor < 1 ? value / 1000 : value * factor);
-  const unit = firstUnit ?? secondUnit ?? '';
-  return [inMl(numberIn(first), left), inMl(numberIn(second), right), unit];
+  const volume = inMl(first, firstUnit ?? secondUnit);
+  return [volume, inMl(second, secondUnit ?? firstUnit), firstUnit ?? secondUnit ?? ''];
+}
+
+type Groups = Readonly<Record<string, string | undefined>>;
+
+/** "10 ±0.02 in 100 ±0.1", "10 in 100 class A": volumes with what is known of the vessels. */
+function madeUpStep(groups: Groups): SpokenStep {
+  const { taken = '', takenUnit, to = '', toUnit, family, letter } = groups;
+  const unitOf = { taken: takenUnit ?? toUnit, to: toUnit ?? takenUnit };
+  const ware = (use: 'taken' | 'to'): Ware | undefined => {
+    const [tolerance, repeats] = [groups[`${use}Tolerance`], groups[`${use}Repeats`]];
+    if (tolerance === undefined) return undefined;
+    const toleranceMl = inMl(tolerance, unitOf[use]);
+    return repeats === undefined
+      ? { toleranceMl }
+      : { toleranceMl, repeatabilityMl: inMl(repeats, unitOf[use]) };
+  };
+  const [takenWare, toWare] = [ware('taken'), ware('to')];
+  return {
+    takenMl: inMl(taken, unitOf.taken),
+    toMl: inMl(to, unitOf.to),
+    inParts: false,
+    ...(takenWare ? { takenWare } : {}),
+    ...(toWare ? { toWare } : {}),
+    ...(letter === undefined
+      ? {}
+      : { wareClass: { family: family === 'astm' ? 'ASTM' : 'ISO', letter: letter === 'b' ? 'B' : 'A' } }),
+  };
+}
+
+/** The tolerances of a class for the vessels of a step that have none of their own. */
+function withClass(step: SpokenStep, wareClass: WareClass): SpokenStep {
+  const find = (volumeMl: number, use: 'taken' | 'to'): Ware => {
+    const piece = pieceFor(volumeMl, use, wareClass);
+    if (piece) return wareOfPiece(piece);
+    const vessel = use === 'taken' ? 'pipette' : 'flask';
+    throw new DilutionText(
+      `${wareClass.family} has no ${vessel} of ${volumeMl} mL here. Write its tolerance instead, such as ${volumeMl} \u00b10.1`,
+    );
+  };
+  if (step.inParts) throw new DilutionText('A class of glassware needs volumes, such as 10 in 100 class A');
+  return {
+    ...step,
+    takenWare: step.takenWare ?? find(step.takenMl, 'taken'),
+    toWare: step.toWare ?? find(step.toMl, 'to'),
+  };
 }
 
 function checked(step: SpokenStep): SpokenStep {
@@ -47,11 +103,8 @@ function checked(step: SpokenStep): SpokenStep {
 }
 
 function stepOf(part: string): SpokenStep {
-  const madeUp = MADE_UP.exec(part);
-  if (madeUp) {
-    const [takenMl, toMl] = volumes(madeUp);
-    return checked({ takenMl, toMl, inParts: false });
-  }
+  const madeUp = MADE_UP.exec(part)?.groups;
+  if (madeUp) return checked(madeUpStep(madeUp));
   const parts = PARTS.exec(part);
   if (parts) {
     const [takenMl, addedMl, unit] = volumes(parts);
@@ -83,12 +136,18 @@ function stepsOf(parts: readonly string[]): SpokenStep[] {
   const steps = parts.filter((part) => part !== '').map(stepOf);
   if (steps.length > LIMITS.dilutionSteps)
     throw new DilutionText(`These are ${steps.length} steps; ${LIMITS.dilutionSteps} are the most`);
-  return steps;
+  // a class written behind the last step holds for every step without one of its own
+  const last = steps.at(-1)?.wareClass;
+  return steps.map((step) => {
+    const wareClass = step.wareClass ?? last;
+    return wareClass ? withClass(step, wareClass) : step;
+  });
 }
 
 /**
  * The steps of a dilution from text as people write it: "10 in 100", "10/100", "25→50, 10→100", "1+9",
- * "100 µL in 10 mL", "×10"; steps are parted by a comma and a space, a semicolon or "then". Empty means not
+ * "100 µL in 10 mL", "×10"; the tolerance of a vessel as "10 ±0.02 in 100 ±0.1", or its class as "10 in 100 class A"
+ * (ISO, or "ASTM class A"), found in the library of ware; steps are parted by a comma and a space, a semicolon or "then". Empty means not
  * diluted. `sentence` says what was understood, so that a person can see a slip. "1:10" is not guessed.
  */
 export function parseDilution(text: string): ParsedDilution {
@@ -115,6 +174,11 @@ function readSteps(plain: string): SpokenStep[] {
 }
 
 function understood(spoken: readonly SpokenStep[]): ParsedDilution {
-  const steps = spoken.map(({ takenMl, toMl }) => ({ takenMl, toMl }));
+  const steps = spoken.map(({ takenMl, takenWare, toMl, toWare }) => ({
+    takenMl,
+    toMl,
+    ...(takenWare ? { takenWare } : {}),
+    ...(toWare ? { toWare } : {}),
+  }));
   return { ok: true, steps, sentence: dilutionSentence(spoken) };
 }

@@ -106,3 +106,52 @@ test('the written form is read back as the same steps', () => {
     ]),
   ).toBe(20);
 });
+
+describe('what is known of the vessels', () => {
+  const wareOf = (text: string) => {
+    const parsed = parseDilution(text);
+    if (!parsed.ok) throw new Error(parsed.message);
+    return parsed.steps.map(({ takenWare, toWare }) => [takenWare ?? null, toWare ?? null]);
+  };
+
+  test('tolerances stand behind the volumes, in their unit', () => {
+    expect(wareOf('10 ±0.02 in 100 ±0.1')).toEqual([[{ toleranceMl: 0.02 }, { toleranceMl: 0.1 }]]);
+    expect(wareOf('100 µL ±0.8 r0.3 in 10 mL')).toEqual([
+      [{ toleranceMl: 0.0008, repeatabilityMl: 0.0003 }, null],
+    ]);
+    expect(wareOf('10 +-0,02 in 100')).toEqual([[{ toleranceMl: 0.02 }, null]]);
+  });
+
+  // ISO 648 and ISO 1042 typed from memory but for the 100 mL flask; ASTM E969 and E288: Kealey and Haines, table 2.6.
+  test('a class takes them from the library', () => {
+    expect(wareOf('10 in 100 class A')).toEqual([[{ toleranceMl: 0.02 }, { toleranceMl: 0.1 }]]);
+    expect(wareOf('10 in 100 B')).toEqual([[{ toleranceMl: 0.04 }, { toleranceMl: 0.2 }]]);
+    expect(wareOf('25 in 50 ASTM class A')).toEqual([[{ toleranceMl: 0.03 }, { toleranceMl: 0.05 }]]);
+    expect(wareOf('100 µL in 10 mL class A')).toEqual([
+      [{ toleranceMl: 0.0008, repeatabilityMl: 0.0003 }, { toleranceMl: 0.025 }],
+    ]);
+  });
+
+  test('a class behind the last step holds for all; what was written stays', () => {
+    expect(wareOf('25 in 50, 10 ±0.03 in 100 class A')).toEqual([
+      [{ toleranceMl: 0.03 }, { toleranceMl: 0.06 }],
+      [{ toleranceMl: 0.03 }, { toleranceMl: 0.1 }],
+    ]);
+  });
+
+  test('it is said back, and printed as it is read', () => {
+    expect(sentence('10 in 100 class A')).toBe(
+      '10 mL (±0.02 mL) made up to 100 mL (±0.1 mL): diluted 10 times',
+    );
+    for (const text of ['10 ±0.02 in 100 ±0.1', '0.1 ±0.0008 r0.0003 in 10 ±0.025', '25 in 50 ±0.06']) {
+      const parsed = parseDilution(text);
+      expect(parsed.ok && dilutionText(parsed.steps)).toBe(text);
+    }
+  });
+
+  test('what the library does not hold is asked for', () => {
+    expect(sentence('10 in 30 class A')).toMatch(/no flask of 30 mL here\. Write its tolerance instead/);
+    expect(sentence('30 in 100 class A')).toMatch(/no pipette of 30 mL/);
+    expect(sentence('10 ±0 in 100')).toMatch(/above zero/);
+  });
+});
