@@ -29,22 +29,26 @@ function toAbsorbance(value: number, signal: Signal): number | undefined {
   return fraction > 0 ? -log10(fraction) : undefined;
 }
 
-/** A bound such as ">3.5", or "<0.03" in transmittance, which bounds the absorbance from the other side. */
-function bounded(text: string, signal: Signal, came = text): Absorbance | null {
-  const [, sign, rest] = BOUND.exec(text) ?? [];
-  const value = rest === undefined ? null : plainNumber(rest);
-  if (sign === undefined || value === null) return null;
-  const greater = sign.startsWith('>') || sign === '\u2265';
+/** A reading known to lie beyond a number: above range when that means too much absorbance, with the bound where it has one. */
+function beyond(value: number, greater: boolean, signal: Signal, text: string): Absorbance {
   const above = signal === 'absorbance' ? greater : !greater;
   const atLeast = above ? toAbsorbance(value, signal) : undefined;
   return {
     value: null,
     censored: {
       reason: above ? 'aboveRange' : 'belowRange',
-      text: came,
+      text,
       ...(atLeast === undefined ? {} : { atLeast }),
     },
   };
+}
+
+/** A bound such as ">3.5", or "<0.03" in transmittance, which bounds the absorbance from the other side. */
+function bounded(text: string, signal: Signal): Absorbance | null {
+  const [, sign, rest] = BOUND.exec(text) ?? [];
+  const value = rest === undefined ? null : plainNumber(rest);
+  if (sign === undefined || value === null) return null;
+  return beyond(value, sign.startsWith('>') || sign === '\u2265', signal, text);
 }
 
 /** What a reading that is text says: above or below what the instrument can show, empty, or nothing we know. */
@@ -58,9 +62,6 @@ export function censoredText(raw: string, signal: Signal): Absorbance {
   if (UNDER.test(text)) return because('belowRange');
   const starred = plainNumber(MARKED.exec(text)?.[1] ?? '');
   // "3.500*": the number an instrument stops at, with a mark that the true one lies beyond.
-  if (starred !== null) {
-    const bound = bounded(`${signal === 'absorbance' ? '>' : '<'}${starred}`, signal, text);
-    return bound ?? because('aboveRange');
-  }
+  if (starred !== null) return beyond(starred, signal === 'absorbance', signal, text);
   return because('unreadable');
 }

@@ -7,6 +7,7 @@ import {
   type Reading,
   type Weighting,
 } from '@/lib/engine';
+import { tQuantile } from '@/lib/engine/stats/student-t';
 import { expectDigits } from '../../../support/digits';
 import { request, standardsOf, unknown } from './requests';
 
@@ -88,6 +89,50 @@ describe('properties of a standard curve', () => {
       expect(Math.abs(is.curve.intercept.value - was.curve.intercept.value - 0.25)).toBeLessThan(1e-12);
       expectDigits(is.c, was.c, 9);
       expectDigits(is.u, was.u, 8);
+    });
+  });
+
+  test('uncertainties are never negative, and every interval holds its value', () => {
+    check((asked) => {
+      const { result } = first({
+        ...asked,
+        standardsRelativeU: 0.004,
+        unknowns: asked.unknowns.map((item) => ({
+          ...item,
+          dilution: [{ takenMl: 10, toMl: 50, takenUMl: 0.02, toUMl: 0.04 }],
+        })),
+      });
+      const { concentration, fieller, budget } = result;
+      if (!concentration) throw new Error('this unknown lies among its standards');
+      const { value, u, U, k, interval } = concentration;
+      expect(Math.min(u, U, k, ...budget.map((line) => line.u))).toBeGreaterThanOrEqual(0);
+      expect(interval[0]).toBeLessThanOrEqual(value);
+      expect(interval[1]).toBeGreaterThanOrEqual(value);
+      if (fieller) expect(fieller[0] <= value && value <= fieller[1]).toBe(true);
+    });
+  });
+
+  // As g = t² V_bb / b² tends to 0, so does the distance between Fieller's ends and c ± t u(c): of the order of g.
+  test("Fieller's interval tends to the usual one as the slope becomes sure", () => {
+    check((asked) => {
+      const gap = (scatter: number) => {
+        const centre = (readings: readonly Reading[]) => (Number(readings[0]) + Number(readings[1])) / 2;
+        const calmed = asked.standards.map((s) => ({
+          ...s,
+          readings: s.readings.map((r) => centre(s.readings) + scatter * (Number(r) - centre(s.readings))),
+        }));
+        const { curve, result } = first({ ...asked, weighting: 'none', standards: calmed });
+        const { concentration, fieller } = result;
+        if (!concentration || !fieller) return null;
+        const half = tQuantile(0.975, curve.degreesOfFreedom) * concentration.u;
+        const g = (tQuantile(0.975, curve.degreesOfFreedom) * (curve.slope.u / curve.slope.value)) ** 2;
+        const off = Math.abs(fieller[1] - (concentration.value + half));
+        return { g, relative: off / half };
+      };
+      const [rough, calm] = [gap(1), gap(0.01)];
+      if (!rough || !calm) throw new Error('the slope of these curves is sure');
+      expect(rough.relative).toBeLessThan(10 * Math.sqrt(rough.g) + 1e-9);
+      expect(calm.relative).toBeLessThan(10 * Math.sqrt(calm.g) + 1e-9);
     });
   });
 
