@@ -15,10 +15,14 @@ type Values = Readonly<Record<string, unknown>>;
 
 const shown = (row: { value: unknown; gapText: unknown }) => String(row.value ?? row.gapText ?? 'empty');
 
+const mm = (value: unknown) => (typeof value === 'number' ? `${value} mm` : 'not given');
+
 const WORDS: Readonly<Record<string, (from: Values, to: Values) => string>> = {
   sample: (from, to) => `the sample is now called ${String(to.sample)} (was ${String(from.sample)})`,
   pathLengthMm: (from, to) =>
     `the path length is now ${String(to.pathLengthMm)} mm (was ${String(from.pathLengthMm)} mm)`,
+  pathLengthUMm: (from, to) =>
+    `the standard uncertainty of the path length is now ${mm(to.pathLengthUMm)} (was ${mm(from.pathLengthUMm)})`,
   dilution: (from, to) =>
     `the dilution is now ${dilutionWords(to.dilution)} (was ${dilutionWords(from.dilution)})`,
   voidedAt: () => 'declared void',

@@ -73,7 +73,9 @@ function Head({ scale, unit }: { scale: LimitScale; unit: string }) {
             ))}
           </div>
         </Th>
-        <Th numeric>{unit}</Th>
+        <Th numeric className="max-md:hidden">
+          {unit}
+        </Th>
         <Th>What it rests on</Th>
       </tr>
     </thead>
@@ -100,7 +102,7 @@ function ResultsRow({ results, scale }: { results: readonly RuledResult[]; scale
           ))}
         </Rail>
       </Td>
-      <Td numeric>
+      <Td numeric className="max-md:hidden">
         {formatNumber(low, 2)} to {formatNumber(high, 3)}
       </Td>
       <Td className="text-sm text-ink-2">in the measured solution</Td>
@@ -150,7 +152,9 @@ export function LimitsRuler({
               <Mark scale={scale} value={range.min} className="bg-ink" />
             </Rail>
           </Td>
-          <Td numeric>{formatNumber(range.min, 3)}</Td>
+          <Td numeric className="max-md:hidden">
+            {formatNumber(range.min, 3)}
+          </Td>
           <Td className="text-sm text-ink-2">results are read off from here up to the top standard</Td>
         </tr>
         {sorted.map((limit) => (
@@ -158,6 +162,9 @@ export function LimitsRuler({
             <RowHead>
               {limit.name}
               <span className="block text-xs font-normal text-ink-2">{KIND_WORDS[limit.kind]}</span>
+              <span className="num block text-sm font-normal md:hidden">
+                {formatNumber(limit.value, 2)} {unit}
+              </span>
             </RowHead>
             <Td>
               <Rail scale={scale}>
@@ -168,7 +175,9 @@ export function LimitsRuler({
                 />
               </Rail>
             </Td>
-            <Td numeric>{formatNumber(limit.value, 2)}</Td>
+            <Td numeric className="max-md:hidden">
+              {formatNumber(limit.value, 2)}
+            </Td>
             <Td className="max-w-80 min-w-48 text-sm text-ink-2">{limit.basis}</Td>
           </tr>
         ))}

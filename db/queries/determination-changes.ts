@@ -39,12 +39,12 @@ async function open(actor: Actor, id: string, seenVersion: number): Promise<Open
   return { row, on: batch, readings, current };
 }
 
-type Conditions = Pick<UnknownSample, 'sample' | 'pathLengthMm' | 'dilution' | 'readings'>;
+type Conditions = Pick<UnknownSample, 'sample' | 'pathLengthMm' | 'pathLengthUMm' | 'dilution' | 'readings'>;
 
 /** The result again, from stored readings with the one change in them. */
 async function again(actor: Actor, { row, on }: Opened, change: Conditions) {
   const yardstick = await yardstickOf(actor, on);
-  const [outcome] = calculate(yardstick, [{ ...change, pathLengthUMm: row.pathLengthUMm }]);
+  const [outcome] = calculate(yardstick, [change]);
   if (!outcome) throw new AppError('CALCULATION_REFUSED');
   return { ...outcome, version: row.version + 1 };
 }
@@ -82,15 +82,19 @@ export function correctReading(actor: Actor, input: CorrectReading): Promise<Cha
 /** Change the name, the path length or the dilution of a sample, with a reason. */
 export function changeConditions(actor: Actor, input: ChangeConditions): Promise<Changed> {
   return inTransaction(async () => {
-    const { sample, pathLengthMm, dilution, reason } = input;
+    const { sample, pathLengthMm, pathLengthUMm, dilution, reason } = input;
     const opened = await open(actor, input.determinationId, input.version);
     const { row, current } = opened;
     const same =
-      sample === row.sample && pathLengthMm === row.pathLengthMm && sameSteps(dilution, row.dilution);
+      sample === row.sample &&
+      pathLengthMm === row.pathLengthMm &&
+      pathLengthUMm === row.pathLengthUMm &&
+      sameSteps(dilution, row.dilution);
     if (same)
       throw sameAsBefore('/sample', 'Nothing is different from what is saved. Change something, or leave it');
-    const outcome = await again(actor, opened, { sample, pathLengthMm, dilution, readings: current });
-    await changeFor(actor, row, { ...outcome, sample, pathLengthMm, dilution: [...dilution] }, reason);
+    const conditions = { sample, pathLengthMm, pathLengthUMm, dilution: [...dilution] };
+    const outcome = await again(actor, opened, { ...conditions, readings: current });
+    await changeFor(actor, row, { ...outcome, ...conditions }, reason);
     return row;
   }).then(placeOf);
 }
@@ -107,9 +111,10 @@ export function voidDetermination(actor: Actor, input: VoidDetermination): Promi
 
 const placeOf = ({ notebookId, batchId }: DeterminationRow): Changed => ({ notebookId, batchId });
 
-const conditionsOf = ({ sample, pathLengthMm, dilution }: DeterminationRow) => ({
+const conditionsOf = ({ sample, pathLengthMm, pathLengthUMm, dilution }: DeterminationRow) => ({
   sample,
   pathLengthMm,
+  pathLengthUMm,
   dilution,
 });
 

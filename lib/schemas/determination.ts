@@ -4,6 +4,7 @@ import { LIMITS } from '@/lib/limits';
 import { submissionKey } from './batch';
 import { decimal } from './decimal';
 import { dilution } from './dilution';
+import { optionalNotNegative } from './method';
 import { reason } from './notebook';
 
 export const determinationParams = z.object({ determinationId: z.uuid() });
@@ -108,6 +109,8 @@ export const changeConditions = z.object({
   version: seenVersion,
   sample: sampleName,
   pathLengthMm,
+  /** Standard uncertainty; empty for the cell of the standards, or when it is not known. */
+  pathLengthUMm: optionalNotNegative('The uncertainty').default(null),
   dilution,
   reason,
 });

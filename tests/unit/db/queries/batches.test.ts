@@ -276,6 +276,35 @@ describe('correcting', () => {
       why: 'flask of 20',
     });
   });
+  test('another cell with its uncertainty, and vessels with theirs, become lines of the budget', async () => {
+    const one = await onlyOne([['Weir 3', ['0.4021'], '10 in 100']]);
+    const change = {
+      determinationId: one.id,
+      version: 1,
+      sample: 'Weir 3',
+      pathLengthMm: '20',
+      pathLengthUMm: '0,02',
+      dilution: '10 in 100 class A',
+      reason: 'the long cell',
+    };
+    await changeConditions(owner, schemas.changeConditions.parse(change));
+    const after = await loadDetermination(owner, one.id);
+    expect(after.pathLengthUMm).toBe(0.02);
+    expect(after.result.budget.map(({ source }) => source)).toEqual(
+      expect.arrayContaining([
+        'path length of the unknown',
+        'dilution 1, volume taken',
+        'dilution 1, made up to',
+      ]),
+    );
+    expect(after.history.at(-1)?.what).toContain(
+      'the standard uncertainty of the path length is now 0.02 mm (was not given)',
+    );
+    // the same again is no change, the ware included
+    await expect(
+      changeConditions(owner, schemas.changeConditions.parse({ ...change, version: 2 })),
+    ).rejects.toMatchObject({ code: 'INVALID_INPUT' });
+  });
   test('a void determination keeps its numbers to be seen, leaves the count, and changes no more', async () => {
     const one = await onlyOne([['Weir 3', ['0.4021']]]);
     await voidDetermination(owner, { determinationId: one.id, version: 1, reason: 'wrong bottle' });

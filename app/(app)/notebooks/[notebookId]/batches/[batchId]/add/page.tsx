@@ -1,6 +1,7 @@
 import type { Metadata } from 'next';
 import { randomUUID } from 'node:crypto';
 import { notFound } from 'next/navigation';
+import { WareTable } from '@/components/batch/ware-table';
 import { HazardNotice } from '@/components/batch/batch-notices';
 import { PageHeader } from '@/components/frame/page-header';
 import { LinkButton } from '@/components/ui/button';
@@ -52,6 +53,7 @@ export default async function AddSamplesPage({
         ]}
       />
       {!fromSpectra && <TypedSamplesForm {...form} />}
+
       {fromSpectra && spectra.length > 0 && <SpectrumSamplesForm {...form} spectra={spectra} />}
       {fromSpectra && spectra.length === 0 && (
         <EmptyState
@@ -65,6 +67,7 @@ export default async function AddSamplesPage({
           Upload the files first; then choose the spectra here.
         </EmptyState>
       )}
+      <WareTable />
     </>
   );
 }

@@ -71,9 +71,12 @@ function DilutionField({ initial, failed }: { initial: string; failed?: FailedFo
 export function ChangeConditions({
   determination,
 }: {
-  determination: Pick<DeterminationView, 'id' | 'version' | 'sample' | 'pathLengthMm' | 'dilution'>;
+  determination: Pick<
+    DeterminationView,
+    'id' | 'version' | 'sample' | 'pathLengthMm' | 'pathLengthUMm' | 'dilution'
+  >;
 }) {
-  const { id, version, sample, pathLengthMm, dilution } = determination;
+  const { id, version, sample, pathLengthMm, pathLengthUMm, dilution } = determination;
   return (
     <ReasonDialog
       title="Change sample, path length or dilution"
@@ -92,6 +95,16 @@ export function ChangeConditions({
             unit="mm"
             inputMode="decimal"
             initial={String(pathLengthMm)}
+            failed={failed}
+          />
+          <Field
+            name="pathLengthUMm"
+            label="u of the path length"
+            unit="mm"
+            inputMode="decimal"
+            optional
+            hint="Standard uncertainty, when it is not the cell of the standards"
+            initial={pathLengthUMm === null ? '' : String(pathLengthUMm)}
             failed={failed}
           />
           <DilutionField initial={dilutionText(dilution)} failed={failed} />

@@ -32,8 +32,8 @@ import { ChangeConditions, CorrectReading, VoidDetermination } from './change-di
 export const metadata: Metadata = { title: 'Determination' };
 
 /** What the dialog needs; the working stays on the server. */
-const conditionsOf = ({ id, version, sample, pathLengthMm, dilution }: DeterminationView) => ({
-  ...{ id, version, sample, pathLengthMm, dilution },
+const conditionsOf = ({ id, version, sample, pathLengthMm, pathLengthUMm, dilution }: DeterminationView) => ({
+  ...{ id, version, sample, pathLengthMm, pathLengthUMm, dilution },
 });
 
 export default async function DeterminationPage({
