@@ -33,7 +33,7 @@ function footingFact({ range, unit, knownAbsorptivity }: BatchMethodView): Fact[
           {formatShort(value, u ?? 0).text} <small>{words.unit}</small>
         </>
       ),
-      note: source,
+      note: u === null ? `${source}; u not stated` : source,
     },
   ];
 }

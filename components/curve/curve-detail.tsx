@@ -1,20 +1,18 @@
-import Link from 'next/link';
 import { Card } from '@/components/ui/card';
 import { Columns } from '@/components/ui/columns';
-import { RowHead, Table, Td, Th } from '@/components/ui/table';
 import { readingRuleWords } from '@/lib/curve/reading-rule-words';
 import { standardRows } from '@/lib/curve/standard-rows';
 import { compareModels } from '@/lib/engine';
-import { formatDateTime } from '@/lib/format/dates';
-import type { CurveVersionView, CurveView } from '@/lib/views/curve';
+import type { CurveView } from '@/lib/views/curve';
 import { CurveFacts } from './curve-facts';
 import { CurveJudgements } from './curve-judgements';
 import { CurvePlots } from './curve-plots';
-import { CurveStatusNotice, CurveStatusPill, HazardNote } from './curve-status';
+import { CurveStatusNotice, HazardNote } from './curve-status';
 import { LimitsRuler } from './limits-ruler';
 import { MethodFacts } from './method-facts';
 import { ModelTable } from './model-table';
 import { StandardsTable } from './standards-table';
+import { VersionTable } from './version-table';
 
 /** How the readings came, for the line beside the title of the standards. */
 function originWords({ standards, method }: CurveView): string {
@@ -27,50 +25,6 @@ function originWords({ standards, method }: CurveView): string {
         ? `from spectra, ${readingRuleWords(method.readingRule)}`
         : 'typed and from spectra';
   return `${readings.length} readings, ${from}`;
-}
-
-function Versions({ curve, timeZone }: { curve: CurveView; timeZone: string }) {
-  const why = (version: CurveVersionView) =>
-    version.voidReason ?? version.reason ?? (version.version === 1 ? 'first version' : '');
-  return (
-    <Card flush title="Versions" aside="kept, and never changed">
-      <Table label="Versions of this curve">
-        <thead>
-          <tr>
-            <Th>Version</Th>
-            <Th>Status</Th>
-            <Th>Why</Th>
-            <Th>Saved</Th>
-          </tr>
-        </thead>
-        <tbody>
-          {curve.versions.map((version) => (
-            <tr key={version.id}>
-              <RowHead>
-                {version.id === curve.id ? (
-                  <span aria-current="true">Version {version.version}, shown here</span>
-                ) : (
-                  <Link
-                    className="text-uv underline-offset-2 hover:underline"
-                    href={`/notebooks/${curve.notebookId}/curves/${version.id}`}
-                  >
-                    Version {version.version}
-                  </Link>
-                )}
-              </RowHead>
-              <Td>
-                <CurveStatusPill curve={{ status: version.status, newer: null }} />
-              </Td>
-              <Td>{why(version)}</Td>
-              <Td className="text-sm whitespace-nowrap text-ink-2">
-                {formatDateTime(version.createdAt, timeZone)}, {version.createdBy}
-              </Td>
-            </tr>
-          ))}
-        </tbody>
-      </Table>
-    </Card>
-  );
 }
 
 /** Everything of a saved curve under its title. */
@@ -104,7 +58,13 @@ export function CurveDetail({ curve, timeZone }: { curve: CurveView; timeZone: s
       <Card flush title="Models side by side" aside="a batch shows them by its own results">
         <ModelTable models={compareModels(curve.request)} unit={method.unit} />
       </Card>
-      <Versions curve={curve} timeZone={timeZone} />
+      <VersionTable
+        label="Versions of this curve"
+        versions={curve.versions}
+        shownId={curve.id}
+        base={`/notebooks/${curve.notebookId}/curves`}
+        timeZone={timeZone}
+      />
     </div>
   );
 }

@@ -15,9 +15,16 @@ export function CurveStatusPill({ curve }: { curve: Pick<CurveSummary, 'status' 
 }
 
 /** Says before anything else that a version is void or not the newest, and leads to the one that is. */
-export function CurveStatusNotice({ curve }: { curve: CurveSummary }) {
+export function CurveStatusNotice({
+  curve,
+  folder = 'curves',
+}: {
+  curve: Pick<CurveSummary, 'notebookId' | 'version' | 'status' | 'voidReason' | 'newer'>;
+  /** where its versions have their pages */
+  folder?: 'curves' | 'absorptivities';
+}) {
   const newer = curve.newer && (
-    <LinkButton href={`/notebooks/${curve.notebookId}/curves/${curve.newer.id}`}>
+    <LinkButton href={`/notebooks/${curve.notebookId}/${folder}/${curve.newer.id}`}>
       Go to version {curve.newer.version}
     </LinkButton>
   );

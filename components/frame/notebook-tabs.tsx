@@ -4,15 +4,22 @@ import { usePathname } from 'next/navigation';
 
 import { Tabs, type Tab } from '@/components/ui/tabs';
 
-/** The tab whose address is the longest beginning of the page's own. */
-export function currentTab(pathname: string, tabs: readonly Tab[]): string | undefined {
+export interface NotebookTab extends Tab {
+  /** an address whose pages belong to this tab too */
+  also?: string;
+}
+
+/** The tab whose address, or whose other one, is the longest beginning of the page's own. */
+export function currentTab(pathname: string, tabs: readonly NotebookTab[]): string | undefined {
   return tabs
-    .map((tab) => tab.href)
-    .filter((href) => pathname === href || pathname.startsWith(`${href}/`))
-    .sort((a, b) => b.length - a.length)[0];
+    .flatMap(({ href, also }) =>
+      [href, ...(also === undefined ? [] : [also])].map((begin) => ({ href, begin })),
+    )
+    .filter(({ begin }) => pathname === begin || pathname.startsWith(`${begin}/`))
+    .sort((a, b) => b.begin.length - a.begin.length)[0]?.href;
 }
 
 /** The pages of one notebook. */
-export function NotebookTabs({ tabs, label = 'Notebook' }: { tabs: readonly Tab[]; label?: string }) {
+export function NotebookTabs({ tabs, label = 'Notebook' }: { tabs: readonly NotebookTab[]; label?: string }) {
   return <Tabs label={label} tabs={tabs} current={currentTab(usePathname(), tabs)} />;
 }

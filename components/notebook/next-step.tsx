@@ -11,8 +11,9 @@ interface Step {
 
 /** Where the work stands, in a sentence, and the one next step for somebody who works in the notebook. */
 export function nextStep(base: string, progress: NotebookProgress): Step {
-  const { spectra, curves, batches, determinations, newestCurveTitle, newestBatchId } = progress;
-  if (curves === 0)
+  const { spectra, curves, absorptivities, batches, determinations, newestCurveTitle, newestBatchId } =
+    progress;
+  if (curves + absorptivities === 0)
     return spectra === 0
       ? {
           words:
@@ -28,7 +29,10 @@ export function nextStep(base: string, progress: NotebookProgress): Step {
         };
   if (batches === 0)
     return {
-      words: `The curve “${newestCurveTitle}” is saved. No sample has been read off it yet.`,
+      words:
+        curves > 0
+          ? `The curve “${newestCurveTitle}” is saved. No sample has been read off it yet.`
+          : 'A known absorptivity is saved. No sample has been read by it yet.',
       href: `${base}/batches/new`,
       label: 'Start a batch',
     };
@@ -39,10 +43,18 @@ export function nextStep(base: string, progress: NotebookProgress): Step {
       label: 'Add samples',
     };
   return {
-    words: `${count(determinations, 'determination', 'determinations')} in ${count(batches, 'batch', 'batches')}, read off ${count(curves, 'standard curve', 'standard curves')}.`,
+    words: `${count(determinations, 'determination', 'determinations')} in ${count(batches, 'batch', 'batches')}, read ${readBy(progress)}.`,
     href: `${base}/batches/${newestBatchId}`,
     label: 'Open the newest batch',
   };
+}
+
+/** What the determinations of a notebook rest on. */
+function readBy({ curves, absorptivities }: NotebookProgress): string {
+  const off = `off ${count(curves, 'standard curve', 'standard curves')}`;
+  if (absorptivities === 0) return off;
+  const by = `by ${count(absorptivities, 'known absorptivity', 'known absorptivities')}`;
+  return curves === 0 ? by : `${off} and ${by}`;
 }
 
 const count = (n: number, singular: string, plural: string) => `${n} ${n === 1 ? singular : plural}`;

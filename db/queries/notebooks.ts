@@ -66,9 +66,10 @@ export async function readNotebook(actor: Actor, id: string): Promise<NotebookVi
 /** What is in a notebook so far. @throws AppError NOT_FOUND */
 export async function progressOf(actor: Actor, id: string): Promise<NotebookProgress> {
   const newest = { order: [['createdAt', 'DESC']] as [string, string][], limit: 1 };
-  const [spectra, curves, batches, determinations, [curve], [batch]] = await Promise.all([
+  const [spectra, curves, absorptivities, batches, determinations, [curve], [batch]] = await Promise.all([
     countFor(actor, 'spectrum', id, { voidedAt: null }),
     countFor(actor, 'curve', id, { status: 'saved' }),
+    countFor(actor, 'absorptivity', id, { status: 'saved' }),
     countFor(actor, 'batch', id, { status: 'open' }),
     countFor(actor, 'determination', id, { voidedAt: null }),
     listFor(actor, 'curve', id, { where: { status: 'saved' }, attributes: ['id', 'title'], ...newest }),
@@ -77,6 +78,7 @@ export async function progressOf(actor: Actor, id: string): Promise<NotebookProg
   return {
     spectra,
     curves,
+    absorptivities,
     batches,
     determinations,
     newestCurveId: curve?.id ?? null,

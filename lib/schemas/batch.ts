@@ -18,27 +18,30 @@ export const spectrumReadingsQuery = z.object({
     .pipe(z.array(z.uuid()).min(1).max(LIMITS.pageSize)),
 });
 
-/** A field that may be missing or empty. */
-const optionalId = (sentence: string) =>
-  z
-    .union([z.literal(''), z.uuid(sentence)], sentence)
-    .transform((id) => id || undefined)
-    .optional();
+/** What a batch is read on, as one field of a form: the kind, a space and the id. */
+const readOn = z.string().transform((text, context): { curveId?: string; absorptivityId?: string } => {
+  const [kind, id] = text.split(' ');
+  if (z.uuid().safeParse(id).success) {
+    if (kind === 'curve') return { curveId: id };
+    if (kind === 'absorptivity') return { absorptivityId: id };
+  }
+  context.addIssue({
+    code: 'custom',
+    message: 'Choose the standard curve or the known absorptivity that the samples are read on',
+  });
+  return z.NEVER;
+});
 
 /** A batch is read on a standard curve or on a known absorptivity: exactly one of the two. */
 export const newBatch = z
   .object({
     notebookId: z.uuid(),
     submissionKey,
-    curveId: optionalId('Choose the standard curve that the samples are read on'),
-    absorptivityId: optionalId('Choose the known absorptivity that the samples are read on'),
+    readOn,
     title: z.string().trim().min(1, 'Give the batch a title').max(LIMITS.title),
     note: z.string().trim().max(LIMITS.note).default(''),
   })
-  .refine(({ curveId, absorptivityId }) => (curveId === undefined) !== (absorptivityId === undefined), {
-    path: ['curveId'],
-    error: 'Choose the standard curve or the known absorptivity that the samples are read on',
-  });
+  .transform(({ readOn: on, ...batch }) => ({ ...batch, ...on }));
 export type NewBatch = z.infer<typeof newBatch>;
 
 export const voidBatch = z.object({ batchId: z.uuid(), reason });

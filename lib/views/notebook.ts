@@ -23,6 +23,8 @@ export interface NotebookView extends NotebookSummary {
 export interface NotebookProgress {
   readonly spectra: number;
   readonly curves: number;
+  /** Known absorptivities in use. */
+  readonly absorptivities: number;
   readonly batches: number;
   readonly determinations: number;
   readonly newestCurveId: string | null;

@@ -20,7 +20,12 @@ export default async function NotebookLayout({
   const tabs = [
     { href: base, label: 'Overview' },
     { href: `${base}/spectra`, label: 'Spectra', count: progress.spectra },
-    { href: `${base}/curves`, label: 'Standard curves', count: progress.curves },
+    {
+      href: `${base}/curves`,
+      label: 'Standard curves',
+      count: progress.curves,
+      also: `${base}/absorptivities`,
+    },
     { href: `${base}/batches`, label: 'Batches', count: progress.batches },
     { href: `${base}/record`, label: 'Record' },
     ...(notebook.mayListMembers ? [{ href: `${base}/members`, label: 'Members' }] : []),

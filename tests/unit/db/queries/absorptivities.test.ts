@@ -49,8 +49,8 @@ const save = (actor: Actor, changes: AbsorptivityTexts = {}) =>
   saveAbsorptivity(actor, saveAbsorptivityForm.parse(absorptivityTexts(notebookId, changes)));
 
 async function batchOn(absorptivityId: string): Promise<string> {
-  const input = { notebookId, submissionKey: randomUUID(), absorptivityId, title: 'July weirs', note: '' };
-  return (await createBatch(owner, newBatch.parse(input))).id;
+  const form = { notebookId, submissionKey: randomUUID(), title: 'July weirs', note: '' };
+  return (await createBatch(owner, newBatch.parse({ ...form, readOn: `absorptivity ${absorptivityId}` }))).id;
 }
 
 /** Typed samples as a form sends them; `more` stands for what a browser might add. */
@@ -257,10 +257,13 @@ describe('refusals about batches', () => {
     await expect(batchOn(theirs)).rejects.toMatchObject({ code: 'INVALID_INPUT' });
   });
   test('the form of a batch takes one of the two', () => {
-    const sent = { notebookId, submissionKey: randomUUID(), title: 'x', curveId: '', absorptivityId: '' };
-    expect(newBatch.safeParse(sent).error?.issues[0]?.path).toEqual(['curveId']);
-    const both = { ...sent, curveId: randomUUID(), absorptivityId: randomUUID() };
-    expect(newBatch.safeParse(both).success).toBe(false);
+    const id = randomUUID();
+    const parsed = (readOn: string) =>
+      newBatch.safeParse({ notebookId, submissionKey: randomUUID(), title: 'x', readOn });
+    expect(parsed(`curve ${id}`).data).toMatchObject({ curveId: id });
+    expect(parsed(`absorptivity ${id}`).data).toMatchObject({ absorptivityId: id });
+    for (const wrong of ['', id, 'curve', 'curve x', `other ${id}`])
+      expect(parsed(wrong).error?.issues[0]?.path).toEqual(['readOn']);
   });
   test('no other curve and no comparison of models', async () => {
     const { batchId } = await determinationOn(await made(), ['0.1988']);

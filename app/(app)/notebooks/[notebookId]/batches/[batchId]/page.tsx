@@ -5,6 +5,7 @@ import { resultRowOf } from '@/components/batch/result-row-of';
 import { ResultTools } from '@/components/batch/result-tools';
 import { ResultsTable } from '@/components/batch/results-table';
 import { VoidDeterminations } from '@/components/batch/void-determinations';
+import { FlagList } from '@/components/flags/flag-list';
 import { coverage } from '@/components/flags/quantity';
 import { PageHeader } from '@/components/frame/page-header';
 import { LinkButton } from '@/components/ui/button';
@@ -27,6 +28,7 @@ export default async function BatchPage({ params }: PageProps<'/notebooks/[noteb
   const base = `/notebooks/${notebookId}`;
   const here = `${base}/batches/${batchId}`;
   const works = batch.mayEdit && batch.status === 'open';
+  const known = batch.method.knownAbsorptivity;
   return (
     <>
       <PageHeader
@@ -41,6 +43,11 @@ export default async function BatchPage({ params }: PageProps<'/notebooks/[noteb
       <CurveNotice batch={batch} base={base} />
       <BatchFacts batch={batch} base={base} />
       <Results batch={batch} here={here} works={works} />
+      {known && known.flags.length > 0 && (
+        <Card title="What to know about the absorptivity">
+          <FlagList flags={known.flags} />
+        </Card>
+      )}
       <DriftNotice batch={batch} />
     </>
   );

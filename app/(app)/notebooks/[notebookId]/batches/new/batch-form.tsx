@@ -1,31 +1,31 @@
 'use client';
 
 import { useActionState, useState } from 'react';
-import { CurveSelect } from '@/components/batch/curve-select';
+import { choiceValue, YardstickSelect, type YardstickChoice } from '@/components/batch/yardstick-select';
 import { Field } from '@/components/ui/field';
 import { FormAlert } from '@/components/ui/form-alert';
 import { SubmitButton } from '@/components/ui/submit-button';
 import { TextArea } from '@/components/ui/text-area';
 import { LIMITS } from '@/lib/limits';
-import type { CurveSummary } from '@/lib/views/curve';
 import { create } from './actions';
 
 export function BatchForm({
   notebookId,
   submissionKey,
-  curves,
+  choices,
   asked,
 }: {
   notebookId: string;
   submissionKey: string;
-  curves: readonly CurveSummary[];
-  /** the curve that the person came from */
+  choices: readonly YardstickChoice[];
+  /** the curve or absorptivity that the person came from, by its id */
   asked?: string;
 }) {
   const [state, submit] = useActionState(create, { status: 'idle' });
   const failed = state.status === 'failed' ? state : undefined;
-  const newest = curves.find((curve) => curve.status === 'saved') ?? curves[0];
-  const [curveId, setCurveId] = useState(curves.find((curve) => curve.id === asked)?.id ?? newest?.id ?? '');
+  const newest = choices.find((choice) => choice.status === 'saved') ?? choices[0];
+  const first = choices.find((choice) => choice.id === asked) ?? newest;
+  const [readOn, setReadOn] = useState(failed?.values.readOn ?? (first ? choiceValue(first) : ''));
   return (
     <form action={submit} noValidate className="grid max-w-xl gap-4">
       <FormAlert state={state} />
@@ -39,7 +39,7 @@ export function BatchForm({
         failed={failed}
         autoFocus
       />
-      <CurveSelect curves={curves} value={curveId} onChange={setCurveId} failed={failed} />
+      <YardstickSelect choices={choices} value={readOn} onChange={setReadOn} failed={failed} />
       <TextArea name="note" label="Note" optional hint="Preparation, deviations, weather" failed={failed} />
       <div>
         <SubmitButton>Create batch</SubmitButton>
