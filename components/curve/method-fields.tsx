@@ -7,7 +7,7 @@ import { Select } from '@/components/ui/select';
 import { TextArea } from '@/components/ui/text-area';
 import type { AboutTexts } from '@/lib/curve/form-start';
 import type { CalculationTexts } from '@/lib/curve/live-curve';
-import { CONCENTRATION_UNIT_NAMES, isMolar, parseUnit } from '@/lib/engine';
+import { CONCENTRATION_UNIT_NAMES, isMolar, parseUnit } from '@/lib/engine/units';
 import { LIMITS } from '@/lib/limits';
 import { boundText, type Issues } from './form-text';
 

@@ -1,4 +1,5 @@
-import { absorbanceOf, type Signal } from '@/lib/engine';
+import type { Signal } from '@/lib/engine';
+import { absorbanceOf } from '@/lib/engine/absorbance';
 import { withTrueMinus } from '@/lib/format/number';
 import { significantText, toDecimals } from '@/lib/format/round';
 

@@ -1,4 +1,4 @@
-import { absorbanceOf } from '@/lib/engine';
+import { absorbanceOf } from '@/lib/engine/absorbance';
 import { parseDecimal } from '@/lib/schemas/decimal';
 
 /** A reading as it is kept: a number, or why there is none and what stood there instead. */

@@ -1,4 +1,5 @@
-import { absorbanceOf, type Reading, type Signal } from '@/lib/engine';
+import type { Reading, Signal } from '@/lib/engine';
+import { absorbanceOf } from '@/lib/engine/absorbance';
 
 /** A reading that is kept, before it is calculated with. */
 export interface CalculatedReading {

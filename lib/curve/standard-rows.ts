@@ -1,4 +1,5 @@
-import { absorbanceOf, type CurveResult, type PointAnswer, type Signal } from '@/lib/engine';
+import type { CurveResult, PointAnswer, Signal } from '@/lib/engine';
+import { absorbanceOf } from '@/lib/engine/absorbance';
 import type { StoredReading, StoredStandard } from './stored-curve';
 
 /** One reading of the table of standards: what came, what became of it in the fit. */

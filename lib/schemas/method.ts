@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { CONCENTRATION_UNIT_NAMES, isMolar, parseUnit } from '@/lib/engine';
+import { CONCENTRATION_UNIT_NAMES, isMolar, parseUnit } from '@/lib/engine/units';
 import { LIMITS } from '@/lib/limits';
 import { decimal, optionalDecimal } from './decimal';
 
