@@ -163,7 +163,7 @@ test('a determination opens to its working; a reading is corrected with a reason
   await expect(page.getByRole('heading', { level: 1, name: 'Weir 3' })).toBeVisible();
   await page.getByText('Every step from the readings to the report').click();
   await expect(page.getByText('y0 = (0.4021 + 0.4013) / 2')).toBeVisible();
-  await expect(page.getByText('F = (100 / 10)')).toBeVisible();
+  await expect(page.getByText('F = 100 / 10')).toBeVisible();
   await expect(page.getByRole('table', { name: 'Uncertainty budget' }).getByRole('row')).toHaveCount(3);
   await page.getByRole('button', { name: 'Draw 100000 trials' }).click();
   await expect(page.getByText(/^100000 trials\. /)).toBeVisible();

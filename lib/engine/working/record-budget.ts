@@ -50,11 +50,13 @@ function recordScaling(ledger: Ledger, { factor, quantities }: Scaling): void {
     ledger.given({ ...text, source: 'not diluted' }, factor.value);
     return;
   }
-  const above = factor.quantities.filter(({ power }) => power === 1).map(({ symbol }) => symbol);
-  const below = factor.quantities.filter(({ power }) => power === -1).map(({ symbol }) => symbol);
+  const product = (power: number) => {
+    const symbols = factor.quantities.filter((one) => one.power === power).map(({ symbol }) => symbol);
+    return symbols.length === 1 ? symbols.join('') : `(${symbols.join(' * ')})`;
+  };
   ledger.line(
     { ...text, source: 'made up to over taken' },
-    `(${above.join(' * ')}) / (${below.join(' * ')})`,
+    `${product(1)} / ${product(-1)}`,
     Object.fromEntries(factor.quantities.map(({ symbol, id }) => [symbol, id])),
     factor.value,
   );

@@ -77,5 +77,5 @@ test.each<[string, Altered]>([
 test('the numbers in a line are those of the lines it was made from', () => {
   const steps = workingOf(SAMPLE);
   expect(steps.get('unknown.mean')?.substituted).toBe('y0 = (0.4021 + 0.4013) / 2');
-  expect(steps.get('unknown.factor')?.substituted).toBe('F = (100 / 10)');
+  expect(steps.get('unknown.factor')?.substituted).toBe('F = 100 / 10');
 });
