@@ -52,7 +52,7 @@ async function rewriteBatches(run, from, to) {
     WHERE type = 'table' AND name = 'batches'`);
   await run(`PRAGMA schema_version = ${version + 1}`);
   await run('PRAGMA writable_schema = OFF');
-  const [[{ integrity_check: sound }]] = await run('PRAGMA integrity_check');
+  const [[{ integrity_check: sound }]] = await run('PRAGMA integrity_check(batches)');
   const [[{ sql }]] = await run("SELECT sql FROM sqlite_master WHERE type = 'table' AND name = 'batches'");
   if (sound !== 'ok' || !sql.includes(to))
     throw new Error(`the table of batches was not rewritten: ${sound}`);

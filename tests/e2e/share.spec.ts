@@ -77,6 +77,7 @@ async function readCalls(request: APIRequestContext, notebook: string): Promise<
   return [
     '/api/v1/notebooks',
     base,
+    `${base}/absorptivities`,
     `${base}/record`,
     `/api/v1/source-files/${files?.[0]}`,
     `/api/v1/source-files/${files?.[0]}/bytes`,
@@ -130,7 +131,9 @@ test('a visitor with a link reads everything and changes nothing', async ({ page
   const batch = pages.find((path) => /\/batches\/[0-9a-f-]{36}$/.test(path)) ?? '';
   const determination = pages.find((path) => path.includes('/determinations/')) ?? '';
   const spectrum = pages.find((path) => /\/spectra\/[0-9a-f-]{36}$/.test(path)) ?? '';
-  const places = ['', '/settings', '/members', '/curves/new', '/batches/new'].map((end) => notebook + end);
+  const places = ['', '/settings', '/members', '/curves/new', '/absorptivities/new', '/batches/new'].map(
+    (end) => notebook + end,
+  );
   const forms = await ownersForms(owner, [
     ...places,
     curve,

@@ -35,6 +35,8 @@ test('of two tabs that fit the longer one is current', () => {
   expect(currentTab('/notebooks/n1/curves/c7', tabs)).toBe('/notebooks/n1/curves');
   expect(currentTab('/notebooks/n1', tabs)).toBe('/notebooks/n1');
   expect(currentTab('/people', tabs)).toBeUndefined();
+  const also = [...tabs, { href: '/notebooks/n1/spectra', label: 'Spectra', also: '/notebooks/n1/files' }];
+  expect(currentTab('/notebooks/n1/files/f1', also)).toBe('/notebooks/n1/spectra');
 });
 
 test('the navigation shows the entries it was given and no other, and marks the open one', () => {
