@@ -115,7 +115,7 @@ async function makeBatch(actor: Actor, notebookId: string, curveId: string): Pro
     newBatch.parse({
       notebookId,
       submissionKey: randomUUID(),
-      curveId,
+      readOn: `curve ${curveId}`,
       title: 'LR-114, total iron, outfalls of the Tessel',
       note: '25.00 mL of digested sample developed in 50.00 mL. S07 is turbid; its sample blank is among the spectra.',
     }),
