@@ -2,7 +2,7 @@
 
 import { useActionState, useState } from 'react';
 import { WithoutStandardsNotice } from '@/components/batch/batch-notices';
-import { LinkButton } from '@/components/ui/button';
+import { Button, LinkButton } from '@/components/ui/button';
 import { Card } from '@/components/ui/card';
 import { Columns } from '@/components/ui/columns';
 import { FormAlert } from '@/components/ui/form-alert';
@@ -23,15 +23,25 @@ interface Version {
   readonly version: number;
 }
 
-/** Somebody saved a newer version since the form was opened: it is opened beside this one, whose texts stay. */
-function NewerVersion({ failed, base }: { failed?: FailedForm; base: string }) {
+/** Somebody saved a newer version since the form was opened: the two ways on. */
+function NewerVersion({
+  failed,
+  folder,
+  onTakeOver,
+}: {
+  failed?: FailedForm;
+  folder: string;
+  onTakeOver: (base: Version) => void;
+}) {
   const id = failed?.fields.newerId?.[0];
+  const version = Number(failed?.fields.newerVersion?.[0]);
   if (id === undefined) return null;
   return (
-    <div>
-      <LinkButton href={`${base}/${id}`} target="_blank">
-        Look at version {failed?.fields.newerVersion?.[0]}
+    <div className="flex flex-wrap gap-2">
+      <LinkButton href={`${folder}/${id}`} target="_blank">
+        Look at version {version}
       </LinkButton>
+      <Button onClick={() => onTakeOver({ id, version })}>Save mine after it</Button>
     </div>
   );
 }
@@ -58,14 +68,22 @@ export function AbsorptivityForm({
   const [state, submit] = useActionState(save, { status: 'idle' });
   const failed = state.status === 'failed' ? state : undefined;
   const [texts, setTexts] = useState<AbsorptivityTexts>({ ...start, ...failed?.values });
+  const [newest, setNewest] = useState<Version | null>(null);
+  const after = newest ?? base;
   const fields = { texts, onTexts: setTexts, failed };
   return (
     <form action={submit} noValidate className="grid gap-4.5">
       <FormAlert state={state} />
-      <NewerVersion failed={failed} base={`/notebooks/${notebookId}/absorptivities`} />
+      {failed?.fields.newerId?.[0] !== newest?.id && (
+        <NewerVersion
+          failed={failed}
+          folder={`/notebooks/${notebookId}/absorptivities`}
+          onTakeOver={setNewest}
+        />
+      )}
       <input type="hidden" name="notebookId" value={notebookId} />
       <input type="hidden" name="saveKey" value={saveKey} />
-      <input type="hidden" name="baseId" value={base?.id ?? ''} />
+      <input type="hidden" name="baseId" value={after?.id ?? ''} />
       <Columns share="even">
         <div className="grid gap-4.5">
           <Card title="What is measured">
@@ -88,13 +106,15 @@ export function AbsorptivityForm({
             <ReadingFields {...fields} />
           </Card>
           <Card title="Notes">
-            <AbsorptivityNotes {...fields} isNewVersion={base !== undefined} />
+            <AbsorptivityNotes {...fields} isNewVersion={after !== undefined} />
           </Card>
         </div>
       </Columns>
       <WithoutStandardsNotice />
       <div className="flex flex-wrap items-center gap-3">
-        <SubmitButton>{base ? `Save as version ${base.version + 1}` : 'Save this absorptivity'}</SubmitButton>
+        <SubmitButton>
+          {after ? `Save as version ${after.version + 1}` : 'Save this absorptivity'}
+        </SubmitButton>
         <p className="text-sm text-ink-2">
           A saved absorptivity is not edited: a change makes a new version.
         </p>

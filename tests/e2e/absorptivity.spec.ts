@@ -142,6 +142,28 @@ test('a new version takes its place, a void one takes no batch, and all of it st
   await expect(page.getByText('known absorptivity created').first()).toBeVisible();
 });
 
+test('two people make a version: the second is told, keeps what was typed, and saves after the first', async ({
+  page,
+}) => {
+  await signInAs(page, 'pi');
+  const notebook = await makeNotebook(page, 'Two versions at once');
+  await makeAbsorptivity(page, notebook);
+  await page.getByRole('link', { name: 'New version' }).click();
+  await page.getByLabel('Absorptivity, ε').fill('11050');
+  const other = await page.context().newPage();
+  await other.goto(page.url());
+  await other.getByLabel('Absorptivity, ε').fill('11072');
+  await other.getByRole('button', { name: 'Save as version 2' }).click();
+  await expect(other.getByText('Version 2, shown here')).toBeVisible();
+
+  await page.getByRole('button', { name: 'Save as version 2' }).click();
+  await expect(page.getByText(/saved version 2 on .* after you opened this form/)).toBeVisible();
+  await page.getByRole('button', { name: 'Save mine after it' }).click();
+  await expect(page.getByLabel('Absorptivity, ε')).toHaveValue('11050');
+  await page.getByRole('button', { name: 'Save as version 3' }).click();
+  await expect(page.getByText('Version 3, shown here')).toBeVisible();
+});
+
 test('a reader of the notebook sees an absorptivity and finds no way to change it', async ({
   page,
   browser,
