@@ -2,7 +2,7 @@
  * Mutation testing of the numbers: every operator, condition and constant of regression, calibration and
  * uncertainty is altered in turn, and a test must notice. Run by `npm run mutate`; it takes a while.
  */
-export default {
+const config = {
   testRunner: 'vitest',
   plugins: ['@stryker-mutator/vitest-runner'],
   vitest: { configFile: 'tests/vitest.engine.config.ts', related: false },
@@ -24,3 +24,5 @@ export default {
   tempDirName: 'mutation-report/sandbox',
   cleanTempDir: 'always',
 };
+
+export default config;
