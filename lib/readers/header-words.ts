@@ -1,7 +1,17 @@
 import type { SignalKind, XUnit } from './types';
 
+/** Words beyond this are no label any more; what is looked for in a label is looked for in so much of it. */
+const LONGEST_LABEL = 300;
+
+/** So much of a text as may be a label, with runs of blanks made one, which keeps every pattern below in step with it. */
+function labelOf(text: string): string {
+  const start = text.length > LONGEST_LABEL ? text.slice(0, LONGEST_LABEL) : text;
+  return start.includes('  ') ? start.replace(/ {2,}/g, ' ') : start;
+}
+
 /** Unit of x as a header words it, or undefined when the words name none. */
-export function xUnitFromText(text: string): XUnit | undefined {
+export function xUnitFromText(label: string): XUnit | undefined {
+  const text = labelOf(label);
   const word = text.toLowerCase().replace(/[_\u00a0]/g, ' ');
   if (
     /(?:^|[^a-z\d])(?:1\s*\/\s*cm|cm\s*\^?\s*[-\u2212\u207b]\s*[1\u00b9]|cm\^\(-1\)|wave\s?numbers?|wellenzahl|kayser)(?![a-z\d])/.test(
@@ -28,14 +38,16 @@ export function xUnitFromText(text: string): XUnit | undefined {
 }
 
 /** Whether the words name a wavelength, wavenumber or photon energy, with or without a unit. */
-export function isWavelengthWord(text: string): boolean {
+export function isWavelengthWord(label: string): boolean {
+  const text = labelOf(label);
   return /wave\s?l(?:e?ngth|en)|wave\s?number|wellenl|wellenzahl|longueur d.onde|longitud de onda|comprimento de onda|lunghezza d.onda|golfl|lambda|\u03bb|(?:^|[^a-z])(?:wl|wvl|wlen|wave)(?![a-z])|photon energy/i.test(
     text,
   );
 }
 
 /** Words over a column that is x of something else than a spectrum. */
-export function otherAxisWord(text: string): 'time' | 'concentration' | 'temperature' | 'other' | undefined {
+export function otherAxisWord(label: string): 'time' | 'concentration' | 'temperature' | 'other' | undefined {
+  const text = labelOf(label);
   if (xUnitFromText(text)) return undefined;
   if (
     /(?:^|[^a-z])(?:time|zeit|temps|tiempo|t\s*[([/]\s*(?:s|min|h)\s*[)\]]?|t_?(?:s|min)|seconds?|sec|minutes?|hours?|elapsed|cycle)(?![a-z])/i.test(
@@ -66,7 +78,7 @@ const COEFFICIENT =
 
 /** What the ordinate is by its words, or undefined when they say nothing of it (a sample's name, say). */
 export function signalFromText(text: string): SignalWords | undefined {
-  const word = text.trim().replace(/[_\u00a0]/g, ' ');
+  const word = labelOf(text.trim().replace(/[_\u00a0]/g, ' '));
   if (word === '') return undefined;
   if (/(?:^|[^a-z])(?:mau|mabs|m\s?abs|milli-?absorbance(?: units?)?|mod)(?![a-z])/i.test(word))
     return { signal: 'absorbance', scale: 0.001 };

@@ -53,7 +53,6 @@ export function readAnimlDocument(text: string): AnimlDocument {
 }
 
 class AnimlScan {
-  private readonly path: string[] = [];
   private readonly sets: AnimlSeriesSet[] = [];
   private readonly samples: string[] = [];
   private readonly records: Record<string, string> = {};
@@ -66,7 +65,6 @@ class AnimlScan {
   private closed = false;
 
   open(name: string, attributes: Readonly<Record<string, string>>, at: number): void {
-    this.path.push(name);
     this.content = '';
     const called = attributes['name'] ?? '';
     if (name === 'Sample') this.samples.push(called);
@@ -88,8 +86,6 @@ class AnimlScan {
   }
 
   close(name: string): void {
-    const top = this.path.lastIndexOf(name);
-    if (top >= 0 && this.path.length - top < 20) this.path.length = top;
     if (VALUES.has(name)) this.addValue(this.content.trim());
     else if (name === 'EncodedValueSet' && this.values) this.values.base64 = this.content;
     else if (name === 'Series') this.series = undefined;

@@ -11,19 +11,19 @@ import {
   type ReadSpectrum,
   type ReaderWarning,
 } from '../types';
-import {
-  readAnimlDocument,
-  type AnimlDocument,
-  type AnimlSeries,
-  type AnimlSeriesSet,
-} from './animl-document';
+import { readAnimlDocument, type AnimlSeries, type AnimlSeriesSet } from './animl-document';
 import { reachOf, seriesValues } from './series-values';
 
 /** Whether a text is an AnIML document: its first element says so. */
 export function looksLikeAniml(text: string): boolean {
-  return /^\s*(?:<\?xml[^>]*>\s*)?(?:<!--[\s\S]{0,4000}?-->\s*)*<(?:\w+:)?AnIML[\s>]/.test(
-    text.slice(0, 10_000),
-  );
+  let start = text.slice(0, 10_000).trimStart();
+  if (start.startsWith('<?xml')) start = start.slice(start.indexOf('>') + 1).trimStart();
+  while (start.startsWith('<!--')) {
+    const end = start.indexOf('-->');
+    if (end < 0) return false;
+    start = start.slice(end + 3).trimStart();
+  }
+  return /^<(?:\w{1,40}:)?AnIML[\s>]/.test(start);
 }
 
 /**
@@ -33,7 +33,8 @@ export function looksLikeAniml(text: string): boolean {
  * @throws ReaderError NO_TABLE, NOT_A_SPECTRUM, ENCODED_VALUES
  */
 export function readAniml(text: string, fallbackName: string, options: ReadOptions): ReadResult {
-  options.onSteps?.(text.length);
+  // Once for the elements, once for the lines they stand in.
+  options.onSteps?.(2 * text.length);
   const document = readAnimlDocument(text);
   const spectra: ReadSpectrum[] = [];
   const questions: Question[] = [];
@@ -43,15 +44,28 @@ export function readAniml(text: string, fallbackName: string, options: ReadOptio
       code: 'MISSING_END',
       message: 'The document ends before its last element is closed: check that it is complete',
     });
-  const lineOf = lineCounter(text);
+  const reading: Reading = {
+    lineOf: lineCounter(text),
+    bytes: text.length,
+    left: POINTS_PER_BYTE * text.length,
+    skipped: 0,
+    records: Object.fromEntries(Object.entries(document.records).slice(0, MOST_SHOWN)),
+    fallbackName,
+    options,
+  };
   document.sets.forEach((set, block) => {
-    for (const draft of setDrafts(text.length, lineOf, document, set, block, fallbackName, options)) {
-      options.onSteps?.(draft.x.length);
+    for (const draft of setDrafts(reading, set, block)) {
       const finished = finishSpectrum(draft, options);
       spectra.push(...finished.spectra);
       questions.push(...finished.questions);
     }
   });
+  if (reading.skipped > 0)
+    warnings.push({
+      code: 'LENGTH',
+      message: `${reading.skipped} series reach further than a document of this size can, and were left out: their lengths or start indices are damaged`,
+      value: reading.skipped,
+    });
   if (spectra.length === 0) {
     throw new ReaderError(
       'NOT_A_SPECTRUM',
@@ -79,30 +93,41 @@ export function readAniml(text: string, fallbackName: string, options: ReadOptio
   };
 }
 
-function setDrafts(
-  bytes: number,
-  lineOf: (at: number) => number,
-  document: AnimlDocument,
-  set: AnimlSeriesSet,
-  block: number,
-  fallbackName: string,
-  options: ReadOptions,
-): SpectrumDraft[] {
+/** Parameters shown with each spectrum; the header text holds all of them. */
+const MOST_SHOWN = 200;
+/** A value takes five characters at least; series with stretches left out may reach a little further. */
+const POINTS_PER_BYTE = 4;
+
+/** What all series of a document share. */
+interface Reading {
+  readonly lineOf: (at: number) => number;
+  readonly bytes: number;
+  /** Points that may still be laid out: lengths and start indices are words of the file, not promises. */
+  left: number;
+  skipped: number;
+  readonly records: Readonly<Record<string, string>>;
+  readonly fallbackName: string;
+  readonly options: ReadOptions;
+}
+
+function setDrafts(reading: Reading, set: AnimlSeriesSet, block: number): SpectrumDraft[] {
+  const { options } = reading;
   const x = set.series.find((series) => series.dependency === 'independent') ?? set.series[0];
   if (!x) return [];
   const words = `${x.unit} ${x.quantity} ${x.name}`;
   const stated = options.xUnit ?? xUnitFromText(x.unit) ?? xUnitFromText(words);
   if (!stated && !isWavelengthWord(words)) return [];
   const ordinates = set.series.filter((series) => series !== x && series.sets.length > 0);
+  const xReach = reachOf(x);
   return ordinates.flatMap((y) => {
-    const draft = seriesDraft(bytes, lineOf, set, x, y, options);
+    const draft = seriesDraft(reading, set, x, xReach, y);
     if (!draft) return [];
     const unit = stated ?? fittingUnits(Math.min(...ends(draft.x)), Math.max(...ends(draft.x)))[0] ?? 'nm';
     const guessed = stated
       ? []
       : [{ code: 'X_UNIT_GUESSED', message: `The series "${x.name}" gives no unit; it is taken as ${unit}` }];
     const sample = set.samples.length === 1 ? set.samples[0] : undefined;
-    const base = sample || set.step || set.name || fallbackName;
+    const base = sample || set.step || set.name || reading.fallbackName;
     return [
       {
         ...draft,
@@ -110,7 +135,7 @@ function setDrafts(
         xUnit: unit,
         xUnitGuessed: !stated,
         block,
-        header: { ...document.records, step: set.step, technique: set.technique },
+        header: { ...reading.records, step: set.step, technique: set.technique },
         warnings: [...draft.warnings, ...guessed],
       },
     ];
@@ -120,22 +145,28 @@ function setDrafts(
 const ends = (x: Float64Array): number[] => [x[0] ?? NaN, x[x.length - 1] ?? NaN];
 
 function seriesDraft(
-  bytes: number,
-  lineOf: (at: number) => number,
+  reading: Reading,
   set: AnimlSeriesSet,
   x: AnimlSeries,
+  xReach: number,
   y: AnimlSeries,
-  options: ReadOptions,
 ): SpectrumDraft | undefined {
-  const reach = Math.max(reachOf(x), reachOf(y));
+  const { options, bytes } = reading;
+  const reach = Math.max(xReach, reachOf(y));
   const declared = Number.isInteger(set.length) && set.length > 0 ? set.length : reach;
   // A length beyond anything the text can hold is damage, not data.
   const n = Math.max(reach, Math.min(declared, bytes));
-  if (reach === 0 || n > bytes) return undefined;
+  if (reach === 0) return undefined;
+  if (n > bytes || n > reading.left) {
+    reading.skipped += 1;
+    return undefined;
+  }
+  reading.left -= n;
+  options.onSteps?.(2 * n + y.sets.length);
   const points = seriesValues(y, n);
   const axis = seriesValues(x, n);
   const warnings: ReaderWarning[] = [];
-  const line = lineOf(y.at);
+  const line = reading.lineOf(y.at);
   const sparse = y.sets.some((one) => one.startIndex > 0 || Number.isFinite(one.endIndex));
   if (reach > declared || (!sparse && points.given !== declared) || wrongStretch(y)) {
     warnings.push({

@@ -67,6 +67,7 @@ function decodedSet(series: AnimlSeries, set: ValueSet): number[] {
       `The encoded values of the series "${series.name}" are damaged (not valid base64). Export the document again.`,
     );
   }
+  set.base64 = '';
   const bytes = Uint8Array.from(binary, (letter) => letter.charCodeAt(0));
   const view = new DataView(bytes.buffer);
   const size = series.type === 'Float32' || series.type === 'Int32' ? 4 : 8;

@@ -5,7 +5,7 @@ import { columnSeries, pairSeries } from './columns-layout';
 import type { Decision } from './decide-dialect';
 import { findX, isPaired } from './find-x';
 import type { HeaderFacts } from './header-facts';
-import { findHeading } from './header-rows';
+import { findHeading, headingSteps } from './header-rows';
 import type { LayoutContext } from './layout-context';
 import { findLongKeys, longSeries } from './long-layout';
 import type { MergedBlock } from './merge-blocks';
@@ -39,6 +39,7 @@ export function analyseTable(
   const { dialect } = decision;
   const { block, labels } = withoutHeadRow(lines, decision, whole, options);
   const table = readNumbers(lines, block, dialect, options.onSteps);
+  options.onSteps?.(headingSteps(lines, block.rows[0] ?? 0, above));
   const found = findHeading(lines, dialect, block.rows[0] ?? 0, block.fields, above);
   const named = labels ?? found.labels;
   const declared = header.declared.length === block.fields ? header.declared : [];
@@ -49,7 +50,10 @@ export function analyseTable(
         ? declared
         : named.map((label, i) => richer(label, declared[i])),
   };
-  const columns = table.columns.map(columnFacts);
+  const columns = table.columns.map((column) => {
+    options.onSteps?.(column.values.length);
+    return columnFacts(column);
+  });
   const context: LayoutContext = {
     lines,
     dialect,
@@ -86,7 +90,7 @@ function withoutHeadRow(
     decision.dialect.delimiter === 'blank'
   )
     return { block };
-  const head = readNumbers(lines, { ...block, rows: [first, second] }, decision.dialect);
+  const head = readNumbers(lines, { ...block, rows: [first, second] }, decision.dialect, options.onSteps);
   const x = head.columns[0];
   if (!x || x.odd.get(0)?.text !== '' || x.odd.has(1) || block.fields < 3) return { block };
   const labels = head.columns.map((column) => column.odd.get(0)?.text ?? String(column.values[0] ?? ''));

@@ -25,7 +25,8 @@ export function chooseTables(tables: readonly AnalysedTable[], options: ReadOpti
   const largest = firstSizable(spectral);
   if (!largest) return { tables: [], questions: [], warnings: [] };
   const alike = spectral.filter((table) => table === largest || sameBuild(table, largest));
-  const unlike = spectral.filter((table) => !alike.includes(table));
+  const taken = new Set(alike);
+  const unlike = spectral.filter((table) => !taken.has(table));
   if (unlike.length === 0) return { tables: alike, questions: [], warnings: [] };
   if (options.orientation === 'stacked') return { tables: spectral, questions: [], warnings: [] };
   const size = sizeOf(largest);

@@ -5,8 +5,12 @@ import type { TableHeading } from './header-rows';
 const QUANTITY =
   /[\s:_\-/|,]*[([]?(?:absorbance|absorption|absorban[cz]e?|extin[ck]t(?:ion)?|abs\.?|mau|a\.?u\.?|o\.?d\.?|%\s?t|t\s?%|transmi(?:ttance|ssion))(?:\s*[([][^)\]]*[)\]])?[)\]]?\s*$/i;
 
+/** Longer words over a column are a remark, not a name with its quantity. */
+const LONGEST_LABEL = 200;
+
 /** A label without the quantity it may end in: "Data Set 1:Absorbance" is the spectrum "Data Set 1". */
 function withoutQuantity(label: string): string {
+  if (label.length > LONGEST_LABEL) return label;
   const rest = label.replace(QUANTITY, '').trim();
   if (rest === label.trim() && signalFromText(label))
     return /^.{1,2}$/.test(rest) || /^\W*[aet]\W/i.test(rest) ? '' : rest;
@@ -28,13 +32,14 @@ export function columnNames(
   const labels = columns.map((column) => heading.labels[column] ?? '');
   const several = columns.length > 1;
   const distinct = new Set(labels.filter((label) => label !== '')).size === columns.length;
+  const bares = labels.map(withoutQuantity);
+  const distinctBare = new Set(bares).size === columns.length;
   return columns.map((column, k) => {
     const above = heading.names[column] || (paired ? heading.names[column - 1] : '') || '';
     if (above !== '') return above;
     const label = labels[k] ?? '';
-    const bare = withoutQuantity(label);
-    if (several && distinct)
-      return bare !== '' && new Set(labels.map(withoutQuantity)).size === columns.length ? bare : label;
+    const bare = bares[k] ?? '';
+    if (several && distinct) return bare !== '' && distinctBare ? bare : label;
     if (bare !== '' && (bare !== label.trim() || !signalFromText(label) || several)) return bare;
     return several && label !== '' && !paired ? `${fallback} ${label}` : fallback;
   });

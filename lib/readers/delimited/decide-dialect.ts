@@ -30,6 +30,7 @@ function decideAmong(lines: TextLines, options: ReadOptions, minNumbers: number)
     const blocks = findBlocks(lines, views, from);
     const best = bestBlock(blocks);
     if (!best) continue;
+    if (dialect.delimiter === 'fixed') options.onSteps?.(best.rows.length);
     const score = blockScore(best);
     if (score <= most) continue;
     if (dialect.delimiter === 'fixed' && !options.delimiter && !equalLengths(lines, best)) continue;

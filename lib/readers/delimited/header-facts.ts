@@ -15,10 +15,14 @@ export interface HeaderFacts {
 }
 
 const MOST_LINES = 400;
+/** What a line declares stands at its head. */
+const LONGEST_LINE = 2000;
 
 /** Search the header text: records, declared columns and missing values, unit of x, what was measured, sample. */
 export function headerFacts(headerText: string): HeaderFacts {
-  const lines = headerText.split(/\r\n|\n\r|\n|\r/, MOST_LINES);
+  const lines = headerText
+    .split(/\r\n|\n\r|\n|\r/, MOST_LINES)
+    .map((line) => (line.length > LONGEST_LINE ? line.slice(0, LONGEST_LINE) : line));
   const records: Record<string, string> = {};
   for (const line of lines) {
     const record = recordOf(line);
@@ -65,7 +69,8 @@ function declaredColumns(records: Readonly<Record<string, string>>, lines: reado
 
 function declaredMissing(lines: readonly string[]): number[] {
   const values: number[] = [];
-  for (const line of lines) {
+  for (const spaced of lines) {
+    const line = spaced.replace(/[\s_-]{3,}/g, ' ');
     const match =
       /(?:missing|no[\s_-]?data|fill|bad|above_detection_limit|below_detection_limit)[\s_-]*(?:values?|data|flag)?\s*[=:]\s*(-?\d[\d.]*(?:e[+-]?\d+)?)/i.exec(
         line,

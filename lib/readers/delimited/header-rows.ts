@@ -17,6 +17,9 @@ export interface TableHeading {
 }
 
 const FURTHEST = 15;
+/** Ways in which a heading's cells may be parted. */
+const WAYS = 5;
+const LONGEST_HEADING = 200_000;
 
 /**
  * Find the heading of a table: going up from its first row, the nearest line with a cell for every column; below it
@@ -56,6 +59,14 @@ export function findHeading(
   return { labels, names: [], title, firstLine: title === '' ? line : firstLine };
 }
 
+/** The characters that the search for a heading may look at: some lines above a table, each split in a few ways. */
+export function headingSteps(lines: TextLines, firstRow: number, above: number): number {
+  let looked = 0;
+  for (let line = Math.max(above + 1, firstRow - FURTHEST - 2); line < firstRow; line++)
+    looked += WAYS * Math.min((lines.end[line] ?? 0) - (lines.start[line] ?? 0), LONGEST_HEADING);
+  return looked;
+}
+
 function nearestHeading(
   lines: TextLines,
   dialect: Dialect,
@@ -90,7 +101,7 @@ export function headingCells(
 ): string[] | undefined {
   if (line < 0) return undefined;
   const raw = lineText(lines, line);
-  if (raw.length > 200_000 || raw.trim() === '') return undefined;
+  if (raw.length > LONGEST_HEADING || raw.trim() === '') return undefined;
   const text = uncommented(raw);
   const commented = text.length !== raw.length;
   const ways = [...splittings(text, dialect, commented)];
@@ -116,7 +127,9 @@ function* splittings(text: string, dialect: Dialect, commented: boolean): Genera
   const line = text.trim();
   if (line.includes('\t')) yield line.split('\t').map(plainCell);
   if (/\s{2,}/.test(line)) yield line.split(/\s{2,}|\t/).map(plainCell);
-  yield (line.match(/"[^"]*"|[^\s([]+(?:\s?[([][^)\]]*[)\]])?|[([][^)\]]*[)\]]/g) ?? []).map(plainCell);
+  yield (line.match(/"[^"]*"|[^\s([]+(?:\s?[([][^)\]]{0,40}[)\]])?|[([][^)\]]{0,40}[)\]]/g) ?? []).map(
+    plainCell,
+  );
   const listed = line.split(/[,;]/).map((cell) => cell.replace(/^.*:/, '').trim());
   if (listed.every((cell) => /^[^\s=]+(?: [^\s=]+)?$/.test(cell)) && isWavelengthWord(listed[0] ?? ''))
     yield listed;

@@ -5,6 +5,9 @@ import { seriesPoints, type Series } from './series';
 /** Fewer points than this under one name are readings, not spectra. */
 const SHORTEST = 3;
 
+/** More numbers than this never name one spectrum together: dose, day and repeat, say. */
+const MOST_NUMBER_KEYS = 3;
+
 /** Columns that say which spectrum a row belongs to. */
 export interface LongKeys {
   readonly keys: readonly number[];
@@ -23,18 +26,18 @@ export function findLongKeys(context: LayoutContext, xColumn: number): LongKeys 
   const texts = columns.flatMap((_, i) =>
     i !== xColumn && (table.columns[i]?.texts ?? 0) > (table.columns[i]?.numbers ?? 0) ? [i] : [],
   );
+  const isText = new Set(texts);
   const still = columns.flatMap((fact, i) =>
-    i !== xColumn && !texts.includes(i) && fact.numbers === fact.rows && namesSpectra(context, i) ? [i] : [],
+    i !== xColumn && !isText.has(i) && fact.numbers === fact.rows && namesSpectra(context, i) ? [i] : [],
   );
-  for (let used = 0; used <= still.length; used++) {
+  for (let used = 0; used <= Math.min(still.length, MOST_NUMBER_KEYS); used++) {
     const keys = [...texts, ...still.slice(0, used)];
     if (keys.length === 0) continue;
     const groups = groupRows(context, keys);
     if (groups.size < 2 || !distinctWithin(groups, x)) continue;
+    const named = new Set([...keys, ...still]);
     const ordinates = columns.flatMap((fact, i) =>
-      i !== xColumn && !keys.includes(i) && !still.includes(i) && fact.numbers > 0 && !fact.isIndex
-        ? [i]
-        : [],
+      i !== xColumn && !named.has(i) && fact.numbers > 0 && !fact.isIndex ? [i] : [],
     );
     return ordinates.length > 0 ? { keys, ordinates } : undefined;
   }
@@ -53,6 +56,7 @@ function namesSpectra(context: LayoutContext, column: number): boolean {
 
 function groupRows(context: LayoutContext, keys: readonly number[]): Map<string, number[]> {
   const groups = new Map<string, number[]>();
+  context.options.onSteps?.(context.table.rows.length * keys.length);
   for (let row = 0; row < context.table.rows.length; row++) {
     const key = keys.map((column) => cellOf(context, column, row)).join(' ');
     const rows = groups.get(key);

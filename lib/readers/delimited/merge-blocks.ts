@@ -22,21 +22,57 @@ interface GrowingBlock {
   messy: number;
   breaks: number[];
   strays: number[];
+  /** Cells that stand in the file, whatever the table's width has become. */
+  cells: number;
 }
+
+/** The first cell of a line as a number: x, or the row's index, in any table that has one. */
+type FirstNumber = (line: number) => number;
 
 /**
  * Join blocks that are one table with damaged lines inside: few lines between, and x going on as before. A damaged
  * line that still begins with its x becomes a row; the others are kept apart to be told of.
  */
-export function mergeBlocks(lines: TextLines, decision: Decision): MergedBlock[] {
+export function mergeBlocks(
+  lines: TextLines,
+  decision: Decision,
+  onSteps?: (steps: number) => void,
+): MergedBlock[] {
   const merged: GrowingBlock[] = [];
+  const xOf = firstNumbers(lines, decision, onSteps);
   for (const block of decision.blocks) {
+    onSteps?.(block.rows.length);
     const before = merged[merged.length - 1];
-    const between = before ? linesBetween(lines, decision, before, block) : undefined;
-    if (before && between && goesOn(lines, decision, before, block)) append(before, block, between);
-    else merged.push({ ...block, rows: [...block.rows], breaks: [...block.breaks], strays: [] });
+    const between = before ? linesBetween(lines, decision, xOf, before, block) : undefined;
+    if (before && between && goesOn(xOf, before, block)) append(before, block, between);
+    else merged.push(grown(block));
   }
   return merged;
+}
+
+function grown(block: Block): GrowingBlock {
+  const cells = block.rows.length * block.fields;
+  return { ...block, rows: [...block.rows], breaks: [...block.breaks], strays: [], cells };
+}
+
+/** Each line is looked at once, however many parts it is compared with. */
+function firstNumbers(
+  lines: TextLines,
+  { dialect }: Decision,
+  onSteps?: (steps: number) => void,
+): FirstNumber {
+  const known = new Map<number, number>();
+  const bounds: number[] = [];
+  return (line) => {
+    const before = known.get(line);
+    if (before !== undefined) return before;
+    const [start, end] = [lines.start[line] ?? 0, lines.end[line] ?? 0];
+    onSteps?.(end - start);
+    const count = splitCells(lines.text, start, end, dialect.delimiter, bounds);
+    const x = count === 0 ? NaN : parseNumber(lines.text, bounds[0] ?? 0, bounds[1] ?? 0, markCode(dialect));
+    known.set(line, x);
+    return x;
+  };
 }
 
 interface Between {
@@ -47,6 +83,7 @@ interface Between {
 function linesBetween(
   lines: TextLines,
   decision: Decision,
+  xOf: FirstNumber,
   before: Block,
   block: Block,
 ): Between | undefined {
@@ -60,31 +97,16 @@ function linesBetween(
     if (decision.views.isEmpty[shape] === 1) continue;
     filled += 1;
     if (filled > MOST_BETWEEN || isWavelengthWord(lineText(lines, line))) return undefined;
-    if (Number.isNaN(firstNumber(lines, decision, line))) between.strays.push(line);
+    if (Number.isNaN(xOf(line))) between.strays.push(line);
     else between.rows.push(line);
   }
   return between;
 }
 
-/** The first cell of a line as a number: x, or the row's index, in any table that has one. */
-function firstNumber(lines: TextLines, decision: Decision, line: number): number {
-  const bounds: number[] = [];
-  const count = splitCells(
-    lines.text,
-    lines.start[line] ?? 0,
-    lines.end[line] ?? 0,
-    decision.dialect.delimiter,
-    bounds,
-  );
-  return count === 0
-    ? NaN
-    : parseNumber(lines.text, bounds[0] ?? 0, bounds[1] ?? 0, markCode(decision.dialect));
-}
-
-function goesOn(lines: TextLines, decision: Decision, before: Block, block: Block): boolean {
+function goesOn(xOf: FirstNumber, before: GrowingBlock, block: Block): boolean {
   if (block.fields > 2 * before.fields || before.fields > 2 * block.fields) return false;
-  const at = (line: number | undefined): number =>
-    line === undefined ? NaN : firstNumber(lines, decision, line);
+  if (mostlyEmpty(before, block)) return false;
+  const at = (line: number | undefined): number => (line === undefined ? NaN : xOf(line));
   const long = before.rows.length >= 2 ? before : block;
   const start = at(long.rows[0]);
   const step = (at(long.rows[long.rows.length - 1]) - start) / (long.rows.length - 1);
@@ -94,6 +116,12 @@ function goesOn(lines: TextLines, decision: Decision, before: Block, block: Bloc
   return within && jump * step > 0 && Math.abs(jump) <= 12 * Math.abs(step);
 }
 
+/** Rows of ever more cells are no one table: joined, nearly all of it would be empty. */
+function mostlyEmpty(before: GrowingBlock, block: Block): boolean {
+  const cells = Math.max(before.fields, block.fields) * (before.rows.length + block.rows.length);
+  return cells > 4 * (before.cells + block.rows.length * block.fields);
+}
+
 function append(before: GrowingBlock, block: Block, between: Between): void {
   const both = before.rows.length >= 3 && block.rows.length >= 3;
   const longer = before.rows.length >= block.rows.length ? before.fields : block.fields;
@@ -101,6 +129,7 @@ function append(before: GrowingBlock, block: Block, between: Between): void {
   for (const row of between.rows) before.rows.push(row);
   for (const row of block.rows) before.rows.push(row);
   for (const stray of between.strays) before.strays.push(stray);
+  before.cells += block.rows.length * block.fields + between.rows.length;
   before.numbers += block.numbers;
   before.messy += block.messy;
 }

@@ -22,9 +22,11 @@ const KINDS: Record<NotASpectrum['kind'], string> = {
 /** Offer a table that is no spectrum as what it is, with its cells as they stand. */
 export function notASpectrum(context: LayoutContext): NotASpectrum {
   const { lines, dialect, table, heading } = context;
-  const rows = table.rows
-    .slice(0, MOST_ROWS)
-    .map((line) => cellTexts(lines.text, lines.start[line] ?? 0, lines.end[line] ?? 0, dialect.delimiter));
+  const rows = table.rows.slice(0, MOST_ROWS).map((line) => {
+    const [start, end] = [lines.start[line] ?? 0, lines.end[line] ?? 0];
+    context.options.onSteps?.(end - start);
+    return cellTexts(lines.text, start, end, dialect.delimiter);
+  });
   const kind = kindOf(context, rows);
   return { kind, message: KINDS[kind], columns: heading.labels, rows };
 }

@@ -50,7 +50,7 @@ export function readNumbers(
     texts: 0,
   }));
   const ragged: number[] = [];
-  const cutAt = dialect.delimiter === 'fixed' ? fieldEnds(lines, block, dialect) : undefined;
+  const cutAt = dialect.delimiter === 'fixed' ? fieldEnds(lines, block, dialect, onSteps) : undefined;
   const mark = markCode(dialect);
   const bounds: number[] = [];
   let looked = 0;
@@ -119,12 +119,19 @@ function readCell(
  * Where the fields of a fixed-width table end, counted from the line's start: numbers are set flush right, so that
  * their ends stand one below the other, whether or not a number fills its field.
  */
-function fieldEnds(lines: TextLines, block: MergedBlock, dialect: Dialect): number[] | undefined {
+function fieldEnds(
+  lines: TextLines,
+  block: MergedBlock,
+  dialect: Dialect,
+  onSteps?: (steps: number) => void,
+): number[] | undefined {
   const bounds: number[] = [];
   let ends: number[] | undefined;
   for (const line of block.rows) {
     const start = lines.start[line] ?? 0;
-    const count = splitCells(lines.text, start, lines.end[line] ?? 0, dialect.delimiter, bounds);
+    const end = lines.end[line] ?? 0;
+    onSteps?.(end - start);
+    const count = splitCells(lines.text, start, end, dialect.delimiter, bounds);
     if (count !== block.fields) continue;
     const these = Array.from({ length: count }, (_, cell) => (bounds[2 * cell + 1] ?? 0) - start);
     if (ends && these.some((end, i) => end !== ends?.[i])) return undefined;

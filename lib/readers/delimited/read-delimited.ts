@@ -43,6 +43,7 @@ export function readDelimited(
   if (!decision) throw new ReaderError('NO_TABLE', NO_TABLE);
   const doubt = commaDoubt(lines, decision, options);
   if (doubt) {
+    options.onSteps?.(3 * text.length);
     const reading = readDelimited(doubt.text, fileName, encoding, {
       ...options,
       delimiter: ';',
@@ -70,7 +71,7 @@ function readTables(
   encoding: string,
   options: ReadOptions,
 ): ReadResult {
-  const blocks = worthReading(mergeBlocks(lines, decision));
+  const blocks = worthReading(mergeBlocks(lines, decision, options.onSteps));
   const global = headerFacts(linesText(lines, 0, blocks[0]?.rows[0] ?? 0));
   const tables = blocks.map((block, k) => {
     const above = k === 0 ? -1 : lastRow(blocks[k - 1]);
@@ -145,6 +146,7 @@ function buildResult(
   const spectra: ReadSpectrum[] = [];
   const questions: Question[] = [...tableQuestions];
   const warnings: ReaderWarning[] = [...tableWarnings];
+  const places = new Map(all.map((table, k) => [table, k]));
   for (const table of chosen) {
     const unit = judgeXUnit(table.series, table.context.header, options);
     if (unit.question) questions.push(unit.question);
@@ -157,7 +159,7 @@ function buildResult(
         : options;
     for (const series of table.series) {
       const finished = finishSpectrum(
-        seriesToDraft(series, unit, table.context.header, options, all.indexOf(table)),
+        seriesToDraft(series, unit, table.context.header, options, places.get(table) ?? 0),
         withMissing,
       );
       spectra.push(...finished.spectra);

@@ -41,6 +41,7 @@ export function findHeadingAxis(context: LayoutContext): HeadingAxis | undefined
 
 function axisOf(context: LayoutContext, line: number): HeadingAxis | undefined {
   const { lines, dialect, block } = context;
+  context.options.onSteps?.((lines.end[line] ?? 0) - (lines.start[line] ?? 0));
   const cells = cellTexts(lines.text, lines.start[line] ?? 0, lines.end[line] ?? 0, dialect.delimiter);
   const shift = cells.length === block.fields - 1 ? 1 : 0;
   const numbers = cells.map((cell) => numberInWords(cell, markCode(dialect)));
@@ -102,6 +103,7 @@ export function rowSeries(context: LayoutContext, axis: HeadingAxis): Series[] {
   const leading = axis.columns[0] ?? 0;
   return table.rows.flatMap((line, row) => {
     if (line === axis.line) return [];
+    context.options.onSteps?.((lines.end[line] ?? 0) - (lines.start[line] ?? 0) + axis.columns.length);
     const facts = leadingFacts(context, line, leading, heads);
     const { y, gaps } = rowOrdinates(context, row, axis.columns);
     return [

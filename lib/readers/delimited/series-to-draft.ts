@@ -81,5 +81,6 @@ export function seriesToDraft(
 function withoutStandIns(y: Float64Array, header: HeaderFacts): Float64Array {
   const sentinel = sentinelValue(y);
   if (sentinel === undefined && header.missing.length === 0) return y;
-  return y.filter((value) => value !== sentinel && !header.missing.includes(value));
+  const standIns = new Set(header.missing);
+  return y.filter((value) => value !== sentinel && !standIns.has(value));
 }

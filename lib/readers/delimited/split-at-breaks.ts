@@ -14,12 +14,13 @@ export function splitAtBreaks(context: LayoutContext, xColumn: number, series: r
     return [...series];
   if (!block.breaks.every((start) => restarts(x.values, start))) return [...series];
   const split: Series[] = [];
+  const columnOf = new Map(table.columns.map((column) => [column.values, column]));
+  const other = table.columns[context.columns.findIndex((_, i) => i !== xColumn)];
   starts.forEach((start, k) => {
     const rows = Array.from({ length: (starts[k + 1] ?? table.rows.length) - start }, (_, i) => start + i);
     for (const one of series) {
-      const y =
-        table.columns.find((column) => column.values === one.y) ??
-        table.columns[context.columns.findIndex((_, i) => i !== xColumn)];
+      context.options.onSteps?.(rows.length);
+      const y = columnOf.get(one.y) ?? other;
       if (y)
         split.push({ ...one, ...seriesPoints(x, y, rows, table.rows), line: table.rows[start] ?? one.line });
     }

@@ -110,7 +110,7 @@ export function cellTexts(text: string, start: number, end: number, delimiter: D
 }
 
 export function plainCell(cell: string): string {
-  const trimmed = cell.replace(/^[\s\u00a0\u202f]+|[\s\u00a0\u202f]+$/g, '');
-  const quoted = /^"(.*)"$/s.exec(trimmed)?.[1];
-  return (quoted === undefined ? trimmed : quoted.replace(/""/g, '"')).trim();
+  const trimmed = cell.trim();
+  const quoted = trimmed.length >= 2 && trimmed.startsWith('"') && trimmed.endsWith('"');
+  return quoted ? trimmed.slice(1, -1).replace(/""/g, '"').trim() : trimmed;
 }

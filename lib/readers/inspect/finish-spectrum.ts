@@ -5,6 +5,9 @@ import { withoutRepeats } from './repeats';
 import { sentinelValue, withGapsAt } from './sentinels';
 import { finiteDraft, pickPoints, UNIT_WORDS, type SpectrumDraft } from './spectrum-draft';
 
+/** How often each point is looked at here: stand-ins, order, equal x, plateau, gaps. */
+const PASSES = 5;
+
 export interface Finished {
   readonly spectra: ReadSpectrum[];
   readonly questions: Question[];
@@ -16,6 +19,7 @@ export interface Finished {
  */
 export function finishSpectrum(decoded: SpectrumDraft, options: ReadOptions): Finished {
   const questions: Question[] = [];
+  options.onSteps?.(PASSES * decoded.x.length);
   const draft = dealWithSentinels(finiteDraft(decoded), options, questions);
   if (draft.x.length === 0) return { spectra: [], questions };
   const order = xOrder(draft.x);

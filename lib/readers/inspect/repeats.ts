@@ -23,11 +23,8 @@ export function withoutRepeats(draft: SpectrumDraft, choice: ReadOptions['equalX
   for (const group of groups) {
     const [first = 0, ...others] = group;
     const differing = others.filter((place) => !sameReading(draft.y, first, place));
-    for (const place of others) {
-      if (differing.includes(place)) continue;
-      dropped.add(place);
-      same += 1;
-    }
+    same += others.length - differing.length;
+    for (const place of others) if (sameReading(draft.y, first, place)) dropped.add(place);
     if (differing.length === 0) continue;
     conflicts += 1;
     if (Number.isNaN(example)) example = draft.x[first] ?? NaN;

@@ -34,9 +34,10 @@ function looksDeclared(value: number): boolean {
 export function withGapsAt(draft: SpectrumDraft, values: readonly number[]): SpectrumDraft {
   const gaps: Gap[] = [...draft.gaps];
   const y = Float64Array.from(draft.y);
+  const standIns = new Set(values);
   for (let i = 0; i < y.length; i++) {
     const value = y[i] ?? NaN;
-    if (!values.includes(value)) continue;
+    if (!standIns.has(value)) continue;
     gaps.push({ index: i, reason: 'missing', text: String(value) });
     y[i] = NaN;
   }

@@ -35,7 +35,7 @@ export interface Ordinates {
 }
 
 /** A run of equal ordinates may make a table longer than its text, but not without end. */
-export const POINTS_PER_BYTE = 64;
+export const POINTS_PER_BYTE = 32;
 
 /**
  * Decode the ordinates of (X++(Y..Y)) in any of the forms AFFN, PAC, SQZ, DIF, DUP, mixed as they come.

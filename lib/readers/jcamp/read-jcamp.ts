@@ -25,7 +25,8 @@ const PEAKS = new Set(['PEAKTABLE', 'PEAKASSIGNMENTS', 'XYASSIGNMENTS']);
  */
 export function readJcamp(text: string, fallbackName: string, options: ReadOptions): ReadResult {
   const lines = splitLines(text);
-  options.onSteps?.(text.length);
+  // Once for the lines, once for the labels.
+  options.onSteps?.(2 * text.length);
   const reading = new JcampReading(lines, fallbackName, options);
   const records = jcampRecords(lines);
   for (const record of records) reading.take(record);
@@ -108,7 +109,6 @@ class JcampReading {
         blockIndex: index,
         cut: this.isCut(record),
       });
-      this.options.onSteps?.(draft.x.length);
       const finished = finishSpectrum(draft, this.options);
       this.spectra.push(...finished.spectra);
       this.questions.push(...finished.questions);

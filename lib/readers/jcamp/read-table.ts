@@ -35,6 +35,11 @@ export interface TableContext {
   readonly cut: boolean;
 }
 
+/** How often each character of a table is looked at: for its comment (twice), its profile, its numbers. */
+const PASSES = 4;
+/** How often each data line is held against a grid. */
+const LINE_PASSES = 8;
+
 interface Points {
   readonly x: Float64Array;
   readonly y: Float64Array;
@@ -76,6 +81,8 @@ export function readTable(context: TableContext): SpectrumDraft {
       record.line + 1,
     );
   }
+  // Scaling, x and the checks against the header go over the points once more each.
+  options.onSteps?.(4 * points.y.length);
   const warnings = [...points.warnings, ...headerChecks(block.labels, points.x, points.y, header.yFactor)];
   if (!block.labels.has('YFACTOR') && !block.labels.has('FACTOR') && /\+\+/.test(form)) {
     warnings.push({
@@ -152,6 +159,9 @@ function packedPoints(context: TableContext, header: TableHeader): Points {
   const xFactor = Number.isFinite(header.xFactor) && header.xFactor !== 0 ? header.xFactor : 1;
   const grid = chooseGrid({ ...header, xFactor }, ordinates);
   const placed = placeOrdinates(ordinates, grid, xFactor);
+  context.options.onSteps?.(
+    PASSES * profile.bytes + ordinates.raw.length + LINE_PASSES * ordinates.lines.length,
+  );
   const y = placed.raw.map((raw) => raw * header.yFactor);
   const warnings = [...ordinates.warnings, ...grid.warnings, ...placed.warnings];
   if (profile.decimalComma)
@@ -167,6 +177,8 @@ function packedPoints(context: TableContext, header: TableHeader): Points {
 function pairPoints(context: TableContext, header: TableHeader): Points {
   const { lines, record, cut } = context;
   const pairs = decodePairs(lines, record.from, record.to, tableProfile(lines, record.from, record.to));
+  const bytes = (lines.end[record.to - 1] ?? 0) - (lines.start[record.from] ?? 0);
+  context.options.onSteps?.(PASSES * Math.max(0, bytes));
   if (cut && pairs.y.length !== header.count) markCut(pairs.y, pairs.gaps);
   const xFactor = Number.isFinite(header.xFactor) && header.xFactor !== 0 ? header.xFactor : 1;
   const x = pairs.x.toArray().map((value) => value * xFactor);

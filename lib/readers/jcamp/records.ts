@@ -84,11 +84,25 @@ const FIRST_LABELS = new Set([
   'END',
 ]);
 
+/** Labels that no other kind of file has, wherever they stand. */
+const SURE_LABELS = new Set(['TITLE', 'JCAMPDX', 'XYDATA', 'XYPOINTS']);
+
 /** Whether a text is JCAMP-DX: its first line but for blanks and comments starts a record with a label of that format. */
 export function looksLikeJcamp(text: string): boolean {
-  const start = text.slice(0, 20_000);
-  const label = /^\s*(?:\$\$[^\r\n]*\s*)*##\s*([^=\r\n]{0,40})=/.exec(start)?.[1];
-  if (label !== undefined && FIRST_LABELS.has(normalLabel(label))) return true;
-  if (!/^\s*(?:\$\$|##)/.test(start)) return false;
-  return /(?:^|[\r\n])\s*##\s*(?:title|jcamp[\s\-_/]*dx|xydata|xypoints)\s*=/i.test(start);
+  const [first, ...more] = text
+    .slice(0, 20_000)
+    .split(/[\r\n]/)
+    .map((line) => line.trimStart())
+    .filter((line) => line !== '');
+  if (first === undefined || !/^(?:\$\$|##)/.test(first)) return false;
+  const records = [first, ...more].filter((line) => line.startsWith('##')).map(labelOf);
+  const leading = [first, ...more].find((line) => !line.startsWith('$$'));
+  if (leading?.startsWith('##') && FIRST_LABELS.has(records[0] ?? '')) return true;
+  return records.some((label) => SURE_LABELS.has(label));
+}
+
+/** The label of a line that starts a record; empty when no equals sign follows it. */
+function labelOf(line: string): string {
+  const equals = line.indexOf('=');
+  return equals < 0 || equals > 42 ? '' : normalLabel(line.slice(2, equals));
 }
