@@ -2,7 +2,7 @@ import { Card } from '@/components/ui/card';
 import { Columns } from '@/components/ui/columns';
 import { readingRuleWords } from '@/lib/curve/reading-rule-words';
 import { standardRows } from '@/lib/curve/standard-rows';
-import { compareModels } from '@/lib/engine';
+import { allLimits, compareModels } from '@/lib/engine';
 import type { CurveView } from '@/lib/views/curve';
 import { CurveFacts } from './curve-facts';
 import { CurveJudgements } from './curve-judgements';
@@ -53,7 +53,7 @@ export function CurveDetail({ curve, timeZone }: { curve: CurveView; timeZone: s
         </div>
       </Columns>
       <Card flush title="Limits on one ruler" aside="in the measured solution">
-        <LimitsRuler limits={result.curve.limits} range={result.curve.range} unit={method.unit} />
+        <LimitsRuler {...allLimits({ unit: method.unit, curve: curve.request })} range={result.curve.range} />
       </Card>
       <Card flush title="Models side by side" aside="a batch shows them by its own results">
         <ModelTable models={compareModels(curve.request)} unit={method.unit} />

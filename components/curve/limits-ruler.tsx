@@ -1,8 +1,9 @@
+import { Disclosure } from '@/components/ui/disclosure';
 import { ToneShape, type Tone } from '@/components/ui/pill';
 import { RowHead, Table, Td, Th } from '@/components/ui/table';
 import { classNames } from '@/components/ui/class-names';
 import { limitScale, type LimitScale } from '@/lib/curve/limit-scale';
-import type { LimitAnswer } from '@/lib/engine';
+import type { LimitAnswer, LimitNotMade } from '@/lib/engine';
 import { formatNumber } from '@/lib/format/number';
 
 /** A result of today, in the measured solution. */
@@ -116,11 +117,14 @@ function ResultsRow({ results, scale }: { results: readonly RuledResult[]; scale
  */
 export function LimitsRuler({
   limits,
+  notMade = [],
   range,
   unit,
   results = [],
 }: {
   limits: readonly LimitAnswer[];
+  /** Those that the data do not allow, each with its reason. */
+  notMade?: readonly LimitNotMade[];
   range: { readonly min: number; readonly max: number };
   unit: string;
   results?: readonly RuledResult[];
@@ -133,55 +137,70 @@ export function LimitsRuler({
   ]);
   const sorted = [...limits].sort((a, b) => KIND_ORDER[a.kind] - KIND_ORDER[b.kind] || a.value - b.value);
   return (
-    <Table label="Limits on one ruler">
-      <Head scale={scale} unit={unit} />
-      <tbody>
-        {results.length > 0 && <ResultsRow results={results} scale={scale} />}
-        <tr>
-          <RowHead>Lowest standard</RowHead>
-          <Td>
-            <Rail scale={scale}>
-              <span
-                aria-hidden="true"
-                className="absolute inset-y-2 rounded-full bg-band"
-                style={{
-                  left: percent(scale.at(range.min)),
-                  width: percent(scale.at(range.max) - scale.at(range.min)),
-                }}
-              />
-              <Mark scale={scale} value={range.min} className="bg-ink" />
-            </Rail>
-          </Td>
-          <Td numeric className="max-md:hidden">
-            {formatNumber(range.min, 3)}
-          </Td>
-          <Td className="text-sm text-ink-2">results are read off from here up to the top standard</Td>
-        </tr>
-        {sorted.map((limit) => (
-          <tr key={limit.name + limit.basis}>
-            <RowHead>
-              {limit.name}
-              <span className="block text-xs font-normal text-ink-2">{KIND_WORDS[limit.kind]}</span>
-              <span className="num block text-sm font-normal md:hidden">
-                {formatNumber(limit.value, 2)} {unit}
-              </span>
-            </RowHead>
+    <>
+      <Table label="Limits on one ruler">
+        <Head scale={scale} unit={unit} />
+        <tbody>
+          {results.length > 0 && <ResultsRow results={results} scale={scale} />}
+          <tr>
+            <RowHead>Lowest standard</RowHead>
             <Td>
               <Rail scale={scale}>
-                <Mark
-                  scale={scale}
-                  value={limit.value}
-                  className={limit.kind === 'critical' ? 'bg-amber' : 'bg-uv'}
+                <span
+                  aria-hidden="true"
+                  className="absolute inset-y-2 rounded-full bg-band"
+                  style={{
+                    left: percent(scale.at(range.min)),
+                    width: percent(scale.at(range.max) - scale.at(range.min)),
+                  }}
                 />
+                <Mark scale={scale} value={range.min} className="bg-ink" />
               </Rail>
             </Td>
             <Td numeric className="max-md:hidden">
-              {formatNumber(limit.value, 2)}
+              {formatNumber(range.min, 3)}
             </Td>
-            <Td className="max-w-80 min-w-48 text-sm text-ink-2">{limit.basis}</Td>
+            <Td className="text-sm text-ink-2">results are read off from here up to the top standard</Td>
           </tr>
-        ))}
-      </tbody>
-    </Table>
+          {sorted.map((limit) => (
+            <tr key={limit.name + limit.basis}>
+              <RowHead>
+                {limit.name}
+                <span className="block text-xs font-normal text-ink-2">{KIND_WORDS[limit.kind]}</span>
+                <span className="num block text-sm font-normal md:hidden">
+                  {formatNumber(limit.value, 2)} {unit}
+                </span>
+              </RowHead>
+              <Td>
+                <Rail scale={scale}>
+                  <Mark
+                    scale={scale}
+                    value={limit.value}
+                    className={limit.kind === 'critical' ? 'bg-amber' : 'bg-uv'}
+                  />
+                </Rail>
+              </Td>
+              <Td numeric className="max-md:hidden">
+                {formatNumber(limit.value, 2)}
+              </Td>
+              <Td className="max-w-80 min-w-48 text-sm text-ink-2">{limit.basis}</Td>
+            </tr>
+          ))}
+        </tbody>
+      </Table>
+      {notMade.length > 0 && (
+        <div className="border-t px-4 py-2.5">
+          <Disclosure summary={`${notMade.length} that these data do not allow`}>
+            <ul className="grid gap-1 text-sm text-ink-2">
+              {notMade.map(({ name, reason }) => (
+                <li key={name}>
+                  <span className="text-ink">{name}:</span> {reason}
+                </li>
+              ))}
+            </ul>
+          </Disclosure>
+        </div>
+      )}
+    </>
   );
 }

@@ -1,5 +1,5 @@
 import { requestWith } from '@/lib/batch/unknown-request';
-import { calculateStandardCurve, compareModels, type LimitAnswer, type ModelUnder } from '@/lib/engine';
+import { allLimits, compareModels, type LimitsAnswer, type ModelUnder } from '@/lib/engine';
 import { AppError } from '@/lib/errors';
 import type { Actor } from '@/lib/policies/actor';
 import type { BatchView } from '@/lib/views/batch';
@@ -10,7 +10,8 @@ import { curveRequestOf } from './curves';
 export interface BatchComparison {
   readonly batch: BatchView;
   readonly models: readonly ModelUnder[];
-  readonly limits: readonly LimitAnswer[];
+  /** In the measured solution; for the fewest readings that a sample has. */
+  readonly limits: LimitsAnswer;
 }
 
 /**
@@ -24,6 +25,11 @@ export async function compareBatch(actor: Actor, batchId: string): Promise<Batch
   if (!batch.curve) throw new AppError('NOT_FOUND');
   const current = batch.determinations.filter(({ voidedAt }) => voidedAt === null);
   const request = requestWith(await curveRequestOf(actor, batch.curve.id), current);
-  const { limits } = calculateStandardCurve(request).curve;
+  const readings = Math.min(...current.map((one) => one.readings.length));
+  const limits = allLimits({
+    unit: request.unit,
+    curve: { ...request, unknowns: [] },
+    readings: Number.isFinite(readings) ? Math.max(1, readings) : 1,
+  });
   return { batch, models: compareModels(request), limits };
 }

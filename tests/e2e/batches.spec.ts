@@ -142,7 +142,7 @@ test('the table is copied with the decimal mark asked for and downloaded as CSV'
 test('models are compared by what they do to the results, and limits stand on one ruler', async ({
   page,
 }) => {
-  await batchWithSamples(page, 'Models and limits of July');
+  await batchWithSamples(page, 'Compared in July');
   await page.getByRole('link', { name: 'Models and limits' }).click();
   await expect(page.getByRole('heading', { level: 1, name: 'Models and limits' })).toBeVisible();
   const models = page.getByRole('table', { name: 'Models and weightings' });

@@ -185,7 +185,7 @@ test('a curve from spectra: chosen, given concentrations, read by a rule, a read
 }) => {
   test.slow();
   await signInAs(page, 'pi');
-  const notebook = await makeNotebook(page, 'From spectra');
+  const notebook = await makeNotebook(page, 'Curve off spectra');
   await page.goto(`${notebook}/spectra`);
   const files = [0.2, 0.4, 0.81, 1.2].map((height, index) => spectrumFile(`std ${index + 1}`, height));
   await page.getByLabel('Spectrum files').setInputFiles(files);

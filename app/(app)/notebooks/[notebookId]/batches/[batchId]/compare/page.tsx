@@ -51,7 +51,7 @@ export default async function ComparePage({
       </Card>
       <Card flush title="Limits on one ruler" aside="in the measured solution">
         {method.range && (
-          <LimitsRuler limits={limits} range={method.range} unit={method.unit} results={ruled(batch)} />
+          <LimitsRuler {...limits} range={method.range} unit={method.unit} results={ruled(batch)} />
         )}
       </Card>
     </>
