@@ -35,6 +35,21 @@ export interface Question {
   readonly choices: readonly QuestionChoice[];
 }
 
+/** A setting that no word of the file decides, and what was taken for it; `about` names the option that replaces it. */
+export interface Guess {
+  readonly about: Exclude<keyof ReadOptions, 'onSteps'>;
+  readonly sentence: string;
+}
+
+/** The ends of a table as texts, to be looked at before anything is kept. */
+export interface TablePreview {
+  readonly columns: readonly string[];
+  readonly first: readonly (readonly string[])[];
+  /** Empty when `first` holds all rows. */
+  readonly last: readonly (readonly string[])[];
+  readonly rows: number;
+}
+
 /** One spectrum as the file holds it: file order, file unit, nothing converted, nothing dropped. */
 export interface ReadSpectrum {
   readonly name: string;
@@ -76,10 +91,16 @@ export interface ReadResult {
   readonly trailerText: string;
   readonly warnings: readonly ReaderWarning[];
   readonly questions: readonly Question[];
+  /** Empty when the file decides everything; answered guesses are none. */
+  readonly guesses: readonly Guess[];
+  readonly preview: TablePreview;
   readonly notASpectrum?: NotASpectrum;
   /** The settings behind this reading; handing them back as options gives the same reading. */
   readonly settings: ReadOptions;
-  /** Files of one shape (same reader, dialect and columns) carry the same text, so that one answer serves all. */
+  /**
+   * Files of one shape (same reader, dialect, columns, header words, what was asked) carry the same key, whatever was
+   * answered, so that one answer serves all.
+   */
   readonly shape: string;
 }
 
@@ -94,6 +115,8 @@ export interface ReadOptions {
   readonly headerRows?: number;
   readonly orientation?: Orientation;
   readonly xColumn?: number;
+  /** Line of the file that holds the wavelengths of spectra in rows. */
+  readonly xRow?: number;
   readonly yColumns?: readonly number[];
   readonly xUnit?: XUnit;
   readonly signal?: SignalKind;

@@ -12,6 +12,7 @@ const readOptions = z.strictObject({
   headerRows: column.optional(),
   orientation: z.enum(['columns', 'pairs', 'rows', 'long', 'stacked']).optional(),
   xColumn: column.optional(),
+  xRow: column.optional(),
   yColumns: z.array(column).optional(),
   xUnit: z.enum(['nm', '1/cm', 'um', 'angstrom', 'eV']).optional(),
   signal: z.enum(['absorbance', 'transmittance', 'percentTransmittance', 'other']).optional(),

@@ -1,7 +1,10 @@
 import { distinctNames } from '../distinct-names';
+import { guessList } from '../guess-list';
+import { previewSpectrum } from '../preview-table';
+import { shapeKey, spectrumWords } from '../shape-key';
 import { isWavelengthWord, xUnitFromText } from '../header-words';
 import { finishSpectrum } from '../inspect/finish-spectrum';
-import { fittingUnits, judgeSignal } from '../inspect/guesses';
+import { answeredSignal, fittingUnits, judgeSignal } from '../inspect/guesses';
 import type { SpectrumDraft } from '../inspect/spectrum-draft';
 import {
   ReaderError,
@@ -83,13 +86,13 @@ export function readAniml(text: string, fallbackName: string, options: ReadOptio
     trailerText: '',
     warnings,
     questions,
+    guesses: guessList([], questions, spectra),
+    preview: previewSpectrum(spectra[0]),
     settings: {
       ...(options.xUnit ? { xUnit: options.xUnit } : {}),
       ...(options.signal ? { signal: options.signal } : {}),
     },
-    shape: ['animl', ...new Set(spectra.map((spectrum) => `${spectrum.xUnit} ${spectrum.signalText}`))].join(
-      '|',
-    ),
+    shape: shapeKey('animl', spectrumWords(spectra)),
   };
 }
 
@@ -177,9 +180,7 @@ function seriesDraft(
     });
   }
   const yText = [y.unit, y.quantity || y.name].filter((word) => word !== '').join(' ');
-  const judged = options.signal
-    ? { signal: options.signal, scale: 1, guessed: false, note: undefined }
-    : judgeSignal(yText, points.values);
+  const judged = options.signal ? answeredSignal(options.signal, yText) : judgeSignal(yText, points.values);
   if (judged.note) warnings.push(judged.note);
   return {
     name: '',

@@ -1,5 +1,6 @@
 import type { TextLines } from '../text-lines';
-import type { NotASpectrum, Orientation, Question, ReadOptions, ReaderWarning } from '../types';
+import type { Guess, NotASpectrum, Orientation, Question, ReadOptions, ReaderWarning } from '../types';
+import { checkColumns } from '../check-answers';
 import { columnFacts } from './column-facts';
 import { columnSeries, pairSeries } from './columns-layout';
 import type { Decision } from './decide-dialect';
@@ -7,6 +8,7 @@ import { findX, isPaired } from './find-x';
 import type { HeaderFacts } from './header-facts';
 import { findHeading, headingSteps } from './header-rows';
 import type { LayoutContext } from './layout-context';
+import { layoutGuesses, ROWS_BY_FORM } from './layout-guesses';
 import { findLongKeys, longSeries } from './long-layout';
 import type { MergedBlock } from './merge-blocks';
 import { notASpectrum } from './not-a-spectrum';
@@ -24,6 +26,8 @@ export interface AnalysedTable {
   readonly warnings: readonly ReaderWarning[];
   readonly questions: readonly Question[];
   readonly notASpectrum?: NotASpectrum;
+  /** What the numbers alone decided of the layout. */
+  readonly guesses: readonly Guess[];
 }
 
 /** Read one block and find its layout: spectra in columns, pairs, rows or a long list, or no spectra at all. */
@@ -38,6 +42,7 @@ export function analyseTable(
 ): AnalysedTable {
   const { dialect } = decision;
   const { block, labels } = withoutHeadRow(lines, decision, whole, options);
+  checkColumns(options, block.fields);
   const table = readNumbers(lines, block, dialect, options.onSteps);
   options.onSteps?.(headingSteps(lines, block.rows[0] ?? 0, above));
   const found = findHeading(lines, dialect, block.rows[0] ?? 0, block.fields, above);
@@ -67,7 +72,8 @@ export function analyseTable(
     above,
   };
   const analysed = layOut(context);
-  return { ...analysed, warnings: [...analysed.warnings, ...tableWarnings(context)] };
+  const guesses = layoutGuesses(context, analysed);
+  return { ...analysed, guesses, warnings: [...analysed.warnings, ...tableWarnings(context)] };
 }
 
 /** A declared name with its unit says more than the same name alone. */
@@ -99,7 +105,7 @@ function withoutHeadRow(
 
 function layOut(context: LayoutContext): AnalysedTable {
   const { options } = context;
-  const none = { context, warnings: [], questions: [], series: [] };
+  const none = { context, warnings: [], questions: [], series: [], guesses: [] };
   if (options.firstX !== undefined && options.stepX !== undefined && options.xColumn === undefined) {
     return {
       ...none,
@@ -109,9 +115,23 @@ function layOut(context: LayoutContext): AnalysedTable {
   }
   const xColumn = findX(context.table, context.columns, context.heading.labels, options);
   const asRows =
-    options.orientation === 'rows' || (options.orientation === undefined && prefersRows(context, xColumn));
+    options.orientation === 'rows' ||
+    options.xRow !== undefined ||
+    (options.orientation === undefined && prefersRows(context, xColumn));
   const axis = asRows ? findHeadingAxis(context) : undefined;
-  if (axis) return { ...none, orientation: 'rows', series: rowSeries(context, axis) };
+  if (axis) {
+    const stated =
+      axis.unitText !== '' ||
+      xColumn === undefined ||
+      options.orientation === 'rows' ||
+      options.xRow !== undefined;
+    return {
+      ...none,
+      orientation: 'rows',
+      series: rowSeries(context, axis),
+      guesses: stated ? [] : [ROWS_BY_FORM],
+    };
+  }
   if (xColumn === undefined) {
     if (mayLackX(context))
       return {

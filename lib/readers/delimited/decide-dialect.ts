@@ -8,7 +8,12 @@ export interface Decision {
   readonly views: ShapeViews;
   readonly blocks: readonly Block[];
   readonly best: Block;
+  /** Another delimiter that reads the table about as well, with other columns. */
+  readonly rival?: Dialect;
 }
+
+/** A reading with this share of the winner's score is its rival. */
+const ALIKE = 0.98;
 
 /**
  * Decide delimiter and decimal mark together: each pair reads the whole table, and the one whose best block holds the
@@ -24,6 +29,7 @@ function decideAmong(lines: TextLines, options: ReadOptions, minNumbers: number)
   const from = options.headerRows ?? 0;
   let winner: Decision | undefined;
   let most = 0;
+  const tried: { dialect: Dialect; score: number; fields: number }[] = [];
   for (const dialect of candidateDialects(lines.text, options)) {
     const views = viewShapes(lines, dialect, minNumbers);
     options.onSteps?.(views.looked + lines.count);
@@ -32,12 +38,21 @@ function decideAmong(lines: TextLines, options: ReadOptions, minNumbers: number)
     if (!best) continue;
     if (dialect.delimiter === 'fixed') options.onSteps?.(best.rows.length);
     const score = blockScore(best);
-    if (score <= most) continue;
     if (dialect.delimiter === 'fixed' && !options.delimiter && !equalLengths(lines, best)) continue;
+    tried.push({ dialect, score, fields: best.fields });
+    if (score <= most) continue;
     most = score;
     winner = { dialect, views, blocks, best };
   }
-  return winner;
+  if (!winner) return undefined;
+  const { dialect, best } = winner;
+  const rival = tried.find(
+    (other) =>
+      other.score >= ALIKE * most &&
+      other.dialect.delimiter !== dialect.delimiter &&
+      other.fields !== best.fields,
+  );
+  return rival ? { ...winner, rival: rival.dialect } : winner;
 }
 
 /** Fixed width shows in lines of one length. */

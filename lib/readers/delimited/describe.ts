@@ -1,9 +1,9 @@
 import { UNIT_WORDS } from '../inspect/spectrum-draft';
-import type { Delimiter, Orientation, ReadSpectrum } from '../types';
+import type { Delimiter, NotASpectrum, Orientation, ReadSpectrum } from '../types';
 import type { AnalysedTable } from './analyse-table';
 import type { Dialect } from './candidates';
 
-const DELIMITER_WORDS: Record<Delimiter, string> = {
+export const DELIMITER_WORDS: Record<Delimiter, string> = {
   ',': 'Comma between columns',
   ';': 'Semicolon between columns',
   tab: 'Tab between columns',
@@ -20,6 +20,15 @@ const LAYOUT_WORDS: Record<Orientation, string> = {
   stacked: 'tables one below the other',
 };
 
+const KIND_WORDS: Record<NotASpectrum['kind'], string> = {
+  readings: 'readings of samples',
+  kinetics: 'readings over time',
+  plate: 'a plate of readings',
+  calibration: 'concentrations and readings',
+  table: 'a table without a column for x',
+  peaks: 'a list of peaks',
+};
+
 /** What was understood of a table, in one sentence. */
 export function describeReading(
   dialect: Dialect,
@@ -31,11 +40,12 @@ export function describeReading(
     DELIMITER_WORDS[dialect.delimiter],
     dialect.decimalMark === ',' ? 'decimal comma' : 'decimal point',
   ];
-  if (table) parts.push(LAYOUT_WORDS[table.orientation]);
   const [first] = spectra;
+  if (table && first) parts.push(LAYOUT_WORDS[table.orientation]);
+  else if (table?.notASpectrum) parts.push(KIND_WORDS[table.notASpectrum.kind]);
   if (first) {
     const points = spectra.every((spectrum) => spectrum.x.length === first.x.length)
-      ? ` of ${first.x.length} points`
+      ? ` of ${first.x.length} ${first.x.length === 1 ? 'point' : 'points'}`
       : '';
     parts.push(`${spectra.length} ${spectra.length === 1 ? 'spectrum' : 'spectra'}${points}`);
     parts.push(

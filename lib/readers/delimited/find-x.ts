@@ -33,6 +33,21 @@ export function findX(
   return best;
 }
 
+/** Whether the numbers alone chose x, and another column could be x as well. */
+export function xIsGuess(
+  table: NumberTable,
+  facts: readonly ColumnFacts[],
+  labels: readonly string[],
+  options: ReadOptions,
+  xColumn: number,
+): boolean {
+  const label = labels[xColumn] ?? '';
+  if (options.xColumn !== undefined || isWavelengthWord(label) || xUnitFromText(label)) return false;
+  return facts.some(
+    (fact, i) => i !== xColumn && xScore(table, fact, labels[i] ?? '', i, xColumn, options) > 0,
+  );
+}
+
 function hasOther(facts: readonly ColumnFacts[], index: number): boolean {
   return facts.some((fact, i) => i > index && fact.direction !== 0 && fact.numbers > 1 && inRange(fact));
 }
@@ -50,7 +65,10 @@ function xScore(
   const unit = xUnitFromText(label);
   const plausible = fact.direction !== 0 || fact.sorted >= 0.9 || inRange(fact, unit);
   if (!plausible && isWavelengthWord(label)) return 0;
-  if (isWavelengthWord(label) || (unit && label.length < 40 && !signalFromText(label.replace(/\bA\b/, ''))))
+  if (
+    isWavelengthWord(label) ||
+    (unit && !readAtOne(label) && label.length < 40 && !signalFromText(label.replace(/\bA\b/, '')))
+  )
     return 100 + place;
   if (otherAxisWord(label) || signalFromText(label) || fact.isIndex) return 0;
   if (!inRange(fact, options.xUnit)) return 0;
@@ -62,6 +80,11 @@ function xScore(
   const ordered = xOrder(values).kind !== 'unsorted';
   const distinct = new Set(values).size === values.length;
   return fact.low >= 100 && (ordered || (distinct && values.length >= ENOUGH)) ? 20 + place : 0;
+}
+
+/** "A (412 nm)" is a reading at one wavelength, not an axis. */
+function readAtOne(label: string): boolean {
+  return /\d\s?(?:nm|\u00b5m|um)(?![a-z])/i.test(label);
 }
 
 /**

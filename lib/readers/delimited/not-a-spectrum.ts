@@ -1,4 +1,4 @@
-import { otherAxisWord } from '../header-words';
+import { otherAxisWord, signalFromText } from '../header-words';
 import type { NotASpectrum } from '../types';
 import type { LayoutContext } from './layout-context';
 import { cellTexts } from './split-cells';
@@ -19,6 +19,9 @@ const KINDS: Record<NotASpectrum['kind'], string> = {
   peaks: 'This lists peaks, which are no curve.',
 };
 
+const OF_SAMPLES =
+  'These are readings of samples, not a spectrum. Paste them into a standard curve or batch.';
+
 /** Offer a table that is no spectrum as what it is, with its cells as they stand. */
 export function notASpectrum(context: LayoutContext): NotASpectrum {
   const { lines, dialect, table, heading } = context;
@@ -28,7 +31,7 @@ export function notASpectrum(context: LayoutContext): NotASpectrum {
     return cellTexts(lines.text, start, end, dialect.delimiter);
   });
   const kind = kindOf(context, rows);
-  return { kind, message: KINDS[kind], columns: heading.labels, rows };
+  return { kind, message: kind === 'readings' ? OF_SAMPLES : KINDS[kind], columns: heading.labels, rows };
 }
 
 export function readingsTable(context: LayoutContext): NotASpectrum {
@@ -42,7 +45,18 @@ function kindOf(context: LayoutContext, rows: readonly (readonly string[])[]): N
   if (axes.includes('concentration') || labels.some((label) => /standard|std\b|calib/i.test(label)))
     return 'calibration';
   if (axes.includes('time')) return 'kinetics';
+  if (isListOfSamples(labels, rows)) return 'readings';
   return 'table';
+}
+
+/** Names in the first column, and absorbances beside them. */
+function isListOfSamples(labels: readonly string[], rows: readonly (readonly string[])[]): boolean {
+  const read = labels
+    .slice(1)
+    .some(
+      (label) => signalFromText(label)?.signal === 'absorbance' || /^A(?:\d{3}|[\s_])|reading/.test(label),
+    );
+  return read && rows.every(([name = '']) => name !== '' && Number.isNaN(Number(name)));
 }
 
 /** Rows that begin with A, B, C …; over them 1, 2, 3 …. */

@@ -1,6 +1,8 @@
 import { finishSpectrum } from '../inspect/finish-spectrum';
-import { UNIT_WORDS } from '../inspect/spectrum-draft';
+import { refused } from '../check-answers';
 import { distinctNames } from '../distinct-names';
+import { guessList } from '../guess-list';
+import { shapeKey } from '../shape-key';
 import { linesText, splitLines, type TextLines } from '../text-lines';
 import {
   ReaderError,
@@ -20,6 +22,8 @@ import { mergeBlocks, type MergedBlock } from './merge-blocks';
 import { readingsTable } from './not-a-spectrum';
 import { judgeXUnit, seriesToDraft } from './series-to-draft';
 import { chooseTables } from './choose-tables';
+import { dialectGuesses, oneOfEach, settingsOf, tablePreview } from './reading-facts';
+import { tableShape } from './table-shape';
 
 const NO_TABLE =
   'This text holds no table of numbers: at least one row with a wavelength and a reading is needed. Export the spectrum again, with its points.';
@@ -40,6 +44,10 @@ export function readDelimited(
   options.onSteps?.(text.length);
   const asked = options.delimiter === ',' && options.decimalMark === ',';
   const decision = decideDialect(lines, asked ? { ...options, decimalMark: '.' } : options);
+  if (!decision && options.headerRows)
+    throw refused(
+      `Below the first ${options.headerRows} lines there is no row of numbers. Give fewer header lines.`,
+    );
   if (!decision) throw new ReaderError('NO_TABLE', NO_TABLE);
   const doubt = commaDoubt(lines, decision, options);
   if (doubt) {
@@ -53,6 +61,10 @@ export function readDelimited(
     return {
       ...reading,
       settings,
+      guesses: asked
+        ? reading.guesses
+        : [{ about: 'decimalMark', sentence: doubt.question.message }, ...reading.guesses],
+      shape: shapeKey('delimited', ['comma in doubt', reading.shape]),
       dialect: reading.dialect.replace('Semicolon', 'Comma'),
       questions: asked ? reading.questions : [doubt.question, ...reading.questions],
     };
@@ -178,6 +190,7 @@ function buildResult(
   const last = all[all.length - 1]?.context.table.rows.at(-1) ?? lines.count - 1;
   if (spectra.length === 0 && !other && questions.length === 0) throw new ReaderError('NO_TABLE', NO_TABLE);
   const settings = settingsOf(decision, first, spectra, options);
+  const asked = oneOfEach(questions);
   return {
     reader: 'delimited',
     readerVersion: '1',
@@ -186,46 +199,15 @@ function buildResult(
     headerText: linesText(lines, 0, top?.context.table.rows[0] ?? start),
     trailerText: linesText(lines, last + 1, lines.count).trim(),
     warnings,
-    questions: oneOfEach(questions),
+    questions: asked,
+    guesses: guessList(
+      [...dialectGuesses(decision, options), ...chosen.flatMap((table) => table.guesses)],
+      asked,
+      spectra,
+    ),
+    preview: tablePreview(lines, decision, first ?? top),
     ...(other ? { notASpectrum: other } : {}),
     settings,
-    shape: [
-      'delimited',
-      decision.dialect.delimiter,
-      decision.dialect.decimalMark,
-      first?.orientation ?? 'none',
-      first?.orientation === 'rows' ? 'rows' : (first?.context.columns.length ?? 0),
-      first?.context.heading.labels[first.xColumn ?? 0] ?? '',
-      spectra[0] ? UNIT_WORDS[spectra[0].xUnit] : '',
-    ].join('|'),
+    shape: tableShape(decision.dialect, first, asked),
   };
-}
-
-function settingsOf(
-  decision: Decision,
-  table: AnalysedTable | undefined,
-  spectra: readonly ReadSpectrum[],
-  options: ReadOptions,
-): ReadOptions {
-  const { onSteps: _unused, ...given } = options;
-  const [spectrum] = spectra;
-  return {
-    ...given,
-    delimiter: decision.dialect.delimiter,
-    decimalMark: decision.dialect.decimalMark,
-    ...(table ? { orientation: table.orientation } : {}),
-    ...(table?.xColumn === undefined ? {} : { xColumn: table.xColumn }),
-    ...(spectrum ? { xUnit: spectrum.xUnit } : {}),
-  };
-}
-
-/** Twenty columns with the same question ask once; the first message stands for all. */
-function oneOfEach(questions: readonly Question[]): Question[] {
-  const seen = new Set<string>();
-  return questions.filter((question) => {
-    const key = `${question.code}|${question.choices.map((choice) => choice.label).join('|')}`;
-    if (seen.has(key)) return false;
-    seen.add(key);
-    return true;
-  });
 }

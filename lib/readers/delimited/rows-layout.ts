@@ -1,3 +1,4 @@
+import { refused } from '../check-answers';
 import { isWavelengthWord, xUnitFromText } from '../header-words';
 import { X_RANGES } from '../inspect/guesses';
 import { parseNumber } from '../number-cell';
@@ -24,7 +25,8 @@ const ROWS_ABOVE = 4;
  * "A528", "X350.5"), that rises or falls throughout and can be an axis. The table's own first row may be that heading.
  */
 export function findHeadingAxis(context: LayoutContext): HeadingAxis | undefined {
-  const { block, lines } = context;
+  const { block, lines, options } = context;
+  if (options.xRow !== undefined) return axisGiven(context, options.xRow);
   if (block.fields < SHORTEST_AXIS) return undefined;
   const first = block.rows[0] ?? 0;
   const candidates: number[] = [];
@@ -33,21 +35,31 @@ export function findHeadingAxis(context: LayoutContext): HeadingAxis | undefined
   }
   if (block.rows.length > 1) candidates.push(first);
   for (const line of candidates) {
-    const axis = axisOf(context, line);
+    const axis = axisOf(context, line, SHORTEST_AXIS);
     if (axis) return axis;
   }
   return undefined;
 }
 
-function axisOf(context: LayoutContext, line: number): HeadingAxis | undefined {
+/** The line that the person names. @throws ReaderError ANSWERS */
+function axisGiven(context: LayoutContext, line: number): HeadingAxis {
+  const axis = line < context.lines.count ? axisOf(context, line, 2) : undefined;
+  if (axis) return axis;
+  throw refused(
+    `Line ${line + 1} holds no row of wavelengths that rise or fall over the columns of the table.`,
+  );
+}
+
+function axisOf(context: LayoutContext, line: number, shortest: number): HeadingAxis | undefined {
   const { lines, dialect, block } = context;
   context.options.onSteps?.((lines.end[line] ?? 0) - (lines.start[line] ?? 0));
   const cells = cellTexts(lines.text, lines.start[line] ?? 0, lines.end[line] ?? 0, dialect.delimiter);
   const shift = cells.length === block.fields - 1 ? 1 : 0;
   const numbers = cells.map((cell) => numberInWords(cell, markCode(dialect)));
   const run = longestRun(numbers);
-  if (run.to - run.from < SHORTEST_AXIS || run.to - run.from < 0.5 * (block.fields - 9)) return undefined;
+  if (run.to - run.from < shortest || run.to - run.from < 0.5 * (block.fields - 9)) return undefined;
   const x = Float64Array.from(numbers.slice(run.from, run.to));
+  if (context.options.xRow === undefined && countsColumns(x)) return undefined;
   const unitText =
     cells
       .slice(0, run.from + 1)
@@ -55,6 +67,11 @@ function axisOf(context: LayoutContext, line: number): HeadingAxis | undefined {
   if (!fitsSomeRange(x, context.options.xUnit ?? xUnitFromText(unitText))) return undefined;
   const columns = Array.from(x.keys(), (i) => run.from + i + shift).filter((column) => column < block.fields);
   return { line, columns, x: x.slice(0, columns.length), unitText };
+}
+
+/** 1, 2, 3, … over the columns of a plate are no photon energies. */
+function countsColumns(x: Float64Array): boolean {
+  return (x[0] === 0 || x[0] === 1) && x.every((value, i) => i === 0 || value - (x[i - 1] ?? NaN) === 1);
 }
 
 function numberInWords(cell: string, mark: number): number {

@@ -1,5 +1,5 @@
 import { isWavelengthWord, signalFromText, xUnitFromText } from '../header-words';
-import { fittingUnits, judgeSignal } from '../inspect/guesses';
+import { answeredSignal, fittingUnits, judgeSignal } from '../inspect/guesses';
 import { sentinelValue } from '../inspect/sentinels';
 import { UNIT_WORDS, type SpectrumDraft } from '../inspect/spectrum-draft';
 import type { Question, ReadOptions, ReaderWarning, XUnit } from '../types';
@@ -54,7 +54,7 @@ export function seriesToDraft(
 ): SpectrumDraft {
   const yText = signalFromText(series.yLabel) ? series.yLabel : header.signalText;
   const judged = options.signal
-    ? { signal: options.signal, scale: 1, guessed: false, note: undefined }
+    ? answeredSignal(options.signal, yText)
     : judgeSignal(yText, withoutStandIns(series.y, header));
   const warnings = [...series.warnings];
   if (unit.warning) warnings.push(unit.warning);

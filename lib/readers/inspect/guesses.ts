@@ -46,6 +46,12 @@ const PERCENT_FROM = 1.5;
 /** Readings above this are no absorbance that a person would leave without a unit. */
 const ABSORBANCE_MOST = 20;
 
+/** The person's word for the ordinate; the scale of a unit that says the same (mAU for absorbance) still holds. */
+export function answeredSignal(signal: SignalKind, text: string): JudgedSignal {
+  const words = signalFromText(text);
+  return { signal, scale: words?.signal === signal ? words.scale : 1, guessed: false };
+}
+
 /** What the ordinate is, by its words, else by its values; a guess says that it is one. */
 export function judgeSignal(text: string, y: Float64Array): JudgedSignal {
   const words = signalFromText(text);

@@ -1,4 +1,7 @@
 import { distinctNames } from '../distinct-names';
+import { guessList } from '../guess-list';
+import { previewSpectrum } from '../preview-table';
+import { shapeKey, spectrumWords } from '../shape-key';
 import { finishSpectrum } from '../inspect/finish-spectrum';
 import { linesText, lineText, splitLines, type TextLines } from '../text-lines';
 import {
@@ -182,16 +185,14 @@ class JcampReading {
       trailerText: linesText(this.lines, end, this.lines.count).trim(),
       warnings: this.warnings,
       questions: this.questions,
+      guesses: guessList([], this.questions, spectra),
+      preview: previewSpectrum(spectra[0]),
       ...(this.peaks ? { notASpectrum: this.peaks } : {}),
       settings: {
         ...(this.options.xUnit ? { xUnit: this.options.xUnit } : {}),
         ...(this.options.signal ? { signal: this.options.signal } : {}),
       },
-      shape: [
-        'jcamp-dx',
-        ...forms,
-        ...new Set(spectra.map((spectrum) => `${spectrum.xUnit} ${spectrum.signalText}`)),
-      ].join('|'),
+      shape: shapeKey('jcamp-dx', [...forms, ...spectrumWords(spectra)]),
     };
   }
 }

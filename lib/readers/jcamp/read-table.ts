@@ -1,5 +1,5 @@
 import { otherAxisWord, xUnitFromText } from '../header-words';
-import { fittingUnits, judgeSignal } from '../inspect/guesses';
+import { answeredSignal, fittingUnits, judgeSignal } from '../inspect/guesses';
 import type { SpectrumDraft } from '../inspect/spectrum-draft';
 import type { TextLines } from '../text-lines';
 import { ReaderError, type Gap, type ReadOptions, type ReaderWarning, type XUnit } from '../types';
@@ -92,7 +92,7 @@ export function readTable(context: TableContext): SpectrumDraft {
   }
   const unit = judgeXUnit(header.xText, points.x, options, warnings);
   const signal = options.signal
-    ? { signal: options.signal, scale: 1, guessed: false, note: undefined }
+    ? answeredSignal(options.signal, header.yText)
     : judgeSignal(header.yText, points.y);
   if (signal.note) warnings.push(signal.note);
   return {
