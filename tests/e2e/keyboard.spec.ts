@@ -96,7 +96,8 @@ test('signs in, makes a notebook, a curve and a batch, and reads a concentration
   const columns = await samples.getByRole('columnheader').allTextContents();
   for (const column of columns.slice(1).map((text) => text.trim())) {
     if (/^dilution/i.test(column)) await page.keyboard.type('10 in 50');
-    else if (/^A/.test(column)) await page.keyboard.type(column.includes('1') ? '0.301' : '0.303');
+    else if (/^Reading 1/.test(column)) await page.keyboard.type('0.301');
+    else if (/^Reading 2/.test(column)) await page.keyboard.type('0.303');
     await page.keyboard.press('Tab');
   }
   await page.keyboard.press('Escape');
