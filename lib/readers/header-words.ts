@@ -45,6 +45,11 @@ export function isWavelengthWord(label: string): boolean {
   );
 }
 
+/** Whether a heading says that its column is x of a spectrum: by the word, or by the unit. */
+export function namesX(label: string): boolean {
+  return isWavelengthWord(label) || xUnitFromText(label) !== undefined;
+}
+
 /** Words over a column that is x of something else than a spectrum. */
 export function otherAxisWord(label: string): 'time' | 'concentration' | 'temperature' | 'other' | undefined {
   const text = labelOf(label);

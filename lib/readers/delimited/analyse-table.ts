@@ -1,6 +1,7 @@
 import type { TextLines } from '../text-lines';
 import type { Guess, NotASpectrum, Orientation, Question, ReadOptions, ReaderWarning } from '../types';
 import { checkColumns } from '../check-answers';
+import { namesX } from '../header-words';
 import { columnFacts } from './column-facts';
 import { columnSeries, pairSeries } from './columns-layout';
 import type { Decision } from './decide-dialect';
@@ -118,7 +119,8 @@ function layOut(context: LayoutContext): AnalysedTable {
     options.orientation === 'rows' ||
     options.xRow !== undefined ||
     (options.orientation === undefined && prefersRows(context, xColumn));
-  const axis = asRows ? findHeadingAxis(context) : undefined;
+  const label = context.heading.labels[xColumn ?? -1] ?? '';
+  const axis = asRows ? findHeadingAxis(context, namesX(label)) : undefined;
   if (axis) {
     const stated =
       axis.unitText !== '' ||

@@ -1,4 +1,4 @@
-import { isWavelengthWord, otherAxisWord, signalFromText, xUnitFromText } from '../header-words';
+import { isWavelengthWord, namesX, otherAxisWord, signalFromText, xUnitFromText } from '../header-words';
 import { xOrder } from '../inspect/order';
 import type { ReadOptions } from '../types';
 import { inRange, type ColumnFacts } from './column-facts';
@@ -24,7 +24,7 @@ export function findX(
   let best: number | undefined;
   let most = 0;
   facts.forEach((fact, i) => {
-    const score = xScore(table, fact, labels[i] ?? '', i, firstPlain, options);
+    const score = xScore(table, fact, labels[i] ?? '', i, firstPlain);
     if (score > most) {
       most = score;
       best = i;
@@ -42,10 +42,8 @@ export function xIsGuess(
   xColumn: number,
 ): boolean {
   const label = labels[xColumn] ?? '';
-  if (options.xColumn !== undefined || isWavelengthWord(label) || xUnitFromText(label)) return false;
-  return facts.some(
-    (fact, i) => i !== xColumn && xScore(table, fact, labels[i] ?? '', i, xColumn, options) > 0,
-  );
+  if (options.xColumn !== undefined || namesX(label)) return false;
+  return facts.some((fact, i) => i !== xColumn && xScore(table, fact, labels[i] ?? '', i, xColumn) > 0);
 }
 
 function hasOther(facts: readonly ColumnFacts[], index: number): boolean {
@@ -58,7 +56,6 @@ function xScore(
   label: string,
   index: number,
   firstPlain: number,
-  options: ReadOptions,
 ): number {
   if (fact.numbers < FILLED * fact.rows || (fact.low === fact.high && fact.rows > 1)) return 0;
   const place = 1 - index / 1000;
@@ -71,7 +68,7 @@ function xScore(
   )
     return 100 + place;
   if (otherAxisWord(label) || signalFromText(label) || fact.isIndex) return 0;
-  if (!inRange(fact, options.xUnit)) return 0;
+  if (!inRange(fact)) return 0;
   if (index !== firstPlain)
     return fact.low >= 100 && fact.direction !== 0 && fact.rows >= ENOUGH ? 10 + place : 0;
   if (fact.direction !== 0) return 50 + place;
@@ -104,7 +101,7 @@ export function isPaired(
   for (let i = 2; i < columns; i += 2) {
     const fact = facts[i];
     const label = labels[i] ?? '';
-    const named = isWavelengthWord(label) || xUnitFromText(label) !== undefined;
+    const named = namesX(label);
     if (!fact) return false;
     if (fact.numbers === 0) {
       if (!named && (facts[i + 1]?.numbers ?? 0) > 0) return false;

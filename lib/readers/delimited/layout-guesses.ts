@@ -1,4 +1,4 @@
-import { isWavelengthWord, xUnitFromText } from '../header-words';
+import { namesX } from '../header-words';
 import type { Guess } from '../types';
 import type { AnalysedTable } from './analyse-table';
 import { xIsGuess } from './find-x';
@@ -17,11 +17,9 @@ export function layoutGuesses(context: LayoutContext, analysed: AnalysedTable): 
   if (series.length === 0) return [];
   const guesses: Guess[] = [...analysed.guesses];
   const { labels } = context.heading;
-  const named = (column: number): boolean =>
-    isWavelengthWord(labels[column] ?? '') || xUnitFromText(labels[column] ?? '') !== undefined;
   if (orientation === 'pairs' && context.options.orientation === undefined) {
     const axes = context.columns.flatMap((fact, i) => (i % 2 === 0 && fact.numbers > 0 ? [i] : []));
-    if (!axes.every(named))
+    if (!axes.every((column) => namesX(labels[column] ?? '')))
       guesses.push({
         about: 'orientation',
         sentence: `Every second column can be an axis, so the ${context.columns.length} columns are taken as pairs of x and y`,

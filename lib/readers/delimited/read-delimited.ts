@@ -44,11 +44,7 @@ export function readDelimited(
   options.onSteps?.(text.length);
   const asked = options.delimiter === ',' && options.decimalMark === ',';
   const decision = decideDialect(lines, asked ? { ...options, decimalMark: '.' } : options);
-  if (!decision && options.headerRows)
-    throw refused(
-      `Below the first ${options.headerRows} lines there is no row of numbers. Give fewer header lines.`,
-    );
-  if (!decision) throw new ReaderError('NO_TABLE', NO_TABLE);
+  if (!decision) throw nothingLeft(options);
   const doubt = commaDoubt(lines, decision, options);
   if (doubt) {
     options.onSteps?.(3 * text.length);
@@ -74,6 +70,19 @@ export function readDelimited(
     if (quoted) return readTables(lines, quoted, fileName, encoding, options);
   }
   return readTables(lines, decision, fileName, encoding, options);
+}
+
+/** Answers can leave no table where there is one. */
+function nothingLeft({ headerRows, delimiter, decimalMark }: ReadOptions): ReaderError {
+  if (headerRows)
+    return refused(
+      `Below the first ${headerRows} lines there is no row of numbers. Give fewer header lines.`,
+    );
+  if (delimiter || decimalMark)
+    return refused(
+      'With this delimiter and decimal mark no row of numbers is left. Choose others, or leave them to be found.',
+    );
+  return new ReaderError('NO_TABLE', NO_TABLE);
 }
 
 function readTables(

@@ -22,9 +22,10 @@ const ROWS_ABOVE = 4;
 
 /**
  * Look for wavelengths in a heading row: a run of at least ten numbers, plain or within words ("Lambda 220 nm",
- * "A528", "X350.5"), that rises or falls throughout and can be an axis. The table's own first row may be that heading.
+ * "A528", "X350.5"), that rises or falls throughout and can be an axis. The table's own first row may be that heading, unless a
+ * column is named as x.
  */
-export function findHeadingAxis(context: LayoutContext): HeadingAxis | undefined {
+export function findHeadingAxis(context: LayoutContext, xIsNamed: boolean): HeadingAxis | undefined {
   const { block, lines, options } = context;
   if (options.xRow !== undefined) return axisGiven(context, options.xRow);
   if (block.fields < SHORTEST_AXIS) return undefined;
@@ -33,7 +34,7 @@ export function findHeadingAxis(context: LayoutContext): HeadingAxis | undefined
   for (let line = first - 1; line > context.above && candidates.length < ROWS_ABOVE; line--) {
     if (lineText(lines, line).trim() !== '') candidates.push(line);
   }
-  if (block.rows.length > 1) candidates.push(first);
+  if (block.rows.length > 1 && !xIsNamed) candidates.push(first);
   for (const line of candidates) {
     const axis = axisOf(context, line, SHORTEST_AXIS);
     if (axis) return axis;
@@ -64,7 +65,7 @@ function axisOf(context: LayoutContext, line: number, shortest: number): Heading
     cells
       .slice(0, run.from + 1)
       .find((cell) => xUnitFromText(cell) !== undefined || isWavelengthWord(cell)) ?? '';
-  if (!fitsSomeRange(x, context.options.xUnit ?? xUnitFromText(unitText))) return undefined;
+  if (!fitsSomeRange(x, context.options.xUnit ? undefined : xUnitFromText(unitText))) return undefined;
   const columns = Array.from(x.keys(), (i) => run.from + i + shift).filter((column) => column < block.fields);
   return { line, columns, x: x.slice(0, columns.length), unitText };
 }

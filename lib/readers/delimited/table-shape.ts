@@ -1,4 +1,4 @@
-import { isWavelengthWord, signalFromText, xUnitFromText } from '../header-words';
+import { namesX, signalFromText } from '../header-words';
 import { fittingUnits } from '../inspect/guesses';
 import { shapeKey } from '../shape-key';
 import type { Question } from '../types';
@@ -30,7 +30,7 @@ export function tableShape(
 /** Headings as words of the trade or as names, runs of one kind as one. */
 function labelKinds(labels: readonly string[]): string[] {
   const kinds = labels.map((label) => {
-    if (isWavelengthWord(label) || xUnitFromText(label)) return label.toLowerCase();
+    if (namesX(label)) return label.toLowerCase();
     const words = signalFromText(label);
     if (words) return `${words.signal} ${words.scale}`;
     return label === '' ? 'empty' : Number.isNaN(Number(label)) ? 'name' : 'number';
