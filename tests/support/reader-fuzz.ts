@@ -1,7 +1,7 @@
 import { seededUniform } from '../../fixtures/generate/seeded-noise';
 import { demoFiles } from '../../fixtures/generate/write-demo';
 import { spectrumFixtures } from '../../fixtures/generate/write-spectra';
-import { readFile } from '@/lib/readers/read-file';
+import { readFile, type ReadAnswers } from '@/lib/readers/read-file';
 import { ReaderError, type ReadSpectrum } from '@/lib/readers/types';
 
 /**
@@ -49,7 +49,8 @@ export function fuzzReaders({ runs, seed, moreFiles = [], onProgress }: FuzzOpti
   const failures: string[] = [];
   let [read, refused, mostSteps, mostPackedSteps, longestMs] = [0, 0, 0, 0, 0];
   for (let run = 0; run < runs; run++) {
-    const outcome = readCounted(mutated(files, uniform));
+    const bytes = mutated(files, uniform);
+    const outcome = readCounted(bytes, uniform() < 0.2 ? someAnswers(uniform) : {});
     if (outcome.refused) refused += 1;
     else read += 1;
     if (outcome.packed) mostPackedSteps = Math.max(mostPackedSteps, outcome.perByte);
@@ -71,7 +72,7 @@ export interface CountedReading {
 }
 
 /** Read an input with its steps counted, and say what it did that no input may do. */
-export function readCounted(bytes: Uint8Array): CountedReading {
+export function readCounted(bytes: Uint8Array, answers: ReadAnswers = {}): CountedReading {
   const wrong: string[] = [];
   let steps = 0;
   let refused = false;
@@ -79,16 +80,22 @@ export function readCounted(bytes: Uint8Array): CountedReading {
   let packed = true;
   const start = performance.now();
   try {
-    const { spectra, reader } = readFile(bytes, 'fuzz.csv', { onSteps: (more) => (steps += more) });
+    const { spectra, reader } = readFile(bytes, 'fuzz.csv', {
+      ...answers,
+      onSteps: (more) => (steps += more),
+    });
     packed = reader === 'jcamp-dx';
     wrong.push(...spectra.flatMap((spectrum) => brokenPromise(spectrum) ?? []));
   } catch (error) {
     refused = true;
     if (!(error instanceof ReaderError)) wrong.push(String(error));
   }
+  // With answers a file is read twice: as answered, and for the key of its shape.
+  const readings = Object.keys(answers).length > 0 ? 2 : 1;
   const most = packed ? STEPS_PER_PACKED_BYTE : STEPS_PER_BYTE;
-  const over = Math.max(0, steps - STEPS_AT_LEAST);
-  if (over > most * bytes.length) wrong.push(`${steps} steps for ${bytes.length} bytes`);
+  const over = Math.max(0, steps / readings - STEPS_AT_LEAST);
+  if (over > most * bytes.length)
+    wrong.push(`${steps} steps in ${readings} readings of ${bytes.length} bytes`);
   const perByte = bytes.length === 0 ? 0 : over / bytes.length;
   return { refused, packed, perByte, ms: performance.now() - start, wrong };
 }
@@ -128,6 +135,42 @@ function mutated(files: readonly Uint8Array[], uniform: () => number): Uint8Arra
   }
   return bytes;
 }
+
+/** Answers as a person may give them, fitting or not. */
+function someAnswers(uniform: () => number): ReadAnswers {
+  const answers = Array.from(
+    { length: 1 + Math.floor(3 * uniform()) },
+    () => ANSWERS[Math.floor(uniform() * ANSWERS.length)],
+  );
+  return Object.assign({}, ...answers) as ReadAnswers;
+}
+
+const ANSWERS: readonly ReadAnswers[] = [
+  { delimiter: ',' },
+  { delimiter: 'blank' },
+  { delimiter: 'fixed' },
+  { decimalMark: ',' },
+  { headerRows: 3 },
+  { orientation: 'columns' },
+  { orientation: 'pairs' },
+  { orientation: 'rows' },
+  { orientation: 'long' },
+  { orientation: 'stacked' },
+  { xColumn: 0 },
+  { xColumn: 2 },
+  { xRow: 0 },
+  { xRow: 5 },
+  { yColumns: [1] },
+  { yColumns: [3, 0] },
+  { xUnit: 'eV' },
+  { signal: 'percentTransmittance' },
+  { firstX: 200, stepX: 0.5 },
+  { table: 1 },
+  { equalX: 'mean' },
+  { equalX: 'keep' },
+  { turnRound: 'split' },
+  { missingValues: [0, -9999] },
+];
 
 /** A short piece many times over: what grows faster than its input shows here. */
 function blownUp(bytes: Uint8Array, at: number, length: number, times: number): Uint8Array {
