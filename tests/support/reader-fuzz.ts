@@ -19,8 +19,9 @@ export interface FuzzReport {
   /** The most steps for a byte that any input took: of packed tables, and of all others. */
   readonly mostSteps: number;
   readonly mostPackedSteps: number;
-  /** The longest any input took. */
+  /** The longest any input took, and which it was. */
   readonly longestMs: number;
+  readonly slowest: number;
   /** Inputs that threw something else or took too many steps: what happened, and how to make them again. */
   readonly failures: readonly string[];
 }
@@ -47,7 +48,7 @@ export function fuzzReaders({ runs, seed, moreFiles = [], onProgress }: FuzzOpti
   const files = [...fixtureFiles(), ...moreFiles];
   const uniform = seededUniform(seed);
   const failures: string[] = [];
-  let [read, refused, mostSteps, mostPackedSteps, longestMs] = [0, 0, 0, 0, 0];
+  let [read, refused, mostSteps, mostPackedSteps, longestMs, slowest] = [0, 0, 0, 0, 0, 0];
   for (let run = 0; run < runs; run++) {
     const bytes = mutated(files, uniform);
     const outcome = readCounted(bytes, uniform() < 0.2 ? someAnswers(uniform) : {});
@@ -55,11 +56,11 @@ export function fuzzReaders({ runs, seed, moreFiles = [], onProgress }: FuzzOpti
     else read += 1;
     if (outcome.packed) mostPackedSteps = Math.max(mostPackedSteps, outcome.perByte);
     else mostSteps = Math.max(mostSteps, outcome.perByte);
-    longestMs = Math.max(longestMs, outcome.ms);
+    if (outcome.ms > longestMs) [longestMs, slowest] = [outcome.ms, run];
     failures.push(...outcome.wrong.map((wrong) => `input ${run} of seed ${seed}: ${wrong}`));
     onProgress?.(run + 1);
   }
-  return { runs, read, refused, mostSteps, mostPackedSteps, longestMs, failures };
+  return { runs, read, refused, mostSteps, mostPackedSteps, longestMs, slowest, failures };
 }
 
 export interface CountedReading {

@@ -33,7 +33,7 @@ const report = fuzzReaders({
 
 for (const failure of report.failures.slice(0, 20)) console.error(failure);
 const slow = report.longestMs > LONGEST_MS;
-if (slow) console.error(`one input took ${report.longestMs.toFixed(0)} ms`);
+if (slow) console.error(`input ${report.slowest} of seed ${seed} took ${report.longestMs.toFixed(0)} ms`);
 const failed = report.failures.length > 0 || slow;
 console.info(
   [
@@ -41,7 +41,7 @@ console.info(
     `${report.read} read, ${report.refused} refused in a sentence, ${report.failures.length} failures`,
     `at most ${report.mostSteps.toFixed(0)} steps a byte (limit ${STEPS_PER_BYTE})`,
     `and ${report.mostPackedSteps.toFixed(0)} in JCAMP-DX or refused (limit ${STEPS_PER_PACKED_BYTE})`,
-    `longest ${report.longestMs.toFixed(0)} ms`,
+    `longest ${report.longestMs.toFixed(0)} ms (input ${report.slowest})`,
   ].join(', '),
 );
 process.exitCode = failed ? 1 : 0;

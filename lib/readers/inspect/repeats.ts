@@ -1,4 +1,4 @@
-import type { ReadOptions, ReaderWarning } from '../types';
+import type { Gap, ReadOptions, ReaderWarning } from '../types';
 import { pickPoints, UNIT_WORDS, type SpectrumDraft } from './spectrum-draft';
 
 export interface Repeats {
@@ -17,6 +17,7 @@ export function withoutRepeats(draft: SpectrumDraft, choice: ReadOptions['equalX
   if (groups.length === 0) return { draft, warnings: [], conflicts: 0 };
   const dropped = new Set<number>();
   const y = Float64Array.from(draft.y);
+  const gaps = new Map(draft.gaps.map((gap) => [gap.index, gap]));
   let same = 0;
   let conflicts = 0;
   let example = NaN;
@@ -29,12 +30,12 @@ export function withoutRepeats(draft: SpectrumDraft, choice: ReadOptions['equalX
     conflicts += 1;
     if (Number.isNaN(example)) example = draft.x[first] ?? NaN;
     if (choice === 'keep') continue;
-    if (choice === 'mean') y[first] = meanOf(draft.y, group);
+    if (choice === 'mean') takeMean(draft.y, group, y, gaps);
     for (const place of differing) dropped.add(place);
   }
   const kept = Array.from(draft.x.keys()).filter((place) => !dropped.has(place));
   const warnings = notes(draft, same, conflicts, example, choice);
-  return { draft: pickPoints({ ...draft, y }, kept), warnings, conflicts };
+  return { draft: pickPoints({ ...draft, y, gaps: [...gaps.values()] }, kept), warnings, conflicts };
 }
 
 function notes(
@@ -92,6 +93,25 @@ function sameReading(y: Float64Array, a: number, b: number): boolean {
   const [first = NaN, second = NaN] = [y[a], y[b]];
   return first === second || (Number.isNaN(first) && Number.isNaN(second));
 }
+
+/**
+ * Put the mean of a group in place of its first reading. A reading off the scale has no number to average: the mean
+ * without it would be too low or too high, so the point becomes a gap with that reason.
+ */
+function takeMean(
+  readings: Float64Array,
+  group: readonly number[],
+  y: Float64Array,
+  gaps: Map<number, Gap>,
+): void {
+  const [first = 0] = group;
+  const offScale = group.map((place) => gaps.get(place)).find((gap) => gap && OFF_SCALE.has(gap.reason));
+  y[first] = offScale ? NaN : meanOf(readings, group);
+  gaps.delete(first);
+  if (offScale) gaps.set(first, { ...offScale, index: first });
+}
+
+const OFF_SCALE: ReadonlySet<Gap['reason']> = new Set(['aboveRange', 'belowRange']);
 
 function meanOf(y: Float64Array, places: readonly number[]): number {
   const readings = places.map((place) => y[place] ?? NaN).filter((value) => !Number.isNaN(value));

@@ -105,6 +105,14 @@ describe('every guess can be replaced', () => {
     expect([spectrum?.xUnitGuessed, spectrum?.signalGuessed]).toEqual([false, false]);
   });
 
+  test('the mean of equal x takes what can be averaged; a reading off the scale makes the point a gap', () => {
+    const text = 'nm,Abs\n400,\n400,0.2\n400,0.4\n410,OVER\n410,0.3\n420,0.5\n430,0.6\n';
+    const [spectrum] = read(text, { equalX: 'mean' }).spectra;
+    expect(spectrum?.y[0]).toBeCloseTo(0.3, 12);
+    expect(Array.from(spectrum?.y ?? []).slice(1)).toEqual([NaN, 0.5, 0.6]);
+    expect(spectrum?.gaps).toEqual([{ index: 1, reason: 'aboveRange', text: 'OVER' }]);
+  });
+
   test('the scale of a unit survives the answer that says the same', () => {
     const milli = 'Wavelength (nm),mAU\n400,100\n410,200\n420,300\n';
     expect(read(milli, { signal: 'absorbance' }).spectra[0]?.signalScale).toBe(0.001);
