@@ -152,8 +152,11 @@ test('a spectrum knows its file; the original comes back to the byte; setting as
   const address = await makeNotebook(page, 'One spectrum');
   const file = spectrumFile('S1', 0.5);
   await upload(page, address, [file]);
-  await page.getByRole('link', { name: 'S1', exact: true }).click();
-  await expect(page.getByRole('heading', { level: 1, name: 'S1' })).toBeVisible();
+  // the list is fetched anew after an upload, and may be changed under the first press
+  await expect(async () => {
+    await page.getByRole('link', { name: 'S1', exact: true }).click({ timeout: 5_000 });
+    await expect(page.getByRole('heading', { level: 1, name: 'S1' })).toBeVisible({ timeout: 5_000 });
+  }).toPass();
   await expect(page.getByText('checked now: the stored bytes give this hash')).toBeVisible();
   await expect(page.getByText('10 mm, from the file')).toBeVisible();
   const [download] = await Promise.all([
